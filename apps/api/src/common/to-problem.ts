@@ -1,0 +1,52 @@
+import { HttpException } from '@nestjs/common';
+import { errorCodes, type ErrorCode } from '@lidwatch/contracts';
+import { Problem } from './problem';
+
+const codesByStatus: Record<number, ErrorCode> = {
+  400: 'bad-request',
+  401: 'sign-in-needed',
+  403: 'not-allowed',
+  404: 'not-found',
+  405: 'method-not-allowed',
+  408: 'bad-request',
+  413: 'too-large',
+  415: 'type-not-served',
+  422: 'invalid',
+  429: 'too-many-attempts',
+  503: 'not-ready',
+};
+
+const details: Partial<Record<ErrorCode, string>> = {
+  'sign-in-needed': 'Sign in to go on.',
+  'not-allowed': 'Your role may not do this.',
+  'too-large': 'The request is larger than this address takes. Send it in smaller parts.',
+  'type-not-served': 'Send application/json, or what this address says it takes.',
+  unexpected: 'Try again. If it stays, tell your administrator the time at which it happened.',
+};
+
+/**
+ * Any thrown thing as a Problem. Body-parser errors carry a status and a type; what carries no client status is
+ * `unexpected`, and its message stays in the log.
+ */
+export function toProblem(error: unknown): Problem {
+  if (error instanceof Problem) return error;
+  const status = error instanceof HttpException ? error.getStatus() : clientStatusOf(error);
+  const code = codesByStatus[status] ?? (status < 500 ? 'bad-request' : 'unexpected');
+  return new Problem(code, detailOf(code, error));
+}
+
+function clientStatusOf(error: unknown): number {
+  const { status, expose } = (error ?? {}) as { status?: unknown; expose?: unknown };
+  return typeof status === 'number' && expose === true ? status : 500;
+}
+
+function detailOf(code: ErrorCode, error: unknown): string {
+  const { type } = (error ?? {}) as { type?: string };
+  if (type === 'entity.parse.failed') return 'The body is not valid JSON.';
+  if (type === 'encoding.unsupported' || type === 'charset.unsupported')
+    return 'Send the body as UTF-8 text.';
+  const fixed = details[code];
+  if (fixed) return fixed;
+  const message = error instanceof Error ? error.message : '';
+  return message || errorCodes[code].title;
+}

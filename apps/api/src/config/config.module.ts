@@ -1,0 +1,19 @@
+import { Global, Module } from '@nestjs/common';
+import { ConfigModule as EnvironmentFileModule, ConfigService } from '@nestjs/config';
+import { readSettings } from './read-settings';
+import { Settings } from './settings';
+
+/** Reads the environment and an optional `.env` file once and offers them as Settings everywhere. */
+@Global()
+@Module({
+  imports: [EnvironmentFileModule.forRoot({ cache: true })],
+  providers: [
+    {
+      provide: Settings,
+      inject: [ConfigService],
+      useFactory: (config: ConfigService) => readSettings((name) => config.get<string>(name)),
+    },
+  ],
+  exports: [Settings],
+})
+export class ConfigModule {}
