@@ -4,3 +4,4 @@ export * from './units';
 export * from './temperature';
 export * from './uncertainty';
 export * from './profile';
+export * from './inversions';

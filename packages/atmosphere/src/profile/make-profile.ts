@@ -33,7 +33,7 @@ const merged = (same: readonly ProfileLevel[], notes: string[]): ProfileLevel =>
   return {
     heightM,
     temperatureC: sorted.reduce((sum, t) => sum + t, 0) / sorted.length,
-    sigmaC: sigmas.includes(null) ? null : Math.hypot(...sigmas.map((s) => s!).sort()) / sigmas.length,
+    sigmaC: sigmas.includes(null) ? null : Math.hypot(...sigmas.map((s) => s!).sort((a, b) => a - b)) / sigmas.length,
     suspect: given.some((l) => l.suspect),
   };
 };
