@@ -1,0 +1,43 @@
+import type { RouteObject } from 'react-router-dom';
+import { paths } from './paths';
+import { RoleGate } from './role-gate';
+
+/** The pages of analysts and officers, inside the staff frame. */
+export const staffRoutes: RouteObject[] = [
+  {
+    element: <RoleGate roles={['analyst', 'administrator']} />,
+    children: [
+      { path: paths.desk, lazy: async () => ({ Component: (await import('../pages/desk-page')).DeskPage }) },
+    ],
+  },
+  {
+    element: <RoleGate roles={['officer']} />,
+    children: [
+      {
+        path: paths.officer,
+        lazy: async () => ({ Component: (await import('../pages/officer-page')).OfficerPage }),
+      },
+    ],
+  },
+  {
+    element: <RoleGate roles={['analyst', 'officer', 'administrator']} />,
+    children: [
+      {
+        path: paths.proposal(),
+        lazy: async () => ({ Component: (await import('../pages/proposal-page')).ProposalPage }),
+      },
+      {
+        path: paths.history,
+        lazy: async () => ({ Component: (await import('../pages/history-page')).HistoryPage }),
+      },
+      {
+        path: paths.notices,
+        lazy: async () => ({ Component: (await import('../pages/notices-page')).NoticesPage }),
+      },
+      {
+        path: paths.notice(),
+        lazy: async () => ({ Component: (await import('../pages/notice-page')).NoticePage }),
+      },
+    ],
+  },
+];

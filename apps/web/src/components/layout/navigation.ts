@@ -1,0 +1,21 @@
+import { paths } from '../../app/paths';
+import type { Role } from '../../lib/api/types';
+import type { IconName } from './nav-icon';
+
+/** One place of the application, as the navigation names it. */
+export interface Place {
+  to: string;
+  name: string;
+  icon: IconName;
+}
+
+const NOTICES: Place = { to: paths.notices, name: 'Notices', icon: 'notices' };
+const HISTORY: Place = { to: paths.history, name: 'History', icon: 'history' };
+const DESK: Place = { to: paths.desk, name: 'Desk', icon: 'desk' };
+
+/** Where each role may go, its own work first. */
+export const placesOf: Record<Role, readonly Place[]> = {
+  analyst: [DESK, NOTICES, HISTORY],
+  officer: [{ to: paths.officer, name: 'Decisions', icon: 'decisions' }, NOTICES, HISTORY],
+  administrator: [{ to: paths.admin, name: 'Administration', icon: 'admin' }, DESK, NOTICES, HISTORY],
+};

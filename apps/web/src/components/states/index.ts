@@ -1,0 +1,5 @@
+export * from './empty';
+export * from './failed';
+export * from './loaded';
+export * from './loading';
+export * from './stale';

@@ -1,0 +1,6 @@
+import { PageHead } from '../components/layout/page-head';
+
+/** The page; its feature is built next. */
+export function OfficerPage() {
+  return <PageHead title="Officer" />;
+}
