@@ -5,3 +5,5 @@ export * from './temperature';
 export * from './uncertainty';
 export * from './profile';
 export * from './inversions';
+export * from './humidity';
+export * from './mixing';

@@ -36,7 +36,11 @@ const middle = (values: readonly number[]): number => {
   if (sorted.length % 2 === 1) return upper;
   const lower = sorted[(sorted.length >> 1) - 1]!;
   if (lower === upper) return upper;
-  return lower === -Infinity || upper === Infinity ? (lower === -Infinity ? lower : upper) : (lower + upper) / 2;
+  return lower === -Infinity || upper === Infinity
+    ? lower === -Infinity
+      ? lower
+      : upper
+    : (lower + upper) / 2;
 };
 
 /**

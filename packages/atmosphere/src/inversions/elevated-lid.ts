@@ -20,7 +20,11 @@ const counts = (inversion: Inversion, minimumC: number): Truth =>
  * inversions might count; with fewer than two levels, or a missing one, it is not known.
  * Source: [Kahl1990] elevated inversion; the minimum is common practice.
  */
-export function elevatedLid(profile: Profile, inversions: readonly Inversion[], minimumC: number): ElevatedLid {
+export function elevatedLid(
+  profile: Profile,
+  inversions: readonly Inversion[],
+  minimumC: number,
+): ElevatedLid {
   const elevated = inversions.filter((inversion) => inversion.kind === 'elevated');
   const lid = elevated.find((inversion) => counts(inversion, minimumC) === 'true');
   if (lid !== undefined) {

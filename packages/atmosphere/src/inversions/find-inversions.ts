@@ -24,7 +24,10 @@ export interface InversionFinding {
  * comparisons with published statistics use; *sensor-aware* (the default) passes over decreases that the sensors
  * cannot tell, and equals *plain* where no uncertainty is known. Source: [Kahl1990].
  */
-export function findInversions(profile: Profile, settings: Partial<InversionSettings> = {}): InversionFinding {
+export function findInversions(
+  profile: Profile,
+  settings: Partial<InversionSettings> = {},
+): InversionFinding {
   const used = { ...DEFAULT_INVERSION_SETTINGS, ...settings };
   const runs = runsOf(profile);
   const inversions = runs.flatMap((run, i) =>

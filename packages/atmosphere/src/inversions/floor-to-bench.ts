@@ -40,10 +40,16 @@ const nothing = (reason: string, riseM: number | null): FloorToBench => ({
 });
 
 /** θ difference with the bench's pressure taken hydrostatically from the floor's, so that no barometer's error enters. */
-const potentialDifferenceK = (floor: TowerTemperature, floorC: number, benchC: number, riseM: number): number => {
+const potentialDifferenceK = (
+  floor: TowerTemperature,
+  floorC: number,
+  benchC: number,
+  riseM: number,
+): number => {
   const floorHPa = floor.pressureHPa ?? standardPressureHPa(floor.elevationM) ?? standardPressureHPa(0)!;
   const benchHPa = pressureAboveHPa(floorHPa, riseM, (floorC + benchC) / 2 + ZERO_CELSIUS_K);
-  const theta = (temperatureC: number, hPa: number) => potentialTemperatureK(temperatureC + ZERO_CELSIUS_K, hPa);
+  const theta = (temperatureC: number, hPa: number) =>
+    potentialTemperatureK(temperatureC + ZERO_CELSIUS_K, hPa);
   return theta(benchC, benchHPa) - theta(floorC, floorHPa);
 };
 
@@ -75,6 +81,8 @@ export function floorToBench(
     potentialCPer100M: exactly((100 * potentialDifferenceK(floor, floorC, benchC, riseM)) / riseM),
     sigmaC,
     benchWarmer: compare(exactly(difference), '>', 0),
-    sure: truthOf(warmer === null ? null : warmer >= sureFromProbability || warmer <= 1 - sureFromProbability),
+    sure: truthOf(
+      warmer === null ? null : warmer >= sureFromProbability || warmer <= 1 - sureFromProbability,
+    ),
   };
 }

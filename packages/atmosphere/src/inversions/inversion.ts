@@ -13,6 +13,8 @@ export interface Inversion {
   /** Lowest level at which its top can lie, m: its top, unless `open`. */
   readonly topM: number;
   readonly open: OpenEnd;
+  readonly baseTemperatureC: number;
+  readonly topTemperatureC: number;
   /** True when a missing level lies just below: "base at or below". */
   readonly baseAtOrBelow: boolean;
   readonly depthM: Quantity;
@@ -71,7 +73,9 @@ export function describeInversion(
   const probability = sigmaC === null ? null : 1 - probabilityBelow(strength, sigmaC, 0);
   const suspect = within.some((level) => level.suspect);
   const why = [
-    ...(open === 'no' ? [] : [`the top is not seen: ${open === 'at the top' ? 'it reaches the highest level' : open}`]),
+    ...(open === 'no'
+      ? []
+      : [`the top is not seen: ${open === 'at the top' ? 'it reaches the highest level' : open}`]),
     ...(baseAtOrBelow ? ['the base is not seen: the level below it gave nothing'] : []),
   ].join('; ');
   const bounded = (value: number): Quantity => (why === '' ? exactly(value) : atLeast(value, why));
@@ -80,6 +84,8 @@ export function describeInversion(
     baseM: base.heightM,
     topM: top.heightM,
     open,
+    baseTemperatureC: base.temperatureC,
+    topTemperatureC: top.temperatureC,
     baseAtOrBelow,
     depthM: bounded(depth),
     depthWithinTowerM: depth,

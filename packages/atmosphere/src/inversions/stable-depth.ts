@@ -16,7 +16,8 @@ const depth = (profile: Profile, layers: readonly Layer[], stable: (layer: Layer
   if (!isMeasured(lowest)) return notKnown(`the lowest level, at ${lowest.heightM} m, gave nothing`);
   if (profile.levels.length < 2) return notKnown('a profile needs two levels or more');
   let topM = lowest.heightM;
-  const soFar = (why: string) => (topM > lowest.heightM ? atLeast(topM - lowest.heightM, why) : notKnown(why));
+  const soFar = (why: string) =>
+    topM > lowest.heightM ? atLeast(topM - lowest.heightM, why) : notKnown(why);
   for (const layer of layers) {
     const missing = layer.missingBetweenM[0];
     if (missing !== undefined) return soFar(`the level at ${missing} m gave nothing`);
@@ -24,7 +25,9 @@ const depth = (profile: Profile, layers: readonly Layer[], stable: (layer: Layer
     topM = layer.topM;
   }
   const highest = profile.levels.at(-1)!;
-  return soFar(isMeasured(highest) ? 'it reaches the highest level' : `the level at ${highest.heightM} m gave nothing`);
+  return soFar(
+    isMeasured(highest) ? 'it reaches the highest level' : `the level at ${highest.heightM} m gave nothing`,
+  );
 };
 
 /**

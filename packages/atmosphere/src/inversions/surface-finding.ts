@@ -90,7 +90,8 @@ export function surfaceFinding(
   if (lowest === undefined) return unknown('the tower gave no temperature level', ground);
   const surface = inversions.find((inversion) => inversion.kind === 'surface-based');
   if (surface !== undefined) return present(surface, ground);
-  if (ground.lowestLevelMissing) return unknown(`the lowest level, at ${lowest.heightM} m, gave nothing`, ground);
+  if (ground.lowestLevelMissing)
+    return unknown(`the lowest level, at ${lowest.heightM} m, gave nothing`, ground);
   if (profile.levels.length < 2) return unknown('a profile needs two levels or more', ground);
   if (runs[0]!.levels.length < 2) {
     return unknown(`the level at ${profile.levels[1]!.heightM} m, next to the lowest, gave nothing`, ground);

@@ -28,7 +28,9 @@ const ROUNDING = 1e-9;
  */
 export function deltaTClass(gradientCPer100M: number): DeltaTClass | null {
   if (Number.isNaN(gradientCPer100M)) return null;
-  const index = DELTA_T_CLASS_UPPER_BOUNDS_C_PER_100_M.findIndex((bound) => gradientCPer100M <= bound + ROUNDING);
+  const index = DELTA_T_CLASS_UPPER_BOUNDS_C_PER_100_M.findIndex(
+    (bound) => gradientCPer100M <= bound + ROUNDING,
+  );
   return index < 0 ? 'G' : DELTA_T_CLASSES[index]!;
 }
 

@@ -79,4 +79,5 @@ export const isMeasured = (level: ProfileLevel): level is MeasuredLevel => level
  *
  * Units: none. Valid: any profile, also an empty one. Source: none (definition).
  */
-export const measuredLevels = (profile: Profile): readonly MeasuredLevel[] => profile.levels.filter(isMeasured);
+export const measuredLevels = (profile: Profile): readonly MeasuredLevel[] =>
+  profile.levels.filter(isMeasured);

@@ -33,7 +33,9 @@ const merged = (same: readonly ProfileLevel[], notes: string[]): ProfileLevel =>
   return {
     heightM,
     temperatureC: sorted.reduce((sum, t) => sum + t, 0) / sorted.length,
-    sigmaC: sigmas.includes(null) ? null : Math.hypot(...sigmas.map((s) => s!).sort((a, b) => a - b)) / sigmas.length,
+    sigmaC: sigmas.includes(null)
+      ? null
+      : Math.hypot(...sigmas.map((s) => s!).sort((a, b) => a - b)) / sigmas.length,
     suspect: given.some((l) => l.suspect),
   };
 };
@@ -44,9 +46,11 @@ const pressureOf = (air: ProfileAir, notes: string[]): { pressureHPa: number; pr
     return { pressureHPa: measured, pressureAssumed: false };
   }
   if (typeof measured === 'number') notes.push(`${measured} hPa is no station pressure and was set aside`);
-  const elevationM = typeof air.elevationM === 'number' && Number.isFinite(air.elevationM) ? air.elevationM : 0;
+  const elevationM =
+    typeof air.elevationM === 'number' && Number.isFinite(air.elevationM) ? air.elevationM : 0;
   const assumed = standardPressureHPa(elevationM);
-  const usable = assumed !== null && within(assumed, ACCEPTED_PRESSURE_HPA) ? assumed : standardPressureHPa(0)!;
+  const usable =
+    assumed !== null && within(assumed, ACCEPTED_PRESSURE_HPA) ? assumed : standardPressureHPa(0)!;
   return { pressureHPa: usable, pressureAssumed: true };
 };
 

@@ -18,7 +18,11 @@ export interface SaturationFinding {
  * Units: % over water, °C. Valid: humidity 0 % or more; an unknown σ counts as 0.
  * Source: [WMO8] (RH over water at all temperatures; annex 4.B for ice).
  */
-export function isSaturated(relativeHumidityPercent: number, sigmaPercent: number, temperatureC: number): boolean {
+export function isSaturated(
+  relativeHumidityPercent: number,
+  sigmaPercent: number,
+  temperatureC: number,
+): boolean {
   const overIce = temperatureC < SATURATED_OVER_ICE_BELOW_C;
   const factor = overIce
     ? saturationVapourPressureWaterHPa(temperatureC) / saturationVapourPressureIceHPa(temperatureC)
@@ -41,7 +45,9 @@ export function layerSaturation(
   const inside = humidity.filter(
     (h) => h.heightM >= baseM && h.heightM <= topM && Number.isFinite(h.relativeHumidityPercent),
   );
-  const wet = inside.find((h) => isSaturated(h.relativeHumidityPercent!, h.sigmaPercent ?? 0, meanTemperatureC));
+  const wet = inside.find((h) =>
+    isSaturated(h.relativeHumidityPercent!, h.sigmaPercent ?? 0, meanTemperatureC),
+  );
   if (wet !== undefined) return { saturated: 'true', atM: wet.heightM };
   return { saturated: inside.length > 0 ? 'false' : 'not known', atM: null };
 }

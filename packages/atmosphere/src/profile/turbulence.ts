@@ -5,7 +5,11 @@ import { GRAVITY_M_PER_S2 } from '../constants';
  *
  * Units: K, K, m in; s⁻² out. Valid: θ and thickness above 0; else null. Source: [AMSGlossary] Brunt–Väisälä frequency.
  */
-export function bruntVaisalaSquaredPerS2(thetaK: number, deltaThetaK: number, thicknessM: number): number | null {
+export function bruntVaisalaSquaredPerS2(
+  thetaK: number,
+  deltaThetaK: number,
+  thicknessM: number,
+): number | null {
   if (!(thetaK > 0 && thicknessM > 0) || Number.isNaN(deltaThetaK)) return null;
   return (GRAVITY_M_PER_S2 * deltaThetaK) / (thetaK * thicknessM);
 }

@@ -7,7 +7,8 @@ import { DRY_AIR_GAS_CONSTANT_J_PER_KG_K, GRAVITY_M_PER_S2 } from '../constants'
  * the layer). Source: [AMSGlossary] hypsometric equation.
  */
 export const pressureAboveHPa = (pressureHPa: number, thicknessM: number, meanTemperatureK: number): number =>
-  pressureHPa * Math.exp((-GRAVITY_M_PER_S2 * thicknessM) / (DRY_AIR_GAS_CONSTANT_J_PER_KG_K * meanTemperatureK));
+  pressureHPa *
+  Math.exp((-GRAVITY_M_PER_S2 * thicknessM) / (DRY_AIR_GAS_CONSTANT_J_PER_KG_K * meanTemperatureK));
 
 /**
  * Thickness of a layer of dry air between two pressures (hypsometric equation).

@@ -35,14 +35,16 @@ export const knotsFromMetresPerSecond = (speedMPerS: number): number => speedMPe
  *
  * Units: mph in, m/s out. Valid: any number; NaN stays NaN. Source: [NISTSP811] appendix B (exact).
  */
-export const metresPerSecondFromMilesPerHour = (speedMph: number): number => speedMph * M_PER_S_PER_MILE_PER_HOUR;
+export const metresPerSecondFromMilesPerHour = (speedMph: number): number =>
+  speedMph * M_PER_S_PER_MILE_PER_HOUR;
 
 /**
  * Metres a second to miles an hour.
  *
  * Units: m/s in, mph out. Valid: any number; NaN stays NaN. Source: [NISTSP811] appendix B (exact).
  */
-export const milesPerHourFromMetresPerSecond = (speedMPerS: number): number => speedMPerS / M_PER_S_PER_MILE_PER_HOUR;
+export const milesPerHourFromMetresPerSecond = (speedMPerS: number): number =>
+  speedMPerS / M_PER_S_PER_MILE_PER_HOUR;
 
 /**
  * Kilometres an hour to metres a second.

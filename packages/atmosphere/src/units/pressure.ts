@@ -20,4 +20,5 @@ export const paFromHPa = (pressureHPa: number): number => pressureHPa * PA_PER_H
  *
  * Units: inHg in, hPa out. Valid: any number; NaN stays NaN. Source: [NISTSP811] appendix B, 3.386389 kPa.
  */
-export const hPaFromInchesOfMercury = (pressureInHg: number): number => pressureInHg * HPA_PER_INCH_OF_MERCURY;
+export const hPaFromInchesOfMercury = (pressureInHg: number): number =>
+  pressureInHg * HPA_PER_INCH_OF_MERCURY;
