@@ -1,0 +1,15 @@
+export { LANGUAGES } from './measures/measure';
+export type { Language, Measure } from './measures/measure';
+export { isMeasureName, MEASURES, MEASURE_NAMES } from './measures/catalogue';
+export type { MeasureName } from './measures/catalogue';
+export * from './definition/rule-definition';
+export * from './definition/limits';
+export type { Problem, ProblemCode } from './definition/problems';
+export { comparisonsFor } from './definition/validate-clause';
+export { validateRule } from './definition/validate-rule';
+export type { Validation } from './definition/validate-rule';
+export * from './evaluation/measured-block';
+export * from './evaluation/block-series';
+export type * from './evaluation/evaluated-node';
+export { evaluate } from './evaluation/evaluate';
+export * from './evaluation/evidence';
