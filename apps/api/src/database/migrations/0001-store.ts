@@ -86,6 +86,7 @@ export const up: readonly string[] = [
   `CREATE TABLE dirty (
      stage INTEGER NOT NULL, subject INTEGER NOT NULL, t INTEGER NOT NULL, gen INTEGER NOT NULL DEFAULT 1,
      PRIMARY KEY (stage, subject, t)) STRICT, WITHOUT ROWID`,
+  `CREATE INDEX dirty_newest ON dirty(stage, t)`,
 
   // --- findings -------------------------------------------------------------------------------------------------
   `CREATE TABLE block_mean (

@@ -1,0 +1,155 @@
+import { Injectable, Logger, type OnModuleDestroy } from '@nestjs/common';
+import { Sql } from './sql';
+import { UnitOfWork } from './unit-of-work';
+
+/**
+ * The steps from a reading to a finding. 1: blocks of a tower whose readings changed, to be screened and averaged.
+ * 2: blocks of a tower whose means changed, to become a profile. 3: blocks of a district whose profiles changed.
+ */
+export type Stage = 1 | 2 | 3;
+const STAGES: readonly Stage[] = [1, 2, 3];
+
+/** Something to be worked out anew. `gen` counts the changes, so that one that comes meanwhile is not lost. */
+export interface DirtyRow {
+  /** Tower id (stages 1 and 2) or district id (stage 3). */
+  readonly subject: number;
+  /** End of the block, UTC epoch seconds. */
+  readonly t: number;
+  readonly gen: number;
+}
+
+/** Works out one batch of a stage, settling its rows in the transaction of its results; says how many it settled. */
+export type StageHandler = () => Promise<number>;
+
+/** Changes that come within this time are worked out together, ms. */
+const GATHER_MS = 25;
+
+const MARK = `INSERT INTO dirty (stage, subject, t) SELECT $1, value->>0, value->>1 FROM json_each($2) WHERE true
+  ON CONFLICT DO UPDATE SET gen = gen + 1`;
+const SETTLE = `DELETE FROM dirty WHERE (stage, subject, t) IN (
+  SELECT d.stage, d.subject, d.t FROM json_each($2) j CROSS JOIN dirty d
+  ON d.stage = $1 AND d.subject = j.value->>0 AND d.t = j.value->>1 AND d.gen = j.value->>2)`;
+const MARK_TOWER = `INSERT INTO dirty (stage, subject, t)
+  SELECT DISTINCT stage.value, $1, b.t_end FROM json_each('[1,2]') stage, block_mean b
+  WHERE b.sensor_id IN (SELECT id FROM sensor WHERE tower_id = $1) AND b.t_end > $2
+  ON CONFLICT DO UPDATE SET gen = gen + 1`;
+const MARK_DISTRICT = `INSERT INTO dirty (stage, subject, t)
+  SELECT DISTINCT 3, $1, t_end FROM profile WHERE tower_id IN (SELECT value FROM json_each($2))
+  ON CONFLICT DO UPDATE SET gen = gen + 1`;
+
+/**
+ * What has changed and waits to be worked out, and who works it out. A mark is made in the transaction of the change
+ * itself, so nothing is lost when the process dies; each stage runs once at a time.
+ */
+@Injectable()
+export class DirtyStages implements OnModuleDestroy {
+  private readonly log = new Logger(DirtyStages.name);
+  private readonly handlers = new Map<Stage, StageHandler>();
+  private readonly running = new Map<Stage, Promise<void>>();
+  private readonly again = new Set<Stage>();
+  private readonly timers = new Map<Stage, NodeJS.Timeout>();
+  private closing = false;
+
+  constructor(
+    private readonly sql: Sql,
+    private readonly work: UnitOfWork,
+  ) {}
+
+  /** Says who works out a stage. */
+  registerStage(stage: Stage, handler: StageHandler): void {
+    this.handlers.set(stage, handler);
+  }
+
+  /** Marks blocks ([subject, t]) in the running transaction; after its commit they are worked out. */
+  async mark(stage: Stage, blocks: readonly (readonly [number, number])[]): Promise<void> {
+    if (blocks.length === 0) return;
+    await this.sql.run(MARK, [stage, JSON.stringify(blocks)]);
+    this.work.afterCommit(() => this.soon(stage));
+  }
+
+  /** Marks every block of a tower that ends after an instant: its settings or sensors changed. */
+  async markTower(towerId: number, afterT = 0): Promise<void> {
+    await this.sql.run(MARK_TOWER, [towerId, afterT]);
+    this.work.afterCommit(() => this.soon(1));
+  }
+
+  /** Marks every block of a district for which one of these towers has a profile. */
+  async markDistrict(districtId: number, towerIds: readonly number[]): Promise<void> {
+    await this.sql.run(MARK_DISTRICT, [districtId, JSON.stringify(towerIds)]);
+    this.work.afterCommit(() => this.soon(3));
+  }
+
+  /** The newest blocks of a stage that wait and end by `untilT`. */
+  newest(stage: Stage, limit: number, untilT: number): Promise<DirtyRow[]> {
+    return this.sql.all<DirtyRow>(
+      'SELECT subject, t, gen FROM dirty WHERE stage = $1 AND t <= $2 ORDER BY t DESC LIMIT $3',
+      [stage, untilT, limit],
+    );
+  }
+
+  /** Takes the marks away, in the running transaction, except where another change has come since they were read. */
+  async settle(stage: Stage, rows: readonly DirtyRow[]): Promise<void> {
+    const read = rows.map(({ subject, t, gen }) => [subject, t, gen]);
+    await this.sql.run(SETTLE, [stage, JSON.stringify(read)]);
+  }
+
+  /** How many blocks of a tower that ended by `untilT` wait. */
+  async pending(towerId: number, untilT: number): Promise<number> {
+    const row = await this.sql.get<{ n: number }>(
+      'SELECT count(*) n FROM dirty WHERE stage IN (1, 2) AND subject = $1 AND t <= $2',
+      [towerId, untilT],
+    );
+    return row?.n ?? 0;
+  }
+
+  /** Works out a stage until nothing of it waits; one at a time, later callers wait for the same. */
+  drain(stage: Stage): Promise<void> {
+    const running = this.running.get(stage);
+    if (running) {
+      this.again.add(stage);
+      return running;
+    }
+    const done = this.run(stage).finally(() => this.running.delete(stage));
+    this.running.set(stage, done);
+    return done;
+  }
+
+  /** Works out everything that waits, in the order of the stages. */
+  async drainAll(): Promise<void> {
+    for (const stage of STAGES) {
+      this.cancel(stage);
+      await this.drain(stage);
+    }
+  }
+
+  /** Stops after the batch at hand. */
+  async onModuleDestroy(): Promise<void> {
+    this.closing = true;
+    for (const stage of STAGES) this.cancel(stage);
+    await Promise.allSettled(this.running.values());
+  }
+
+  private async run(stage: Stage): Promise<void> {
+    const handler = this.handlers.get(stage);
+    do {
+      this.again.delete(stage);
+      while (handler && !this.closing && (await handler()) > 0);
+    } while (this.again.has(stage) && !this.closing);
+  }
+
+  private soon(stage: Stage): void {
+    if (this.closing || this.timers.has(stage)) return;
+    const timer = setTimeout(() => {
+      this.timers.delete(stage);
+      this.drain(stage).catch((error: unknown) => {
+        this.log.error(`Stage ${stage} could not be worked out; it is tried again within a minute`, error);
+      });
+    }, GATHER_MS);
+    this.timers.set(stage, timer.unref());
+  }
+
+  private cancel(stage: Stage): void {
+    clearTimeout(this.timers.get(stage));
+    this.timers.delete(stage);
+  }
+}

@@ -1,0 +1,15 @@
+import { Module } from '@nestjs/common';
+import { SequelizeModule } from '@nestjs/sequelize';
+import { DistrictsController } from './districts.controller';
+import { DistrictsService } from './districts.service';
+import { DistrictTower } from './models/district-tower.model';
+import { District } from './models/district.model';
+
+/** Districts and which towers speak for them. */
+@Module({
+  imports: [SequelizeModule.forFeature([District, DistrictTower])],
+  controllers: [DistrictsController],
+  providers: [DistrictsService],
+  exports: [DistrictsService],
+})
+export class DistrictsModule {}

@@ -1,0 +1,82 @@
+import { Injectable } from '@nestjs/common';
+import { Sql } from '../database/sql';
+import type { KeptMean } from './block-facts';
+import { PROFILE_COLUMNS, REAL_COLUMNS, type profileRow } from './profile-row';
+
+/** A tower's block. */
+export interface TowerBlock {
+  readonly towerId: number;
+  readonly tEnd: number;
+}
+
+const value = (column: string, i: number): string =>
+  REAL_COLUMNS.has(column) ? `CAST(value->>${i} AS REAL)` : `value->>${i}`;
+const columns = PROFILE_COLUMNS.join(', ');
+const given = PROFILE_COLUMNS.map((column, i) => `${value(column, i)} AS ${column}`).join(', ');
+const content = PROFILE_COLUMNS.slice(2);
+const differs = (a: string, b: string): string =>
+  `(${content.map((c) => `${a}.${c}`).join(', ')}) IS NOT (${content.map((c) => `${b}.${c}`).join(', ')})`;
+const body = content.map((column) => `'${column}', p.${column}`).join(', ');
+
+const MEANS = `SELECT j.key, json_group_array(json_array(b.sensor_id, format('%!.17g', b.mean), b.n, b.quality)) means
+  FROM json_each($1) j CROSS JOIN json_each(j.value->'$[0]') s CROSS JOIN block_mean b
+  ON b.sensor_id = s.value AND b.t_end = j.value->>1 GROUP BY j.key`;
+const HOUR_OF_PM25 = `SELECT j.key, count(b.mean) n, avg(b.mean) mean FROM json_each($1) j CROSS JOIN block_mean b
+  ON b.sensor_id = j.value->>0 AND b.t_end > (j.value->>1) - 3600 AND b.t_end <= j.value->>1 GROUP BY j.key`;
+const KEEP_PAST = `INSERT INTO profile_past (tower_id, t_end, rev, until_at, body)
+  SELECT p.tower_id, p.t_end, p.rev, $2, json_object(${body})
+  FROM (SELECT ${given} FROM json_each($1)) n CROSS JOIN profile p ON p.tower_id = n.tower_id AND p.t_end = n.t_end
+  WHERE ${differs('p', 'n')}`;
+const WRITE = `WITH j AS (SELECT value FROM json_each($1)) INSERT INTO profile AS p (${columns}, rev)
+  SELECT ${given}, 1 FROM j WHERE true
+  ON CONFLICT DO UPDATE SET ${content.map((c) => `${c} = excluded.${c}`).join(', ')}, rev = p.rev + 1
+  WHERE ${differs('p', 'excluded')} RETURNING tower_id towerId, t_end tEnd`;
+const DISTRICTS = `SELECT district_id districtId, tower_id towerId FROM district_tower
+  UNION SELECT id, floor_tower_id FROM district WHERE floor_tower_id IS NOT NULL
+  UNION SELECT id, bench_tower_id FROM district WHERE bench_tower_id IS NOT NULL
+  UNION SELECT id, pm25_tower_id FROM district WHERE pm25_tower_id IS NOT NULL`;
+
+/** The statements by which profiles are made and kept. */
+@Injectable()
+export class ProfileStore {
+  constructor(private readonly sql: Sql) {}
+
+  /** The means of some blocks, for the sensors given with each, in the order asked. */
+  async means(blocks: readonly (TowerBlock & { sensorIds: readonly number[] })[]): Promise<KeptMean[][]> {
+    const asked = JSON.stringify(blocks.map(({ sensorIds, tEnd }) => [sensorIds, tEnd]));
+    const rows = await this.sql.all<{ key: number; means: string }>(MEANS, [asked]);
+    const found = new Map(rows.map((row) => [row.key, row.means]));
+    return blocks.map((_, key) => meansOf(found.get(key)));
+  }
+
+  /** The mean of the hour that ends with each block, and how many blocks it holds, in the order asked. */
+  async hours(blocks: readonly { sensorId: number; tEnd: number }[]): Promise<{ n: number; mean: number | null }[]> {
+    if (blocks.length === 0) return [];
+    const asked = JSON.stringify(blocks.map(({ sensorId, tEnd }) => [sensorId, tEnd]));
+    const rows = await this.sql.all<{ key: number; n: number; mean: number | null }>(HOUR_OF_PM25, [asked]);
+    const found = new Map(rows.map((row) => [row.key, row]));
+    return blocks.map((_, key) => found.get(key) ?? { n: 0, mean: null });
+  }
+
+  /** Writes profiles within the caller's transaction, keeping what they replace; gives those that are new or differ. */
+  async write(rows: readonly ReturnType<typeof profileRow>[], now: number): Promise<TowerBlock[]> {
+    if (rows.length === 0) return [];
+    const values = JSON.stringify(rows);
+    await this.sql.run(KEEP_PAST, [values, now]);
+    return this.sql.returning<TowerBlock>(WRITE, [values]);
+  }
+
+  /** Which districts each tower speaks for, in any part. */
+  districtsOfTowers(): Promise<{ districtId: number; towerId: number }[]> {
+    return this.sql.all(DISTRICTS);
+  }
+}
+
+const meansOf = (text: string | undefined): KeptMean[] => {
+  if (text === undefined) return [];
+  const rows = JSON.parse(text) as [number, string | null, number, number][];
+  return rows.map(([sensorId, mean, n, quality]) => ({
+    ...{ sensorId, n, quality },
+    mean: quality === 3 || mean === null ? null : Number(mean),
+  }));
+};

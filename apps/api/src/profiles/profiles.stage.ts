@@ -1,0 +1,115 @@
+import { Injectable, type OnModuleInit } from '@nestjs/common';
+import { Clock } from '../common/clock';
+import { groupBy } from '../common/group-by';
+import { DirtyStages, type DirtyRow } from '../database/dirty';
+import { UnitOfWork } from '../database/unit-of-work';
+import { expectedReadings, type TowerLayout } from '../towers/tower-layout';
+import { TowerLayouts } from '../towers/tower-layouts';
+import { blockFacts, type KeptMean } from './block-facts';
+import { findingsOf } from './findings';
+import { Hours } from './hours';
+import { profileRow } from './profile-row';
+import { ProfileStore, type TowerBlock } from './profile-store';
+
+/** Blocks worked out at a time. */
+const BATCH = 1_000;
+const HOUR_S = 3600;
+const LEAST_GRACE_S = 120;
+
+interface Waiting {
+  readonly row: DirtyRow;
+  readonly tower: TowerLayout;
+  readonly means: readonly KeptMean[];
+}
+
+/** How long after a block's end late readings are waited for, s, before the block counts as closed. */
+export const graceS = (intervalS: number): number => Math.max(LEAST_GRACE_S, intervalS / 2);
+
+/** Stage 2: makes a profile of every closed block whose means changed, and rolls its hour up. */
+@Injectable()
+export class ProfilesStage implements OnModuleInit {
+  constructor(
+    private readonly dirty: DirtyStages,
+    private readonly store: ProfileStore,
+    private readonly hours: Hours,
+    private readonly layouts: TowerLayouts,
+    private readonly work: UnitOfWork,
+    private readonly clock: Clock,
+  ) {}
+
+  onModuleInit(): void {
+    this.dirty.registerStage(2, () => this.batch());
+  }
+
+  private async batch(): Promise<number> {
+    const rows = await this.dirty.newest(2, BATCH, this.clock.now());
+    const closed = rows.length === 0 ? [] : await this.closedOf(rows);
+    if (closed.length === 0) return 0;
+    const hours = await this.pm25Hours(closed);
+    const made = closed.flatMap(({ row, tower, means }, i) => {
+      const facts = blockFacts(tower, row.t, means, hours[i]);
+      return facts ? [profileRow(facts, findingsOf(facts, tower))] : [];
+    });
+    const districts = groupBy(await this.store.districtsOfTowers(), ({ towerId }) => towerId);
+    await this.work.run(async () => {
+      const changed = await this.store.write(made, this.clock.now());
+      const blockS = new Map(closed.map(({ tower }) => [tower.id, tower.blockS]));
+      await this.hours.rollUp(changed.map((block) => ({ ...block, blockS: blockS.get(block.towerId)! })));
+      await this.dirty.mark(3, districtBlocks(changed, districts));
+      await this.dirty.settle(
+        2,
+        closed.map(({ row }) => row),
+      );
+    }, 'bulk');
+    return closed.length;
+  }
+
+  /** Those that are closed: all expected readings are in, or the grace after the block's end is over. */
+  private async closedOf(rows: readonly DirtyRow[]): Promise<Waiting[]> {
+    const towers = new Map<number, TowerLayout>();
+    for (const id of new Set(rows.map((row) => row.subject))) towers.set(id, await this.layouts.of(id));
+    const blocks = rows.map(({ subject, t }) => ({
+      ...{ towerId: subject, tEnd: t },
+      sensorIds: towers.get(subject)!.sensors.map(({ id }) => id),
+    }));
+    const means = await this.store.means(blocks);
+    const now = this.clock.now();
+    return rows.flatMap((row, i): Waiting[] => {
+      const tower = towers.get(row.subject)!;
+      const isClosed = row.t + graceS(tower.intervalS) <= now || isComplete(tower, means[i]!);
+      return isClosed ? [{ row, tower, means: means[i]! }] : [];
+    });
+  }
+
+  /** The PM2.5 mean of the hour that ends with each block, where its tower measures it and 75 % is there. */
+  private async pm25Hours(closed: readonly Waiting[]): Promise<(number | undefined)[]> {
+    const asked = closed.flatMap(({ row, tower }, at) => {
+      const sensor = tower.sensors.find(({ quantity, retiredAt }) => quantity === 'pm2.5' && retiredAt === null);
+      return sensor ? [{ at, sensorId: sensor.id, tEnd: row.t, expected: HOUR_S / tower.blockS }] : [];
+    });
+    const found = await this.store.hours(asked);
+    const hours: (number | undefined)[] = [];
+    found.forEach(({ n, mean }, i) => {
+      const { at, expected } = asked[i]!;
+      if (mean !== null && n >= 0.75 * expected) hours[at] = mean;
+    });
+    return hours;
+  }
+}
+
+const isComplete = (tower: TowerLayout, means: readonly KeptMean[]): boolean =>
+  tower.sensors.every(({ id, retiredAt }) => {
+    const kept = means.find((each) => each.sensorId === id);
+    return retiredAt !== null || (kept !== undefined && kept.n >= expectedReadings(tower));
+  });
+
+const districtBlocks = (
+  changed: readonly TowerBlock[],
+  districts: ReadonlyMap<number, readonly { districtId: number }[]>,
+): [number, number][] => {
+  const blocks = new Map<string, [number, number]>();
+  for (const { towerId, tEnd } of changed) {
+    for (const { districtId } of districts.get(towerId) ?? []) blocks.set(`${districtId} ${tEnd}`, [districtId, tEnd]);
+  }
+  return [...blocks.values()];
+};

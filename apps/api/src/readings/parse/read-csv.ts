@@ -1,0 +1,115 @@
+import { longHeader, wideHeader, type LongHeader, type WideHeader } from './header';
+import type { Mapping } from './mapping';
+import { readNumber } from './number-cell';
+import { HeaderError, type ParsedReadings } from './parsed-readings';
+import { readRecords, type CsvRecord } from './records';
+import { quoted } from '../../common/quoted';
+import { refusedRow, type Refusal } from '../refusal';
+import { intervalEnd, type TimeKeeping } from '../../towers/time-keeping/interval-end';
+
+/** What a text of readings is read against: its layout, the tower's sensors by name, its clock, and now. */
+export interface ReadingContext {
+  readonly mapping: Mapping;
+  readonly sensorIds: ReadonlyMap<string, number>;
+  readonly time: TimeKeeping;
+  readonly nowS: number;
+}
+
+/** Where a text continues a file: the header read earlier, and the number of its first row. */
+export interface Continued {
+  readonly header?: readonly string[];
+  readonly firstRowNo?: number;
+}
+
+const cellsDoNotMatch = (found: number, expected: number): Refusal => ({
+  code: 'cells-do-not-match-header',
+  why: `it has ${found} cells where the header has ${expected}; send the whole line again.`,
+});
+
+class Reader {
+  readonly result: ParsedReadings = { rows: [], refused: [], ignoredColumns: [] };
+  private wide?: WideHeader;
+  private long?: LongHeader;
+  private readonly noReading: ReadonlySet<string>;
+
+  constructor(private readonly given: ReadingContext) {
+    this.noReading = new Set(['', ...given.mapping.missing.map((mark) => mark.trim())]);
+  }
+
+  get hasHeader(): boolean {
+    return this.wide !== undefined || this.long !== undefined;
+  }
+
+  readHeader(cells: readonly string[]): void {
+    if (this.given.mapping.format === 'wide') {
+      this.wide = wideHeader(cells, this.given.mapping, this.given.sensorIds);
+    } else this.long = longHeader(cells, this.given.mapping);
+    this.result.ignoredColumns.push(...(this.wide ?? this.long)!.ignored);
+  }
+
+  read(record: CsvRecord): void {
+    const header = (this.wide ?? this.long)!;
+    if (record.cells.length !== header.cells) {
+      this.refuse(record, undefined, cellsDoNotMatch(record.cells.length, header.cells));
+      return;
+    }
+    const tEnd = intervalEnd(record.cells[header.time]!, this.given.time, this.given.nowS);
+    if (typeof tEnd !== 'number') this.refuse(record, this.given.mapping.timeColumn, tEnd);
+    else if (this.wide) this.readWide(record, this.wide, tEnd);
+    else this.readLong(record, this.long!, tEnd);
+  }
+
+  private readWide(record: CsvRecord, header: WideHeader, tEnd: number): void {
+    for (const { index, column, sensorId } of header.sensors) {
+      this.take(record, column, sensorId, tEnd, record.cells[index]!);
+    }
+  }
+
+  private readLong(record: CsvRecord, header: LongHeader, tEnd: number): void {
+    const { mapping, sensorIds } = this.given;
+    const named = record.cells[header.sensor]!.trim();
+    const sensorId = sensorIds.get(mapping.columns[named] ?? named);
+    if (sensorId !== undefined) {
+      this.take(record, mapping.valueColumn, sensorId, tEnd, record.cells[header.value]!);
+      return;
+    }
+    const why = `this tower has no sensor ${quoted(named)}; correct the name, map it, or add the sensor first.`;
+    this.refuse(record, mapping.sensorColumn, { code: 'sensor-not-known', why });
+  }
+
+  private take(record: CsvRecord, column: string, sensorId: number, tEnd: number, cell: string): void {
+    if (this.noReading.has(cell.trim())) return;
+    const value = readNumber(cell, this.given.mapping.decimal);
+    if (typeof value !== 'number') this.refuse(record, column, value);
+    else this.result.rows.push({ sensorId, tEnd, value, rowNo: record.rowNo });
+  }
+
+  private refuse(record: CsvRecord, column: string | undefined, refusal: Refusal): void {
+    this.result.refused.push(refusedRow(record.rowNo, column, refusal, record.raw));
+  }
+}
+
+const pause = (): Promise<void> => new Promise((resolve) => setImmediate(resolve));
+
+/**
+ * Reads a CSV text of readings, wide or long. Bad cells and bad rows are refused one by one, the rest is taken; a
+ * header that cannot be used throws a `HeaderError`. Gives way to other work between batches of lines.
+ */
+export async function readCsv(
+  text: string,
+  given: ReadingContext,
+  continued: Continued = {},
+): Promise<ParsedReadings> {
+  const reader = new Reader(given);
+  if (continued.header) reader.readHeader(continued.header);
+  const batches = readRecords(text, given.mapping.separator, reader.result.refused, continued.firstRowNo);
+  for (const batch of batches) {
+    for (const record of batch) {
+      if (reader.hasHeader) reader.read(record);
+      else reader.readHeader(record.cells);
+    }
+    await pause();
+  }
+  if (!reader.hasHeader) throw new HeaderError('The file has no header line; send the column names first.');
+  return reader.result;
+}

@@ -1,0 +1,70 @@
+import { HeaderError, type ParsedReadings } from './parsed-readings';
+import type { ReadingContext } from './read-csv';
+import { readNumber } from './number-cell';
+import { quoted } from '../../common/quoted';
+import { refusedRow, type Refusal } from '../refusal';
+import { intervalEnd } from '../../towers/time-keeping/interval-end';
+
+/** One entry of `{"readings": […]}` as it came. */
+interface Entry {
+  readonly time?: unknown;
+  readonly sensor?: unknown;
+  readonly value?: unknown;
+}
+
+const notAReading: Refusal = {
+  code: 'not-a-reading',
+  why: 'it is no reading; send {"time": "2026-01-31T05:10:00Z", "sensor": "t2", "value": -9.5}.',
+};
+
+const valueOf = (value: unknown, given: ReadingContext): number | Refusal | undefined => {
+  if (value === null || value === undefined) return undefined;
+  if (typeof value === 'number' && Number.isFinite(value)) return value;
+  if (typeof value !== 'string') {
+    return { code: 'value-not-a-number', why: 'the value is neither a number nor null; send a number.' };
+  }
+  const none = value.trim() === '' || given.mapping.missing.includes(value.trim());
+  return none ? undefined : readNumber(value, given.mapping.decimal);
+};
+
+const readEntry = (entry: Entry, at: number, given: ReadingContext, into: ParsedReadings): void => {
+  const refuse = (column: string | undefined, refusal: Refusal): void => {
+    into.refused.push(refusedRow(at, column, refusal, JSON.stringify(entry) ?? ''));
+  };
+  const { sensor } = entry;
+  const time = typeof entry.time === 'number' ? String(entry.time) : entry.time;
+  if (typeof sensor !== 'string' || typeof time !== 'string') return refuse(undefined, notAReading);
+  const sensorId = given.sensorIds.get(given.mapping.columns[sensor] ?? sensor);
+  if (sensorId === undefined) {
+    const why = `this tower has no sensor ${quoted(sensor)}; correct the name, or add the sensor first.`;
+    return refuse('sensor', { code: 'sensor-not-known', why });
+  }
+  const tEnd = intervalEnd(time, given.time, given.nowS);
+  if (typeof tEnd !== 'number') return refuse('time', tEnd);
+  const value = valueOf(entry.value, given);
+  if (value === undefined) return;
+  if (typeof value !== 'number') return refuse('value', value);
+  into.rows.push({ sensorId, tEnd, value, rowNo: at });
+};
+
+/**
+ * Reads `{"readings": [{time, sensor, value}, …]}`. Entries are refused one by one, the rest is taken; text that is no
+ * such object throws a `HeaderError`.
+ */
+export function readJson(text: string, given: ReadingContext): ParsedReadings {
+  let body: unknown;
+  try {
+    body = JSON.parse(text);
+  } catch (error) {
+    if (!(error instanceof SyntaxError)) throw error;
+    throw new HeaderError(`The text is no JSON (${error.message.slice(0, 120)}); send {"readings": […]}.`);
+  }
+  const list = (body as { readings?: unknown } | null)?.readings;
+  if (!Array.isArray(list)) throw new HeaderError('The JSON has no list "readings"; send {"readings": […]}.');
+  const result: ParsedReadings = { rows: [], refused: [], ignoredColumns: [] };
+  list.forEach((entry, i) => {
+    if (entry !== null && typeof entry === 'object') readEntry(entry as Entry, i + 1, given, result);
+    else result.refused.push(refusedRow(i + 1, undefined, notAReading, JSON.stringify(entry)));
+  });
+  return result;
+}

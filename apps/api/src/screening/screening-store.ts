@@ -1,0 +1,40 @@
+import { Injectable } from '@nestjs/common';
+import { Sql } from '../database/sql';
+import type { BlockMean } from './block-means';
+import type { Flag } from './series';
+
+/** A reading whose flags have changed. */
+export interface ChangedFlag extends Flag {
+  readonly sensorId: number;
+  readonly tEnd: number;
+}
+
+const WRITE_FLAGS = `UPDATE reading SET quality = j.q, checks = j.c
+  FROM (SELECT value->>0 s, value->>1 t, value->>2 q, value->>3 c FROM json_each($1)) j
+  WHERE sensor_id = j.s AND t_end = j.t`;
+const WRITE_MEANS = `WITH j AS (SELECT value FROM json_each($1))
+  INSERT INTO block_mean (sensor_id, t_end, mean, n, quality)
+  SELECT value->>0, value->>1, CAST(value->>2 AS REAL), value->>3, value->>4 FROM j WHERE true
+  ON CONFLICT DO UPDATE SET mean = excluded.mean, n = excluded.n, quality = excluded.quality
+  WHERE (mean, n, quality) IS NOT (excluded.mean, excluded.n, excluded.quality)
+  RETURNING sensor_id sensorId, t_end tEnd`;
+
+/** Writes what screening found, within the caller's transaction; only what differs from what is kept. */
+@Injectable()
+export class ScreeningStore {
+  constructor(private readonly sql: Sql) {}
+
+  /** Writes changed flags. */
+  async writeFlags(flags: readonly ChangedFlag[]): Promise<void> {
+    if (flags.length === 0) return;
+    const values = flags.map(({ sensorId, tEnd, quality, checks }) => [sensorId, tEnd, quality, checks]);
+    await this.sql.run(WRITE_FLAGS, [JSON.stringify(values)]);
+  }
+
+  /** Writes block means and gives those that were new or differed. */
+  async writeMeans(means: readonly BlockMean[]): Promise<{ sensorId: number; tEnd: number }[]> {
+    if (means.length === 0) return [];
+    const values = means.map(({ sensorId, tEnd, mean, n, quality }) => [sensorId, tEnd, mean, n, quality]);
+    return this.sql.returning(WRITE_MEANS, [JSON.stringify(values)]);
+  }
+}

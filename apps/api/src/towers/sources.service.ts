@@ -1,0 +1,50 @@
+import { Injectable } from '@nestjs/common';
+import { InjectModel } from '@nestjs/sequelize';
+import { ActivityService } from '../activity/activity.service';
+import type { SignedIn } from '../auth/signed-in';
+import { Problem } from '../common/problem';
+import { UnitOfWork } from '../database/unit-of-work';
+import { showSource, type SourceDto, type SourceInput } from './dto/source.dto';
+import { Source } from './models/source.model';
+import { TowerLayouts } from './tower-layouts';
+
+const USUAL_INTERVAL_S = 60;
+
+/** Where a tower's readings come from, and how each source's data is laid out. */
+@Injectable()
+export class SourcesService {
+  constructor(
+    @InjectModel(Source) private readonly sources: typeof Source,
+    private readonly layouts: TowerLayouts,
+    private readonly work: UnitOfWork,
+    private readonly activity: ActivityService,
+  ) {}
+
+  /** A tower's sources that are in use. */
+  async list(towerId: number): Promise<SourceDto[]> {
+    const found = await this.sources.findAll({ where: { towerId, retiredAt: null }, order: [['id', 'ASC']] });
+    return found.map(showSource);
+  }
+
+  /** Adds a source; a tower has one layout for what is pushed, so a new one takes the former's place. */
+  add(towerId: number, input: SourceInput, by: SignedIn): Promise<SourceDto> {
+    return this.work.run(async () => {
+      await this.layouts.of(towerId);
+      if (input.kind === 'push') await this.sources.destroy({ where: { towerId, kind: 'push' } });
+      const { kind, path = null, mapping = {}, intervalSeconds = USUAL_INTERVAL_S } = input;
+      const values = { towerId, kind, path: kind === 'folder' ? path : null, intervalS: intervalSeconds };
+      const { id } = await this.sources.create({ ...values, mapping: JSON.stringify(mapping) });
+      const body = { id, ...input };
+      await this.activity.record({ actor: by, act: 'source added', subject: `tower ${towerId}`, body });
+      const made = await this.sources.findByPk(id);
+      if (!made) throw new Problem('unexpected', `Source ${id} was not kept.`);
+      return showSource(made);
+    });
+  }
+
+  /** The layout of what a tower's site pushes, as JSON; undefined where the usual one holds. */
+  async pushMapping(towerId: number): Promise<string | undefined> {
+    const source = await this.sources.findOne({ where: { towerId, kind: 'push', retiredAt: null } });
+    return source?.mapping;
+  }
+}

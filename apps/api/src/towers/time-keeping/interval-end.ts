@@ -1,0 +1,46 @@
+import { readStamp, type StampForm } from './stamp';
+import { instantOf, type LoggerClock } from './logger-clock';
+import type { TimeRefusal } from './time-refusal';
+
+/** What a stamp marks: the instant of the reading, or the start, middle or end of the logger's interval. */
+export const stampMeanings = ['instant', 'start', 'middle', 'end'] as const;
+/** One of the meanings of a stamp. */
+export type StampMeaning = (typeof stampMeanings)[number];
+
+/** How a source tells the time. */
+export interface TimeKeeping {
+  readonly clock: LoggerClock;
+  readonly stamp: StampMeaning;
+  readonly form: StampForm;
+  /** The logger's interval, s. */
+  readonly intervalS: number;
+}
+
+/** No reading of this trade is older: earlier dates are a logger that lost its clock. */
+export const EARLIEST_S = Date.UTC(1990, 0, 1) / 1000;
+/** Readings may run ahead of the service's clock by this much, s, before the logger's clock is held to be wrong. */
+export const AHEAD_S = 86_400;
+
+/** The end of the interval that an instant marks, UTC epoch seconds. */
+export function endOfInterval(instantS: number, stamp: StampMeaning, intervalS: number): number {
+  if (stamp === 'start') return instantS + intervalS;
+  return stamp === 'middle' ? instantS + Math.round(intervalS / 2) : instantS;
+}
+
+/**
+ * From a stamp's text to the END of its interval, UTC epoch seconds; or why not. Only instants from 1990 to one day
+ * after `nowS` are plausible.
+ */
+export function intervalEnd(text: string, time: TimeKeeping, nowS: number): number | TimeRefusal {
+  const stamp = readStamp(text, time.form);
+  if ('code' in stamp) return stamp;
+  const instant = instantOf(stamp, time.clock);
+  if (typeof instant !== 'number') return instant;
+  if (instant >= EARLIEST_S && instant <= nowS + AHEAD_S)
+    return endOfInterval(instant, time.stamp, time.intervalS);
+  const side = instant < EARLIEST_S ? 'lies before 1990' : 'lies more than a day in the future';
+  return {
+    code: 'time-not-plausible',
+    why: `the time "${text.trim()}" ${side}; set the logger's clock and send the rows again with the right time.`,
+  };
+}

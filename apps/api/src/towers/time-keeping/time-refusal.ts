@@ -1,0 +1,6 @@
+/** Why a time stamp cannot be used. */
+export interface TimeRefusal {
+  readonly code: 'time-not-readable' | 'time-not-plausible' | 'time-happens-twice' | 'time-does-not-exist';
+  /** What is wrong, then the cure. */
+  readonly why: string;
+}

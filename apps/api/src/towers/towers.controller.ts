@@ -1,0 +1,94 @@
+import { Body, Controller, Get, Param, ParseIntPipe, Patch, Post } from '@nestjs/common';
+import { ApiTags } from '@nestjs/swagger';
+import { CurrentUser, Roles } from '../auth/decorators';
+import type { SignedIn } from '../auth/signed-in';
+import { SensorInput, SensorPatch } from './dto/sensor-input.dto';
+import { SourceDto, SourceInput } from './dto/source.dto';
+import { SensorDto, TowerDto } from './dto/tower.dto';
+import { TowerInput, TowerPatch } from './dto/tower-input.dto';
+import { SensorsService } from './sensors.service';
+import { SourcesService } from './sources.service';
+import { TowersService } from './towers.service';
+
+/** Towers, their sensors and their sources, for staff. */
+@ApiTags('towers')
+@Controller()
+export class TowersController {
+  constructor(
+    private readonly towers: TowersService,
+    private readonly sensors: SensorsService,
+    private readonly sources: SourcesService,
+  ) {}
+
+  /** Lists every tower with its sensors. */
+  @Get('towers')
+  @Roles('administrator', 'analyst', 'officer')
+  list(): Promise<TowerDto[]> {
+    return this.towers.list();
+  }
+
+  /** Shows one tower. */
+  @Get('towers/:id')
+  @Roles('administrator', 'analyst', 'officer')
+  get(@Param('id', ParseIntPipe) id: number): Promise<TowerDto> {
+    return this.towers.get(id);
+  }
+
+  /** Makes a tower. */
+  @Post('towers')
+  @Roles('administrator', 'analyst')
+  create(@Body() input: TowerInput, @CurrentUser() by: SignedIn): Promise<TowerDto> {
+    return this.towers.create(input, by);
+  }
+
+  /** Changes a tower. */
+  @Patch('towers/:id')
+  @Roles('administrator', 'analyst')
+  change(
+    @Param('id', ParseIntPipe) id: number,
+    @Body() patch: TowerPatch,
+    @CurrentUser() by: SignedIn,
+  ): Promise<TowerDto> {
+    return this.towers.change(id, patch, by);
+  }
+
+  /** Adds a sensor to a tower. */
+  @Post('towers/:id/sensors')
+  @Roles('administrator', 'analyst')
+  addSensor(
+    @Param('id', ParseIntPipe) id: number,
+    @Body() input: SensorInput,
+    @CurrentUser() by: SignedIn,
+  ): Promise<SensorDto> {
+    return this.sensors.add(id, input, by);
+  }
+
+  /** Changes a sensor from an instant on. */
+  @Patch('sensors/:id')
+  @Roles('administrator', 'analyst')
+  changeSensor(
+    @Param('id', ParseIntPipe) id: number,
+    @Body() patch: SensorPatch,
+    @CurrentUser() by: SignedIn,
+  ): Promise<SensorDto> {
+    return this.sensors.change(id, patch, by);
+  }
+
+  /** Lists a tower's sources with what their last collection gave. */
+  @Get('towers/:id/sources')
+  @Roles('administrator', 'analyst')
+  listSources(@Param('id', ParseIntPipe) id: number): Promise<SourceDto[]> {
+    return this.sources.list(id);
+  }
+
+  /** Adds a source. */
+  @Post('towers/:id/sources')
+  @Roles('administrator', 'analyst')
+  addSource(
+    @Param('id', ParseIntPipe) id: number,
+    @Body() input: SourceInput,
+    @CurrentUser() by: SignedIn,
+  ): Promise<SourceDto> {
+    return this.sources.add(id, input, by);
+  }
+}

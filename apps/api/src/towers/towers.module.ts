@@ -1,0 +1,23 @@
+import { Module } from '@nestjs/common';
+import { SequelizeModule } from '@nestjs/sequelize';
+import { KeysController } from './keys.controller';
+import { KeysService } from './keys.service';
+import { IngestKey } from './models/ingest-key.model';
+import { SensorVersion } from './models/sensor-version.model';
+import { Sensor } from './models/sensor.model';
+import { Source } from './models/source.model';
+import { Tower } from './models/tower.model';
+import { SensorsService } from './sensors.service';
+import { SourcesService } from './sources.service';
+import { TowerLayouts } from './tower-layouts';
+import { TowersController } from './towers.controller';
+import { TowersService } from './towers.service';
+
+/** Towers, their sensors, sources and keys. */
+@Module({
+  imports: [SequelizeModule.forFeature([Tower, Sensor, SensorVersion, IngestKey, Source])],
+  controllers: [TowersController, KeysController],
+  providers: [TowersService, SensorsService, KeysService, SourcesService, TowerLayouts],
+  exports: [TowersService, SensorsService, KeysService, SourcesService, TowerLayouts],
+})
+export class TowersModule {}
