@@ -13,3 +13,7 @@ export * from './evaluation/block-series';
 export type * from './evaluation/evaluated-node';
 export { evaluate } from './evaluation/evaluate';
 export * from './evaluation/evidence';
+export { describeClause, describeCondition, describeGroup } from './explanation/describe';
+export { explain, sentencesOf } from './explanation/explain';
+export type { Explanation } from './explanation/explain';
+export { measuredInWords, minutesInWords, valueInWords } from './explanation/numbers';
