@@ -1,0 +1,43 @@
+import { colorVar } from '../../theme/palette';
+import type { ColumnLid } from './column-data';
+import type { ColumnSize, Geometry } from './geometry';
+
+const LINE: Record<ColumnSize, number> = { small: 2, medium: 2.4, full: 3 };
+
+/** The cold air under the lid, tinted, and the lid: a line where the tower reaches it, dashed with a chevron where not. */
+export function LidDrawing({
+  lid,
+  size,
+  geometry,
+}: {
+  lid: ColumnLid;
+  size: ColumnSize;
+  geometry: Geometry;
+}) {
+  const { left, right, top, bottom, y } = geometry;
+  const open = lid.open !== 'no';
+  const lidY = lid.open === 'at the top' ? top + 1 : y(lid.topM);
+  const reach = size === 'small' ? 3 : 5;
+  const chevronX = right - reach - 4;
+  return (
+    <>
+      <rect x={left} y={lidY} width={right - left} height={bottom - lidY} fill={colorVar('lidSoft')} />
+      <path
+        d={`M${left} ${lidY}H${right}`}
+        stroke={colorVar('lid')}
+        strokeWidth={LINE[size]}
+        strokeDasharray={open ? '5 3' : undefined}
+      />
+      {open && (
+        <path
+          d={`M${chevronX - reach} ${lidY + reach + 4}l${reach} ${-reach}l${reach} ${reach}`}
+          fill="none"
+          stroke={colorVar('lid')}
+          strokeWidth={size === 'small' ? 1.4 : 1.8}
+          strokeLinecap="round"
+          strokeLinejoin="round"
+        />
+      )}
+    </>
+  );
+}
