@@ -7,3 +7,5 @@ export * from './profile';
 export * from './inversions';
 export * from './humidity';
 export * from './mixing';
+export * from './blocks';
+export * from './screening';

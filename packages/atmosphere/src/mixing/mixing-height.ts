@@ -15,27 +15,25 @@ const missingBetween = (profile: Profile, lowerM: number, upperM: number): boole
 /** The lowest crossing for one surface temperature; missing levels widen it to where it may lie. */
 const crossing = (profile: Profile, levels: readonly MeasuredLevel[], surfaceC: number): [number, number] => {
   const surfaceM = profile.levels[0]!.heightM;
+  const first = levels[0]!;
+  const leavesGround = first.heightM === surfaceM && excessC(surfaceC, surfaceM, first) > ROUNDING_C;
+  const atGround = leavesGround ? surfaceM : 0;
+  const aboveGround = (heightM: number) => (heightM === surfaceM ? atGround : heightM);
   let earliestM = Infinity;
-  let belowM = surfaceM;
-  let belowExcess = 0;
+  let below = { heightM: surfaceM, excess: 0 };
   for (const level of levels) {
     const excess = excessC(surfaceC, surfaceM, level);
-    const across = missingBetween(profile, belowM, level.heightM);
-    if (across) earliestM = Math.min(earliestM, belowM);
+    const across = missingBetween(profile, below.heightM, level.heightM);
+    if (across) earliestM = Math.min(earliestM, below.heightM);
     if (excess < -ROUNDING_C) {
-      if (across) return [earliestM === surfaceM ? 0 : earliestM, level.heightM];
-      const share =
-        level.heightM === surfaceM ? 0 : Math.max(belowExcess, 0) / (Math.max(belowExcess, 0) - excess);
-      const heightM = belowM + share * (level.heightM - belowM);
-      const found = heightM === surfaceM ? 0 : heightM;
-      const lowest = Math.min(earliestM, found);
-      return [lowest === surfaceM ? 0 : lowest, found];
+      if (across) return [aboveGround(earliestM), level.heightM];
+      const share = Math.max(below.excess, 0) / (Math.max(below.excess, 0) - excess);
+      const found = aboveGround(below.heightM + share * (level.heightM - below.heightM));
+      return [Math.min(aboveGround(earliestM), found), found];
     }
-    belowM = level.heightM;
-    belowExcess = excess;
+    below = { heightM: level.heightM, excess };
   }
-  const reached = Math.min(earliestM, belowM);
-  return [reached === surfaceM && earliestM !== Infinity ? 0 : reached, Infinity];
+  return [Math.min(aboveGround(earliestM), below.heightM), Infinity];
 };
 
 /**

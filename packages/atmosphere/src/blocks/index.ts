@@ -1,0 +1,3 @@
+export * from './block-mean';
+export * from './hour-mean';
+export * from './direction-mean';
