@@ -9,3 +9,5 @@ export * from './humidity';
 export * from './mixing';
 export * from './blocks';
 export * from './screening';
+export * from './air-quality';
+export * from './districts';
