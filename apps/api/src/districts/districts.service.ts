@@ -5,7 +5,9 @@ import type { SignedIn } from '../auth/signed-in';
 import { Clock } from '../common/clock';
 import { Problem } from '../common/problem';
 import { slugOf } from '../common/slug';
+import { DirtyStages } from '../database/dirty';
 import { UnitOfWork } from '../database/unit-of-work';
+import { TowersService } from '../towers/towers.service';
 import { showDistrict, type DistrictDto } from './dto/district.dto';
 import type { DistrictInput, DistrictPatch, DistrictTowerInput } from './dto/district-input.dto';
 import { DistrictTower } from './models/district-tower.model';
@@ -17,6 +19,8 @@ export class DistrictsService {
   constructor(
     @InjectModel(District) private readonly districts: typeof District,
     @InjectModel(DistrictTower) private readonly links: typeof DistrictTower,
+    private readonly towers: TowersService,
+    private readonly dirty: DirtyStages,
     private readonly work: UnitOfWork,
     private readonly clock: Clock,
     private readonly activity: ActivityService,
@@ -45,8 +49,10 @@ export class DistrictsService {
     const slug = input.slug ?? slugOf(input.name);
     return this.work.run(async () => {
       await this.refuseTaken(slug);
+      await this.refuseUnknownTowers(input);
       const district = await this.districts.create({ ...fields, slug, createdAt: this.clock.now() });
       await this.setTowers(district.id, towers);
+      await this.markAll(district.id);
       await this.record('district made', district.id, by, input);
       return this.get(district.id);
     });
@@ -58,6 +64,7 @@ export class DistrictsService {
     return this.work.run(async () => {
       const district = await this.find(id);
       if (patch.slug && patch.slug !== district.slug) await this.refuseTaken(patch.slug);
+      await this.refuseUnknownTowers(patch);
       const [changed] = await this.districts.update(
         { ...fields, version: version + 1 },
         { where: { id, version } },
@@ -69,6 +76,7 @@ export class DistrictsService {
         );
       }
       if (towers) await this.setTowers(id, towers);
+      if (changesFindings(patch)) await this.markAll(id);
       await this.record('district changed', id, by, patch);
       return this.get(id);
     });
@@ -78,6 +86,23 @@ export class DistrictsService {
     const district = await this.districts.findByPk(id, { include: [DistrictTower] });
     if (!district) throw new Problem('not-found', `There is no district ${id}.`);
     return district;
+  }
+
+  private async refuseUnknownTowers(given: Partial<DistrictInput>): Promise<void> {
+    await this.towers.refuseUnknown(
+      (given.towers ?? []).map(({ towerId }) => towerId),
+      'towers',
+    );
+    for (const field of ['floorTowerId', 'benchTowerId', 'pm25TowerId'] as const) {
+      await this.towers.refuseUnknown([given[field] ?? []].flat(), field);
+    }
+  }
+
+  /** Its towers changed, so all that was found for it is worked out anew. */
+  private async markAll(id: number): Promise<void> {
+    const { towers, floorTowerId, benchTowerId, pm25TowerId } = await this.get(id);
+    const parts = [floorTowerId, benchTowerId, pm25TowerId].filter((each) => each !== null);
+    await this.dirty.markDistrict(id, [...towers.map(({ towerId }) => towerId), ...parts]);
   }
 
   private async refuseTaken(slug: string): Promise<void> {
@@ -101,3 +126,8 @@ export class DistrictsService {
     return this.activity.record({ actor: by, act, subject: `district ${districtId}`, districtId, body });
   }
 }
+
+const changesFindings = (patch: DistrictPatch): boolean =>
+  [patch.towers, patch.combine, patch.floorTowerId, patch.benchTowerId, patch.pm25TowerId].some(
+    (each) => each !== undefined,
+  );

@@ -58,7 +58,11 @@ const levelOf = ({ version, kept }: Present): StoredLevel => [
   kept?.quality ?? qualityCodes.missing,
 ];
 
-const nearest = (present: readonly Measured[], quantity: SensorQuantity, heightM: number): Measured | undefined =>
+const nearest = (
+  present: readonly Measured[],
+  quantity: SensorQuantity,
+  heightM: number,
+): Measured | undefined =>
   present
     .filter(({ sensor }) => sensor.quantity === quantity)
     .sort((a, b) => Math.abs(a.version.heightM - heightM) - Math.abs(b.version.heightM - heightM))[0];

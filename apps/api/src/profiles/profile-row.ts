@@ -42,7 +42,8 @@ export const REAL_COLUMNS: ReadonlySet<string> = new Set(
 
 type Stored = number | string | null;
 
-const finite = (value: number | null): number | null => (value !== null && Number.isFinite(value) ? value : null);
+const finite = (value: number | null): number | null =>
+  value !== null && Number.isFinite(value) ? value : null;
 const bounds = ({ lo, hi }: Quantity): [Stored, Stored] => [finite(lo), finite(hi)];
 const number = (quantity: Quantity): Stored => (quantity.lo === quantity.hi ? finite(quantity.lo) : null);
 const truth = (value: Truth): Stored => (value === 'not known' ? null : Number(value === 'true'));

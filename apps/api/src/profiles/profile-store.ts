@@ -50,7 +50,9 @@ export class ProfileStore {
   }
 
   /** The mean of the hour that ends with each block, and how many blocks it holds, in the order asked. */
-  async hours(blocks: readonly { sensorId: number; tEnd: number }[]): Promise<{ n: number; mean: number | null }[]> {
+  async hours(
+    blocks: readonly { sensorId: number; tEnd: number }[],
+  ): Promise<{ n: number; mean: number | null }[]> {
     if (blocks.length === 0) return [];
     const asked = JSON.stringify(blocks.map(({ sensorId, tEnd }) => [sensorId, tEnd]));
     const rows = await this.sql.all<{ key: number; n: number; mean: number | null }>(HOUR_OF_PM25, [asked]);

@@ -84,7 +84,9 @@ export class ProfilesStage implements OnModuleInit {
   /** The PM2.5 mean of the hour that ends with each block, where its tower measures it and 75 % is there. */
   private async pm25Hours(closed: readonly Waiting[]): Promise<(number | undefined)[]> {
     const asked = closed.flatMap(({ row, tower }, at) => {
-      const sensor = tower.sensors.find(({ quantity, retiredAt }) => quantity === 'pm2.5' && retiredAt === null);
+      const sensor = tower.sensors.find(
+        ({ quantity, retiredAt }) => quantity === 'pm2.5' && retiredAt === null,
+      );
       return sensor ? [{ at, sensorId: sensor.id, tEnd: row.t, expected: HOUR_S / tower.blockS }] : [];
     });
     const found = await this.store.hours(asked);
@@ -109,7 +111,8 @@ const districtBlocks = (
 ): [number, number][] => {
   const blocks = new Map<string, [number, number]>();
   for (const { towerId, tEnd } of changed) {
-    for (const { districtId } of districts.get(towerId) ?? []) blocks.set(`${districtId} ${tEnd}`, [districtId, tEnd]);
+    for (const { districtId } of districts.get(towerId) ?? [])
+      blocks.set(`${districtId} ${tEnd}`, [districtId, tEnd]);
   }
   return [...blocks.values()];
 };

@@ -27,8 +27,8 @@ const WRITE = `INSERT INTO reading (sensor_id, t_end, value, import_id, row_no)
   ON CONFLICT DO UPDATE SET value = excluded.value, import_id = excluded.import_id, row_no = excluded.row_no`;
 const KEEP_PAST = `INSERT INTO reading_past (sensor_id, t_end, until_at, value, import_id, row_no)
   SELECT value->>0, value->>1, $2, CAST(value->>2 AS REAL), value->>3, value->>4 FROM json_each($1)`;
-const REFUSE = `INSERT INTO refused_row (import_id, row_no, code, text, raw)
-  SELECT $2, value->>0, value->>1, value->>2, value->>3 FROM json_each($1)`;
+const REFUSE = `INSERT INTO refused_row (import_id, row_no, col, code, text, raw)
+  SELECT $2, value->>0, value->>1, value->>2, value->>3, value->>4 FROM json_each($1)`;
 const BEGIN = `WITH made(x) AS (SELECT 1) INSERT INTO import (tower_id, origin, name, received_at)
   SELECT $1, $2, $3, $4 FROM made RETURNING id`;
 const COUNT = `UPDATE import SET new_count = new_count + $2, repeated_count = repeated_count + $3,
@@ -67,7 +67,7 @@ export class ReadingsStore {
   /** Keeps refused rows with their reasons. */
   async refuse(rows: readonly RefusedRow[], importId: number): Promise<void> {
     if (rows.length === 0) return;
-    const values = rows.map(({ rowNo, code, text, raw }) => [rowNo, code, text, raw]);
+    const values = rows.map(({ rowNo, column = null, code, text, raw }) => [rowNo, column, code, text, raw]);
     await this.sql.run(REFUSE, [JSON.stringify(values), importId]);
   }
 

@@ -71,10 +71,16 @@ export class ScreeningStage implements OnModuleInit {
     return parts;
   }
 
-  private async write(rows: readonly DirtyRow[], parts: readonly Part[], found: readonly Found[]): Promise<void> {
+  private async write(
+    rows: readonly DirtyRow[],
+    parts: readonly Part[],
+    found: readonly Found[],
+  ): Promise<void> {
     await this.store.writeFlags(found.flatMap(({ flags }) => flags));
     const changed = await this.store.writeMeans(found.flatMap(({ means }) => means));
-    const towers = new Map(parts.flatMap(({ tower }) => tower.sensors.map((sensor) => [sensor.id, tower] as const)));
+    const towers = new Map(
+      parts.flatMap(({ tower }) => tower.sensors.map((sensor) => [sensor.id, tower] as const)),
+    );
     const blocks = new Map<string, readonly [number, number]>();
     for (const { sensorId, tEnd } of changed) {
       const tower = towers.get(sensorId)!;
@@ -97,7 +103,11 @@ const wantedOf = ({ tower, stretch }: Part): Wanted[] =>
     t1: stretch.t1 + 2 * REACH_S,
   }));
 
-function screenPart({ tower, stretch, blocks }: Part, series: readonly Series[], spans: readonly SetSpan[]): Found {
+function screenPart(
+  { tower, stretch, blocks }: Part,
+  series: readonly Series[],
+  spans: readonly SetSpan[],
+): Found {
   const flags = screenTower(tower, series);
   series.forEach((each, i) => applySetSpans(each, flags[i]!, spans));
   const changed = series.flatMap((each, i) => changedFlags(each, flags[i]!, stretch));

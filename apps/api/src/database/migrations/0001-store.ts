@@ -68,8 +68,8 @@ export const up: readonly string[] = [
      received_at INTEGER NOT NULL, new_count INTEGER NOT NULL DEFAULT 0, repeated_count INTEGER NOT NULL DEFAULT 0,
      corrected_count INTEGER NOT NULL DEFAULT 0, refused_count INTEGER NOT NULL DEFAULT 0, withdrawn_at INTEGER) STRICT`,
   `CREATE TABLE refused_row (
-     id INTEGER PRIMARY KEY, import_id INTEGER NOT NULL REFERENCES import(id), row_no INTEGER NOT NULL, code TEXT NOT NULL, text TEXT NOT NULL,
-     raw TEXT NOT NULL) STRICT`,
+     id INTEGER PRIMARY KEY, import_id INTEGER NOT NULL REFERENCES import(id), row_no INTEGER NOT NULL, col TEXT, code TEXT NOT NULL,
+     text TEXT NOT NULL, raw TEXT NOT NULL) STRICT`,
   `CREATE INDEX refused_row_import ON refused_row(import_id, row_no)`,
   `CREATE TABLE reading (
      sensor_id INTEGER NOT NULL, t_end INTEGER NOT NULL, value REAL NOT NULL, quality INTEGER NOT NULL DEFAULT 0,

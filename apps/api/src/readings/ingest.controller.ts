@@ -1,0 +1,31 @@
+import { Body, Controller, Headers, HttpCode, Post, UseGuards } from '@nestjs/common';
+import { ApiBearerAuth, ApiConsumes, ApiTags } from '@nestjs/swagger';
+import { Public } from '../auth/decorators';
+import { IngestResult } from './dto/ingest-result.dto';
+import { PushService } from './push.service';
+import { SiteKeyGuard, SiteTower } from './site-key.guard';
+
+/** Where sites push their readings. */
+@ApiTags('ingest')
+@ApiBearerAuth()
+@Controller('ingest')
+export class IngestController {
+  constructor(private readonly pushed: PushService) {}
+
+  /**
+   * Takes readings of the key's own tower: JSON `{"readings": [{time, sensor, value}]}`, or CSV laid out as the
+   * tower's push source says. Sending the same again changes nothing.
+   */
+  @Post('readings')
+  @HttpCode(200)
+  @Public()
+  @UseGuards(SiteKeyGuard)
+  @ApiConsumes('application/json', 'text/csv')
+  readings(
+    @SiteTower() towerId: number,
+    @Headers('content-type') contentType: string | undefined,
+    @Body() body: unknown,
+  ): Promise<IngestResult> {
+    return this.pushed.push(towerId, contentType ?? '', body);
+  }
+}

@@ -1,0 +1,19 @@
+import { Module } from '@nestjs/common';
+import { SchedulerModule } from '../scheduler/scheduler.module';
+import { TowersModule } from '../towers/towers.module';
+import { ImportsController } from './imports.controller';
+import { ImportsService } from './imports.service';
+import { IngestController } from './ingest.controller';
+import { PushService } from './push.service';
+import { ReadingContexts } from './reading-contexts';
+import { ReadingsService } from './readings.service';
+import { ReadingsStore } from './readings-store';
+
+/** Every way in for readings. */
+@Module({
+  imports: [TowersModule, SchedulerModule],
+  controllers: [IngestController, ImportsController],
+  providers: [ReadingsStore, ReadingsService, ReadingContexts, PushService, ImportsService],
+  exports: [ReadingsService],
+})
+export class ReadingsModule {}
