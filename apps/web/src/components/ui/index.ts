@@ -9,4 +9,5 @@ export * from './message';
 export * from './range-text';
 export * from './state-shape';
 export * from './status-pill';
+export * from './text-link';
 export * from './time-text';

@@ -1,0 +1,32 @@
+import type { DistrictHistory } from '../../lib/api/types';
+import { counted, decimal } from '../../lib/format/number';
+import { rangeText } from '../../lib/format/range';
+import { dayAndTime, duration } from '../../lib/format/time';
+import { limitLines } from './limit-lines';
+import { gapsOf, strengthPoints } from './strength-series';
+
+/** The history in a few sentences: the strongest, how long above each limit, the notices, what is not known. */
+export function strengthWords(history: DistrictHistory, name: string): string {
+  const points = strengthPoints(history);
+  const known = points.filter((point): point is typeof point & { y: number } => point.y !== null);
+  if (known.length === 0) return `${name}: nothing is known of this time.`;
+  const strongest = known.reduce((best, point) => (point.y > best.y ? point : best));
+  const unknownMinutes = gapsOf(points, history.stepMinutes).reduce(
+    (sum, { from, to }) => sum + (to - from) / 60_000,
+    0,
+  );
+  const above = limitLines(history.limits).map(({ y, label }) => {
+    const minutes = known.filter((point) => point.y >= y).length * history.stepMinutes;
+    return `At or above ${decimal(y)} °C (${label}) for ${duration(minutes)} in all.`;
+  });
+  return [
+    strongest.y > 0
+      ? `Strongest ${rangeText(strongest.from.strength, { unit: '°C', style: 'words' })}, ${dayAndTime(strongest.x, history.timeZone)}.`
+      : 'No surface inversion was found.',
+    ...above,
+    history.notices.length > 0
+      ? `${counted(history.notices.length, 'notice')} in this time.`
+      : 'No notice in this time.',
+    unknownMinutes > 0 ? `Not known for ${duration(unknownMinutes)}.` : 'Known throughout.',
+  ].join(' ');
+}
