@@ -1,4 +1,5 @@
-import { qualityCodes } from '@lidwatch/contracts';
+import { isEnough, isKnown, meanDirectionDeg } from '@lidwatch/atmosphere';
+import { checkBits, qualityCodes } from '@lidwatch/contracts';
 import { expectedReadings, versionAt, type LayoutSensor, type TowerLayout } from '../towers/tower-layout';
 import { firstAfter, type Flags, type Series } from './series';
 
@@ -14,28 +15,26 @@ export interface BlockMean {
   readonly quality: number;
 }
 
-const DEGREES_PER_RADIAN = 180 / Math.PI;
-
 /** Mean that does not overflow, whatever the size of the values. */
 const plainMean = (values: readonly number[]): number =>
   values.reduce((mean, value, i) => mean + value / (i + 1) - mean / (i + 1), 0);
 
-const meanDirection = (degrees: readonly number[]): number => {
-  if (degrees.length === 1) return degrees[0]!;
-  const [x, y] = degrees.reduce(
-    ([sx, sy], d) => [sx! + Math.cos(d / DEGREES_PER_RADIAN), sy! + Math.sin(d / DEGREES_PER_RADIAN)],
-    [0, 0],
-  ) as [number, number];
-  return (Math.atan2(y, x) * DEGREES_PER_RADIAN + 360) % 360;
+const directionOf = (degrees: readonly number[]): number => {
+  const mean = meanDirectionDeg(degrees);
+  return isKnown(mean) ? mean.lo : NaN;
 };
 
-/** Whether `n` of the expected readings make a valid block: 75 %, or 2 of 3 (EPA-454/R-99-005 §6). */
-export const enoughReadings = (n: number, expected: number): boolean =>
-  n > 0 && (n >= 0.75 * expected || (expected === 3 && n === 2));
+/**
+ * The quality by which a reading enters a mean. A tower whose screening only reports leaves out what a person has set
+ * failed and nothing else: what the checks call failed is used as suspect.
+ */
+const usedAs = (quality: number, checks: number, reportOnly: boolean): number =>
+  reportOnly && (checks & checkBits.override) === 0 ? Math.min(quality, qualityCodes.suspect) : quality;
 
 /**
  * The mean of one sensor over the block that ends at `tEnd`: readings in (start, end] that have not failed, each
- * corrected by the version that measured it; directions are averaged as vectors. Undefined where it has no reading.
+ * corrected by the version that measured it; directions are averaged as vectors. Valid with 75 % of the expected
+ * readings, or 2 of 3 (EPA-454/R-99-005 §6). Undefined where the sensor has no reading.
  */
 export function blockMean(
   tower: TowerLayout,
@@ -47,19 +46,21 @@ export function blockMean(
   const from = firstAfter(series.tEnd, tEnd - tower.blockS);
   const to = firstAfter(series.tEnd, tEnd);
   if (from === to) return undefined;
+  const shift = from - firstAfter(flags.tEnd, tEnd - tower.blockS);
   const used: number[] = [];
-  let quality: number = qualityCodes.valid;
+  let worst: number = qualityCodes.valid;
   for (let i = from; i < to; i += 1) {
     const version = versionAt(sensor, series.tEnd[i]!);
-    if (flags.quality[i]! >= qualityCodes.failed || version === undefined) continue;
+    const quality = usedAs(flags.quality[i - shift]!, flags.checks[i - shift]!, tower.reportOnly);
+    if (quality >= qualityCodes.failed || version === undefined) continue;
     used.push(version.gain * series.value[i]! + version.offset);
-    quality = Math.max(quality, flags.quality[i]!);
+    worst = Math.max(worst, quality);
   }
   const { id: sensorId } = sensor;
   const n = used.length;
-  const mean = sensor.quantity === 'wind direction' ? meanDirection(used) : plainMean(used);
-  if (!enoughReadings(n, expectedReadings(tower)) || !Number.isFinite(mean)) {
+  const mean = sensor.quantity === 'wind direction' ? directionOf(used) : plainMean(used);
+  if (!isEnough(n, expectedReadings(tower)) || !Number.isFinite(mean)) {
     return { sensorId, tEnd, mean: null, n, quality: qualityCodes.missing };
   }
-  return { sensorId, tEnd, mean, n, quality };
+  return { sensorId, tEnd, mean, n, quality: worst };
 }

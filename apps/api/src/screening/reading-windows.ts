@@ -23,7 +23,7 @@ const WINDOWS = `SELECT j.key, group_concat(r.t_end) t, group_concat(format('%!.
     group_concat(r.quality) q, group_concat(r.checks) c
   FROM json_each($1) j CROSS JOIN reading r
   ON r.sensor_id = j.value->>0 AND r.t_end > j.value->>1 AND r.t_end <= j.value->>2 GROUP BY j.key`;
-const SET_SPANS = `SELECT sensor_id sensorId, t0, t1, quality FROM override
+const SET_SPANS = `SELECT sensor_id sensorId, t0, t1, quality, at FROM override
   WHERE undone_at IS NULL AND sensor_id IN (SELECT value FROM json_each($1)) ORDER BY id`;
 
 const numbers = (text: string): number[] => JSON.parse(`[${text}]`) as number[];

@@ -1,4 +1,5 @@
 import { Injectable, type OnModuleInit } from '@nestjs/common';
+import type { ScreeningContext } from '@lidwatch/atmosphere';
 import { groupBy } from '../common/group-by';
 import { DirtyStages, type DirtyRow } from '../database/dirty';
 import { UnitOfWork } from '../database/unit-of-work';
@@ -6,10 +7,9 @@ import { blockEndOf, type TowerLayout } from '../towers/tower-layout';
 import { TowerLayouts } from '../towers/tower-layouts';
 import { blockMean, type BlockMean } from './block-means';
 import { ReadingWindows, type Wanted } from './reading-windows';
-import { REACH_S, screenTower } from './screen-tower';
+import { contextOf, screenStretch } from './screen-tower';
 import { ScreeningStore, type ChangedFlag } from './screening-store';
-import type { Flags, Series, SetSpan, Stretch } from './series';
-import { applySetSpans, flagsForMeans } from './set-spans';
+import { firstAfter, type Flags, type Series, type SetSpan, type Stretch } from './series';
 import { stretchesOf } from './stretches';
 
 /** Blocks worked out at a time. */
@@ -21,6 +21,7 @@ interface Part {
   readonly tower: TowerLayout;
   readonly stretch: Stretch;
   readonly blocks: readonly number[];
+  readonly context: ScreeningContext;
 }
 
 interface Found {
@@ -64,8 +65,10 @@ export class ScreeningStage implements OnModuleInit {
     for (const [towerId, own] of groupBy(rows, (row) => row.subject)) {
       const tower = await this.layouts.of(towerId);
       const ends = own.map((row) => row.t);
-      for (const stretch of stretchesOf(ends, tower.blockS, 2 * REACH_S)) {
-        parts.push({ tower, stretch, blocks: ends.filter((t) => t > stretch.t0 && t <= stretch.t1) });
+      const context = contextOf(tower);
+      for (const stretch of stretchesOf(ends, tower.blockS, context.beforeS + context.afterS)) {
+        const blocks = ends.filter((t) => t > stretch.t0 && t <= stretch.t1);
+        parts.push({ tower, stretch, blocks, context });
       }
     }
     return parts;
@@ -95,36 +98,37 @@ export class ScreeningStage implements OnModuleInit {
   }
 }
 
-/** What must be read to screen a stretch: as far as a change reaches, and again as far as that is judged by. */
-const wantedOf = ({ tower, stretch }: Part): Wanted[] =>
-  tower.sensors.map(({ id }) => ({
-    sensorId: id,
-    t0: stretch.t0 - 2 * REACH_S - tower.blockS,
-    t1: stretch.t1 + 2 * REACH_S,
-  }));
+/** The readings whose flags a change within the part can alter, whole blocks of them. */
+const reachOf = ({ tower, stretch, context }: Part): Stretch => ({
+  t0: blockEndOf(stretch.t0 - context.afterS, tower.blockS) - tower.blockS,
+  t1: blockEndOf(stretch.t1 + context.beforeS, tower.blockS),
+});
 
-function screenPart(
-  { tower, stretch, blocks }: Part,
-  series: readonly Series[],
-  spans: readonly SetSpan[],
-): Found {
-  const flags = screenTower(tower, series);
-  series.forEach((each, i) => applySetSpans(each, flags[i]!, spans));
-  const changed = series.flatMap((each, i) => changedFlags(each, flags[i]!, stretch));
+/** What must be read to judge those. */
+const wantedOf = (part: Part): Wanted[] => {
+  const { t0, t1 } = reachOf(part);
+  const { beforeS, afterS } = part.context;
+  return part.tower.sensors.map(({ id }) => ({ sensorId: id, t0: t0 - beforeS, t1: t1 + afterS }));
+};
+
+function screenPart(part: Part, series: readonly Series[], spans: readonly SetSpan[]): Found {
+  const { tower, blocks } = part;
+  const flags = screenStretch(tower, series, reachOf(part), spans);
+  const changed = series.flatMap((each, i) => changedFlags(each, flags[i]!));
   const ends = new Set([...blocks, ...changed.map(({ tEnd }) => blockEndOf(tEnd, tower.blockS))]);
-  const means = tower.sensors.flatMap((sensor, i) => {
-    const usable = flagsForMeans(flags[i]!, tower.reportOnly);
-    return [...ends].flatMap((tEnd) => blockMean(tower, sensor, series[i]!, usable, tEnd) ?? []);
-  });
+  const means = tower.sensors.flatMap((sensor, i) =>
+    [...ends].flatMap((tEnd) => blockMean(tower, sensor, series[i]!, flags[i]!, tEnd) ?? []),
+  );
   return { flags: changed, means };
 }
 
-function changedFlags(series: Series, flags: Flags, { t0, t1 }: Stretch): ChangedFlag[] {
+function changedFlags(series: Series, flags: Flags): ChangedFlag[] {
+  if (flags.tEnd.length === 0) return [];
+  const shift = firstAfter(series.tEnd, flags.tEnd[0]! - 1);
   const changed: ChangedFlag[] = [];
-  series.tEnd.forEach((tEnd, i) => {
-    if (tEnd <= t0 - REACH_S || tEnd > t1 + REACH_S) return;
+  flags.tEnd.forEach((tEnd, i) => {
     const [quality, checks] = [flags.quality[i]!, flags.checks[i]!];
-    if (quality !== series.quality[i] || checks !== series.checks[i]) {
+    if (quality !== series.quality[i + shift] || checks !== series.checks[i + shift]) {
       changed.push({ sensorId: series.sensorId, tEnd, quality, checks });
     }
   });

@@ -17,10 +17,11 @@ export interface Flag {
   readonly checks: number;
 }
 
-/** Screening of a series: flags in parallel to it. */
+/** Screening of a stretch of a series; the arrays run in parallel. */
 export interface Flags {
-  readonly quality: number[];
-  readonly checks: number[];
+  readonly tEnd: readonly number[];
+  readonly quality: readonly number[];
+  readonly checks: readonly number[];
 }
 
 /** A stretch of time (t0, t1], UTC epoch seconds. */
@@ -33,6 +34,8 @@ export interface Stretch {
 export interface SetSpan extends Stretch {
   readonly sensorId: number;
   readonly quality: 'valid' | 'failed';
+  /** When it was set, UTC epoch seconds: the newest of several holds. */
+  readonly at: number;
 }
 
 /** Index of the first entry above `t` in ascending instants. */

@@ -29,6 +29,8 @@ export const checkBits = {
   'vertical consistency': 32,
   neighbours: 64,
   override: 128,
+  stuck: 256,
+  clock: 512,
 } as const;
 
 /** A screening check by name. */
