@@ -1,0 +1,2 @@
+export { LiveLoggers } from './live-loggers';
+export { loggersRouter } from './loggers-router';
