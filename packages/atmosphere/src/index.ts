@@ -11,3 +11,4 @@ export * from './blocks';
 export * from './screening';
 export * from './air-quality';
 export * from './districts';
+export * from './episodes';
