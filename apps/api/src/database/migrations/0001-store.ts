@@ -107,8 +107,8 @@ export const up: readonly string[] = [
      tower_id INTEGER NOT NULL, t_end INTEGER NOT NULL, inversion_min INTEGER NOT NULL, none_min INTEGER NOT NULL, not_known_min INTEGER NOT NULL,
      mean_strength_c REAL, max_strength_c REAL, PRIMARY KEY (tower_id, t_end)) STRICT, WITHOUT ROWID`,
   `CREATE TABLE district_block (
-     district_id INTEGER NOT NULL, t_end INTEGER NOT NULL, rev INTEGER NOT NULL, block_s INTEGER NOT NULL, speaker_id INTEGER, silent TEXT NOT NULL DEFAULT '[]',
-     measures TEXT NOT NULL, strength_lo REAL, strength_hi REAL, within_c REAL, sure INTEGER, reason TEXT,
+     district_id INTEGER NOT NULL, t_end INTEGER NOT NULL, rev INTEGER NOT NULL, block_s INTEGER NOT NULL, speaker_id INTEGER, spoke TEXT, silent TEXT NOT NULL DEFAULT '[]',
+     measures TEXT NOT NULL, end_spoke TEXT, end_measures TEXT, strength_lo REAL, strength_hi REAL, within_c REAL, sure INTEGER, reason TEXT,
      PRIMARY KEY (district_id, t_end)) STRICT, WITHOUT ROWID`,
 
   // --- rules and proposals --------------------------------------------------------------------------------------
@@ -147,7 +147,7 @@ export const up: readonly string[] = [
 
   // --- residents ------------------------------------------------------------------------------------------------
   `CREATE TABLE person (
-     id INTEGER PRIMARY KEY, lang TEXT NOT NULL DEFAULT 'en' CHECK (lang IN ('en','es')), created_at INTEGER NOT NULL, manage_token_hash TEXT NOT NULL UNIQUE, left_at INTEGER) STRICT`,
+     id INTEGER PRIMARY KEY, lang TEXT NOT NULL DEFAULT 'en' CHECK (lang IN ('en','es')), created_at INTEGER NOT NULL, left_at INTEGER) STRICT`,
   `CREATE TABLE contact (
      id INTEGER PRIMARY KEY, person_id INTEGER NOT NULL REFERENCES person(id), channel TEXT NOT NULL CHECK (channel IN ('email','sms')),
      address TEXT, address_hash TEXT NOT NULL, confirm_token_hash TEXT UNIQUE, confirm_until INTEGER, confirmed_at INTEGER, stopped_at INTEGER, stop_reason TEXT, created_at INTEGER NOT NULL) STRICT`,
