@@ -1,0 +1,8 @@
+import { useEffect } from 'react';
+
+/** Names the document after the page, so that tabs, history and screen readers tell pages apart. */
+export function usePageTitle(title: string): void {
+  useEffect(() => {
+    document.title = `${title} · Lidwatch`;
+  }, [title]);
+}
