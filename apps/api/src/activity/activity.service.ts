@@ -32,7 +32,9 @@ export class ActivityService {
   }
 
   private async append(deed: Deed): Promise<void> {
-    const last = await this.sql.get<{ seq: number; hash: string }>('SELECT seq, hash FROM activity ORDER BY seq DESC LIMIT 1');
+    const last = await this.sql.get<{ seq: number; hash: string }>(
+      'SELECT seq, hash FROM activity ORDER BY seq DESC LIMIT 1',
+    );
     const body = JSON.stringify(deed.body ?? {});
     const facts = {
       seq: (last?.seq ?? 0) + 1,

@@ -17,5 +17,6 @@ export const Roles = (...roles: Role[]) => applyDecorators(SetMetadata(rolesKey,
 
 /** The signed-in person of the request; only on routes with `@Roles()`. */
 export const CurrentUser = createParamDecorator(
-  (_: unknown, context: ExecutionContext) => context.switchToHttp().getRequest<Request & { user?: SignedIn }>().user,
+  (_: unknown, context: ExecutionContext) =>
+    context.switchToHttp().getRequest<Request & { user?: SignedIn }>().user,
 );

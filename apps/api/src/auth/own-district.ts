@@ -9,5 +9,8 @@ export function seesDistrict(user: SignedIn, districtId: number): boolean {
 /** Throws 403 `not-your-district` when an officer reaches for a district that is not theirs. */
 export function requireOwnDistrict(user: SignedIn, districtId: number): void {
   if (!seesDistrict(user, districtId))
-    throw new Problem('not-your-district', 'This belongs to a district that is not one of yours. Ask its officer.');
+    throw new Problem(
+      'not-your-district',
+      'This belongs to a district that is not one of yours. Ask its officer.',
+    );
 }

@@ -37,7 +37,13 @@ export class JobRows {
     await this.keep(job, startedAt, endedAt, `failed: ${message}`, 1);
   }
 
-  private async keep(job: Job, startedAt: number, endedAt: number, result: string, failures: number): Promise<void> {
+  private async keep(
+    job: Job,
+    startedAt: number,
+    endedAt: number,
+    result: string,
+    failures: number,
+  ): Promise<void> {
     await this.sql.run(
       `INSERT INTO job (name, last_started_at, last_ended_at, last_result, next_at, runs, failures)
        VALUES ($name, $startedAt, $endedAt, $result, $nextAt, 1, $failures)

@@ -1,4 +1,9 @@
-import { Injectable, Logger, type BeforeApplicationShutdown, type OnApplicationBootstrap } from '@nestjs/common';
+import {
+  Injectable,
+  Logger,
+  type BeforeApplicationShutdown,
+  type OnApplicationBootstrap,
+} from '@nestjs/common';
 import { SchedulerRegistry } from '@nestjs/schedule';
 import { Clock, SetClock } from '../common/clock';
 import type { Job } from './job';
@@ -74,7 +79,9 @@ export class JobsService implements OnApplicationBootstrap, BeforeApplicationShu
       await this.rows.ended(job, startedAt, this.clock.now(), result);
     } catch (error) {
       this.logger.error(error, `Job "${job.name}"`);
-      await this.rows.failed(job, startedAt, this.clock.now(), error).catch((fault: unknown) => this.logger.error(fault));
+      await this.rows
+        .failed(job, startedAt, this.clock.now(), error)
+        .catch((fault: unknown) => this.logger.error(fault));
     }
   }
 }

@@ -5,5 +5,9 @@ import { JobsService } from './jobs.service';
 
 /** Jobs that run every so often, for everybody. */
 @Global()
-@Module({ imports: [ScheduleModule.forRoot()], providers: [JobRows, JobsService], exports: [JobRows, JobsService] })
+@Module({
+  imports: [ScheduleModule.forRoot()],
+  providers: [JobRows, JobsService],
+  exports: [JobRows, JobsService],
+})
 export class SchedulerModule {}

@@ -1,0 +1,42 @@
+import { Module } from '@nestjs/common';
+import { EventEmitterModule } from '@nestjs/event-emitter';
+import { ActivityModule } from './activity/activity.module';
+import { AuthModule } from './auth/auth.module';
+import { CommonModule } from './common/common.module';
+import { ConfigModule } from './config/config.module';
+import { DatabaseModule } from './database/database.module';
+import { DistrictsModule } from './districts/districts.module';
+import { HealthModule } from './health/health.module';
+import { LoggingModule } from './http/logging.module';
+import { WebFilesModule } from './http/web-files.module';
+import { ProfilesModule } from './profiles/profiles.module';
+import { ReadingsModule } from './readings/readings.module';
+import { RulesModule } from './rules/rules.module';
+import { SchedulerModule } from './scheduler/scheduler.module';
+import { ScreeningModule } from './screening/screening.module';
+import { TowersModule } from './towers/towers.module';
+import { UsersModule } from './users/users.module';
+
+/** The whole service: the ground floor first, then the rooms in the order in which they may use each other. */
+@Module({
+  imports: [
+    ConfigModule,
+    LoggingModule,
+    CommonModule,
+    DatabaseModule,
+    EventEmitterModule.forRoot(),
+    SchedulerModule,
+    ActivityModule,
+    UsersModule,
+    AuthModule,
+    TowersModule,
+    DistrictsModule,
+    ReadingsModule,
+    ScreeningModule,
+    ProfilesModule,
+    RulesModule,
+    HealthModule,
+    WebFilesModule,
+  ],
+})
+export class AppModule {}
