@@ -1,0 +1,33 @@
+import { between, notKnown, type Quantity } from '@lidwatch/atmosphere';
+import { isMeasureName, type MeasuredValues, type MeasureName } from '@lidwatch/rules';
+
+/** Bounds as they are kept: null for an open end, both null for not known, with the reason where there is one. */
+type StoredQuantity = [number | null, number | null, string?];
+
+const NO_REASON = 'nothing was measured';
+const end = (value: number): number | null => (Number.isFinite(value) ? value : null);
+
+/** A quantity from two stored ends. Both null is not known, for `reason`. */
+export function quantityOf(lo: number | null, hi: number | null, reason = NO_REASON): Quantity {
+  if (lo === null && hi === null) return notKnown(reason);
+  return lo === hi ? { lo: lo!, hi: hi! } : between(lo ?? -Infinity, hi ?? Infinity, reason);
+}
+
+/** Measured values as the JSON text that keeps them. A measure of which nothing is known is kept with its reason. */
+export function measuresToJson(values: MeasuredValues): string {
+  const stored: Record<string, StoredQuantity> = {};
+  for (const [name, { lo, hi, reason }] of Object.entries(values)) {
+    stored[name] = reason === undefined ? [end(lo), end(hi)] : [end(lo), end(hi), reason];
+  }
+  return JSON.stringify(stored);
+}
+
+/** The measured values that `measuresToJson` wrote; a name that is no measure any more is left out. */
+export function measuresFromJson(text: string): MeasuredValues {
+  const stored = JSON.parse(text) as Record<string, StoredQuantity>;
+  const values: { [Name in MeasureName]?: Quantity } = {};
+  for (const [name, [lo, hi, reason]] of Object.entries(stored)) {
+    if (isMeasureName(name)) values[name] = quantityOf(lo, hi, reason);
+  }
+  return values;
+}
