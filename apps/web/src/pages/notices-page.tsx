@@ -1,6 +1,12 @@
 import { PageHead } from '../components/layout/page-head';
+import { NoticeLog } from '../features/notices/components/notice-log';
 
-/** The page; its feature is built next. */
+/** The notice log. */
 export function NoticesPage() {
-  return <PageHead title="Notices" />;
+  return (
+    <>
+      <PageHead title="Notices" />
+      <NoticeLog />
+    </>
+  );
 }

@@ -61,7 +61,7 @@ export function AirColumn({ levels, lid, size, scale, known = true, pressureHPa,
             fill={colorVar('airSoft')}
             rx="3"
           />
-          {lid && <LidDrawing lid={lid} size={size} geometry={geometry} />}
+          {lid && <LidDrawing lid={lid} levels={levels} size={size} geometry={geometry} />}
           {size === 'full' && (
             <FullMarks
               levels={levels}

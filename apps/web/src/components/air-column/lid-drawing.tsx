@@ -1,5 +1,5 @@
 import { colorVar } from '../../theme/palette';
-import type { ColumnLid } from './column-data';
+import { knownLevels, type ColumnLevel, type ColumnLid } from './column-data';
 import type { ColumnSize, Geometry } from './geometry';
 
 const LINE: Record<ColumnSize, number> = { small: 2, medium: 2.4, full: 3 };
@@ -18,7 +18,9 @@ export function LidDrawing({
   const open = lid.open !== 'no';
   const lidY = lid.open === 'at the top' ? top + 1 : y(lid.topM);
   const reach = size === 'small' ? 3 : 5;
-  const chevronX = right - reach - 4;
+  const highest = knownLevels(levels).at(-1);
+  const traceIsRight = highest !== undefined && x(highest.temperatureC) > (left + right) / 2;
+  const chevronX = traceIsRight ? left + reach + 4 : right - reach - 4;
   return (
     <>
       <rect x={left} y={lidY} width={right - left} height={bottom - lidY} fill={colorVar('lidSoft')} />

@@ -1,12 +1,11 @@
 import type { DistrictHistory, RangeValue } from '../../lib/api/types';
 
-const bounds = (value: RangeValue): [string, string] => {
-  if ('exactly' in value) return [String(value.exactly), String(value.exactly)];
-  if ('atLeast' in value) return [String(value.atLeast), ''];
-  if ('atMost' in value) return ['', String(value.atMost)];
-  if ('between' in value) return [String(value.between[0]), String(value.between[1])];
-  return ['', ''];
-};
+const written = (bound: number | undefined): string => (bound === undefined ? '' : String(bound));
+
+const bounds = ({ exactly, atLeast, atMost, between }: RangeValue): [string, string] => [
+  written(exactly ?? atLeast ?? between?.[0]),
+  written(exactly ?? atMost ?? between?.[1]),
+];
 
 /**
  * What the chart shows as CSV (RFC 4180): the end of each mean in UTC, the bounds of the strength (an open bound is

@@ -3,3 +3,4 @@ export * from './failed';
 export * from './loaded';
 export * from './loading';
 export * from './stale';
+export * from './refusal';

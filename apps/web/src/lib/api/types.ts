@@ -6,13 +6,15 @@ export type Truth = 'true' | 'false' | 'not known';
 export type Act = 'begin' | 'end';
 export type Role = 'administrator' | 'analyst' | 'officer';
 
-/** A number, or what is known of it. */
-export type RangeValue =
-  | { exactly: number }
-  | { atLeast: number }
-  | { atMost: number }
-  | { between: number[] }
-  | { notKnown: string };
+/** A number, or what is known of it: exactly one of the fields is there. */
+export interface RangeValue {
+  exactly?: number;
+  atLeast?: number;
+  atMost?: number;
+  between?: number[];
+  /** The reason, in plain words. */
+  notKnown?: string;
+}
 
 export interface Page<T> {
   items: T[];
@@ -53,12 +55,22 @@ export interface Inversion {
   form: string;
 }
 
+export interface Layer {
+  lowerM: number;
+  upperM: number;
+  lapseRateKPerKm: number | null;
+  sigmaKPerKm: number;
+  textbookClass: string | null;
+  probabilityTRises: number;
+}
+
 export interface Profile {
   towerId: number;
   tEnd: string;
   blockMinutes: number;
   rev: number;
   levels: Level[];
+  layers: Layer[];
   surface: 'present' | 'absent' | 'not known';
   reason?: string;
   inversion: Inversion | null;
@@ -231,3 +243,67 @@ export interface District {
 export type DeliveryState =
   'queued' | 'sending' | 'accepted' | 'delivered' | 'failed' | 'suppressed' | 'expired';
 export type Channel = 'email' | 'sms';
+
+/** What was measured for a clause, as evidence carries it: a plain number is exact; yes is 1, no is 0. */
+export type Measured = number | RangeValue | { from: number; to: number };
+
+export interface HeldFacts {
+  neededMinutes: number;
+  toleratedMinutes: number;
+  recordMinutes: number;
+  trueMinutes: number;
+  falseMinutes: number;
+  notKnownMinutes: number;
+}
+
+interface Evaluated {
+  truth: Truth;
+  now: Truth;
+  held?: HeldFacts;
+}
+export interface EvaluatedClause extends Evaluated {
+  kind: 'clause';
+  measure: string;
+  op: string;
+  value: number | boolean;
+  measured: Measured;
+}
+export interface EvaluatedGroup extends Evaluated {
+  kind: 'all' | 'any' | 'not';
+  parts: EvaluatedNode[];
+}
+export type EvaluatedNode = EvaluatedClause | EvaluatedGroup;
+
+export interface EvidenceView {
+  tree: EvaluatedNode;
+  sentences: { en: string[]; es: string[] };
+  sha256: string;
+}
+
+export interface ProposalDetail extends ProposalCard {
+  rule: { id: number; version: number };
+  evidence: EvidenceView;
+  profile: Profile | null;
+  history: HistoryEntry[];
+}
+
+export type DeliveryCounts = Record<Channel, Record<DeliveryState, number>>;
+
+export interface NoticeDetail extends NoticeRow {
+  origin: string;
+  reason: string;
+  texts: { en: NoticeText; es: NoticeText };
+  evidence?: EvidenceView;
+  events: { seq: number; kind: string; at: string; by: string; text: string }[];
+  delivery: DeliveryCounts;
+}
+
+export interface Delivery {
+  id: number;
+  channel: Channel;
+  to: string;
+  state: DeliveryState;
+  attempts: number;
+  lastAt: string | null;
+  detail: string;
+}

@@ -18,15 +18,12 @@ const BOUNDS: Record<BoundStyle, { atLeast: string; atMost: string }> = {
 };
 
 /** Whether nothing is known of the value. */
-export const isNotKnown = (value: RangeValue): value is { notKnown: string } => 'notKnown' in value;
+export const isNotKnown = (value: RangeValue): boolean => drawable(value) === null;
 
 /** The number within the value that can be drawn: itself, its bound or its middle; null when not known. */
-export function drawable(value: RangeValue): number | null {
-  if ('exactly' in value) return value.exactly;
-  if ('atLeast' in value) return value.atLeast;
-  if ('atMost' in value) return value.atMost;
-  if ('between' in value) return ((value.between[0] ?? NaN) + (value.between[1] ?? NaN)) / 2;
-  return null;
+export function drawable({ exactly, atLeast, atMost, between }: RangeValue): number | null {
+  if (between) return ((between[0] ?? NaN) + (between[1] ?? NaN)) / 2;
+  return exactly ?? atLeast ?? atMost ?? null;
 }
 
 /** A value that may be a range, in words or signs: "≥ 5.1 °C", "at least 5.1 °C", "1.0 to 2.0 °C", "not known". */
@@ -34,11 +31,11 @@ export function rangeText(
   value: RangeValue,
   { decimals = 1, unit = '', style = 'signs', write }: Form = {},
 ): string {
+  const { exactly, atLeast, atMost, between } = value;
   const number = write ?? ((v: number) => decimal(v, decimals));
   const withUnit = (text: string) => (unit === '' ? text : `${text} ${unit}`);
-  if ('exactly' in value) return withUnit(number(value.exactly));
-  if ('atLeast' in value) return BOUNDS[style].atLeast + withUnit(number(value.atLeast));
-  if ('atMost' in value) return BOUNDS[style].atMost + withUnit(number(value.atMost));
-  if ('between' in value) return withUnit(value.between.map(number).join(' to '));
-  return 'not known';
+  if (exactly !== undefined) return withUnit(number(exactly));
+  if (atLeast !== undefined) return BOUNDS[style].atLeast + withUnit(number(atLeast));
+  if (atMost !== undefined) return BOUNDS[style].atMost + withUnit(number(atMost));
+  return between ? withUnit(between.map(number).join(' to ')) : 'not known';
 }

@@ -1,0 +1,42 @@
+import { Stack } from '@chakra-ui/react';
+import { useState } from 'react';
+import { Message } from '../../../components/ui/message';
+import type { Me, ProposalDetail } from '../../../lib/api/types';
+import { AnalystDecision } from './analyst-decision';
+import { OfficerDecision } from './officer-decision';
+import { stateSentence } from './state-sentence';
+
+interface DecisionPanelProps {
+  proposal: ProposalDetail;
+  me: Me;
+  zone: string;
+  onAnswer: () => void;
+}
+
+/**
+ * What the reader may do with the proposal now. A form once shown stays, with what was typed, when somebody else
+ * decides meanwhile: the sentence above it says what they did.
+ */
+export function DecisionPanel({ proposal, me, zone, onAnswer }: DecisionPanelProps) {
+  const mine = me.role === 'officer' && me.districts.some(({ id }) => id === proposal.districtId);
+  const analystsTurn = me.role === 'analyst' && (proposal.state === 'open' || proposal.state === 'returned');
+  const officersTurn = mine && proposal.state === 'confirmed';
+  const [began] = useState({ analyst: analystsTurn, officer: officersTurn });
+  const sentence = stateSentence(proposal, zone);
+  return (
+    <Stack gap="3">
+      {sentence && !(officersTurn && proposal.state === 'confirmed') && (
+        <Message
+          tone={(began.analyst && !analystsTurn) || (began.officer && !officersTurn) ? 'warn' : 'info'}
+        >
+          {sentence}
+        </Message>
+      )}
+      {(analystsTurn || began.analyst) && <AnalystDecision proposal={proposal} onAnswer={onAnswer} />}
+      {officersTurn && <OfficerDecision proposal={proposal} zone={zone} onAnswer={onAnswer} />}
+      {me.role === 'officer' && !mine && (
+        <Message>This is not one of your districts: you can read it.</Message>
+      )}
+    </Stack>
+  );
+}
