@@ -33,6 +33,12 @@ const MARK_TOWER = `INSERT INTO dirty (stage, subject, t)
   SELECT DISTINCT stage.value, $1, b.t_end FROM json_each('[1,2]') stage, block_mean b
   WHERE b.sensor_id IN (SELECT id FROM sensor WHERE tower_id = $1) AND b.t_end > $2
   ON CONFLICT DO UPDATE SET gen = gen + 1`;
+const MARK_DISTRICTS = `INSERT INTO dirty (stage, subject, t)
+  SELECT DISTINCT 3, d.district_id, j.value->>1 FROM json_each($1) j JOIN (
+    SELECT district_id, tower_id FROM district_tower
+    UNION SELECT id, floor_tower_id FROM district UNION SELECT id, bench_tower_id FROM district
+    UNION SELECT id, pm25_tower_id FROM district) d ON d.tower_id = j.value->>0
+  WHERE true ON CONFLICT DO UPDATE SET gen = gen + 1`;
 const MARK_DISTRICT = `INSERT INTO dirty (stage, subject, t)
   SELECT DISTINCT 3, $1, t_end FROM profile WHERE tower_id IN (SELECT value FROM json_each($2))
   ON CONFLICT DO UPDATE SET gen = gen + 1`;
@@ -47,6 +53,7 @@ export class DirtyStages implements OnModuleDestroy {
   private readonly handlers = new Map<Stage, StageHandler>();
   private readonly running = new Map<Stage, Promise<void>>();
   private readonly again = new Set<Stage>();
+  private readonly exhausted = new Set<Stage>();
   private readonly timers = new Map<Stage, NodeJS.Timeout>();
   private closing = false;
 
@@ -73,6 +80,13 @@ export class DirtyStages implements OnModuleDestroy {
     this.work.afterCommit(() => this.soon(1));
   }
 
+  /** Marks blocks ([tower id, t]) for every district in which the tower has a part. */
+  async markDistricts(blocks: readonly (readonly [number, number])[]): Promise<void> {
+    if (blocks.length === 0) return;
+    await this.sql.run(MARK_DISTRICTS, [JSON.stringify(blocks)]);
+    this.work.afterCommit(() => this.soon(3));
+  }
+
   /** Marks every block of a district for which one of these towers has a profile. */
   async markDistrict(districtId: number, towerIds: readonly number[]): Promise<void> {
     await this.sql.run(MARK_DISTRICT, [districtId, JSON.stringify(towerIds)]);
@@ -80,11 +94,15 @@ export class DirtyStages implements OnModuleDestroy {
   }
 
   /** The newest blocks of a stage that wait and end by `untilT`. */
-  newest(stage: Stage, limit: number, untilT: number): Promise<DirtyRow[]> {
-    return this.sql.all<DirtyRow>(
+  async newest(stage: Stage, limit: number, untilT: number): Promise<DirtyRow[]> {
+    const rows = await this.sql.all<DirtyRow>(
       'SELECT subject, t, gen FROM dirty WHERE stage = $1 AND t <= $2 ORDER BY t DESC LIMIT $3',
       [stage, untilT, limit],
     );
+    // Fewer than asked were all there were: what comes meanwhile asks for another turn itself.
+    if (rows.length < limit) this.exhausted.add(stage);
+    else this.exhausted.delete(stage);
+    return rows;
   }
 
   /** Takes the marks away, in the running transaction, except where another change has come since they were read. */
@@ -133,7 +151,7 @@ export class DirtyStages implements OnModuleDestroy {
     const handler = this.handlers.get(stage);
     do {
       this.again.delete(stage);
-      while (handler && !this.closing && (await handler()) > 0);
+      while (handler && !this.closing && (await handler()) > 0 && !this.exhausted.has(stage));
     } while (this.again.has(stage) && !this.closing);
   }
 

@@ -9,6 +9,13 @@ export interface TowerBlock {
   readonly tEnd: number;
 }
 
+/** What is kept of a block that is to become a profile. */
+export interface MeansOfBlock {
+  readonly means: readonly KeptMean[];
+  /** Whether it is one already, so that a change has to keep what it was. */
+  readonly hasProfile: boolean;
+}
+
 const value = (column: string, i: number): string =>
   REAL_COLUMNS.has(column) ? `CAST(value->>${i} AS REAL)` : `value->>${i}`;
 const columns = PROFILE_COLUMNS.join(', ');
@@ -18,7 +25,9 @@ const differs = (a: string, b: string): string =>
   `(${content.map((c) => `${a}.${c}`).join(', ')}) IS NOT (${content.map((c) => `${b}.${c}`).join(', ')})`;
 const body = content.map((column) => `'${column}', p.${column}`).join(', ');
 
-const MEANS = `SELECT j.key, json_group_array(json_array(b.sensor_id, format('%!.17g', b.mean), b.n, b.quality)) means
+const MEANS = `SELECT j.key,
+    EXISTS (SELECT 1 FROM profile p WHERE p.tower_id = j.value->>2 AND p.t_end = j.value->>1) hasProfile,
+    json_group_array(json_array(b.sensor_id, format('%!.17g', b.mean), b.n, b.quality)) means
   FROM json_each($1) j CROSS JOIN json_each(j.value->'$[0]') s CROSS JOIN block_mean b
   ON b.sensor_id = s.value AND b.t_end = j.value->>1 GROUP BY j.key`;
 const HOUR_OF_PM25 = `SELECT j.key, count(b.mean) n, avg(b.mean) mean FROM json_each($1) j CROSS JOIN block_mean b
@@ -31,22 +40,21 @@ const WRITE = `WITH j AS (SELECT value FROM json_each($1)) INSERT INTO profile A
   SELECT ${given}, 1 FROM j WHERE true
   ON CONFLICT DO UPDATE SET ${content.map((c) => `${c} = excluded.${c}`).join(', ')}, rev = p.rev + 1
   WHERE ${differs('p', 'excluded')} RETURNING tower_id towerId, t_end tEnd`;
-const DISTRICTS = `SELECT district_id districtId, tower_id towerId FROM district_tower
-  UNION SELECT id, floor_tower_id FROM district WHERE floor_tower_id IS NOT NULL
-  UNION SELECT id, bench_tower_id FROM district WHERE bench_tower_id IS NOT NULL
-  UNION SELECT id, pm25_tower_id FROM district WHERE pm25_tower_id IS NOT NULL`;
 
 /** The statements by which profiles are made and kept. */
 @Injectable()
 export class ProfileStore {
   constructor(private readonly sql: Sql) {}
 
-  /** The means of some blocks, for the sensors given with each, in the order asked. */
-  async means(blocks: readonly (TowerBlock & { sensorIds: readonly number[] })[]): Promise<KeptMean[][]> {
-    const asked = JSON.stringify(blocks.map(({ sensorIds, tEnd }) => [sensorIds, tEnd]));
-    const rows = await this.sql.all<{ key: number; means: string }>(MEANS, [asked]);
-    const found = new Map(rows.map((row) => [row.key, row.means]));
-    return blocks.map((_, key) => meansOf(found.get(key)));
+  /** The means of some blocks, for the sensors given with each, and whether each has a profile; in the order asked. */
+  async means(blocks: readonly (TowerBlock & { sensorIds: readonly number[] })[]): Promise<MeansOfBlock[]> {
+    const asked = JSON.stringify(blocks.map(({ sensorIds, tEnd, towerId }) => [sensorIds, tEnd, towerId]));
+    const rows = await this.sql.all<{ key: number; hasProfile: number; means: string }>(MEANS, [asked]);
+    const found = new Map(rows.map((row) => [row.key, row]));
+    return blocks.map((_, key) => ({
+      means: meansOf(found.get(key)?.means),
+      hasProfile: found.get(key)?.hasProfile === 1,
+    }));
   }
 
   /** The mean of the hour that ends with each block, and how many blocks it holds, in the order asked. */
@@ -60,17 +68,16 @@ export class ProfileStore {
     return blocks.map((_, key) => found.get(key) ?? { n: 0, mean: null });
   }
 
-  /** Writes profiles within the caller's transaction, keeping what they replace; gives those that are new or differ. */
-  async write(rows: readonly ReturnType<typeof profileRow>[], now: number): Promise<TowerBlock[]> {
-    if (rows.length === 0) return [];
-    const values = JSON.stringify(rows);
-    await this.sql.run(KEEP_PAST, [values, now]);
-    return this.sql.returning<TowerBlock>(WRITE, [values]);
+  /** Keeps, within the caller's transaction, what these profiles are about to replace. */
+  async keepPast(rows: readonly ReturnType<typeof profileRow>[], now: number): Promise<void> {
+    if (rows.length > 0) await this.sql.run(KEEP_PAST, [JSON.stringify(rows), now]);
   }
 
-  /** Which districts each tower speaks for, in any part. */
-  districtsOfTowers(): Promise<{ districtId: number; towerId: number }[]> {
-    return this.sql.all(DISTRICTS);
+  /** Writes profiles within the caller's transaction; gives those that are new or differ. */
+  async write(rows: readonly ReturnType<typeof profileRow>[]): Promise<TowerBlock[]> {
+    if (rows.length === 0) return [];
+    const values = JSON.stringify(rows);
+    return this.sql.returning<TowerBlock>(WRITE, [values]);
   }
 }
 

@@ -1,6 +1,5 @@
-import { Injectable, type OnModuleInit } from '@nestjs/common';
+import { Injectable, Logger, type OnModuleInit } from '@nestjs/common';
 import { Clock } from '../common/clock';
-import { groupBy } from '../common/group-by';
 import { DirtyStages, type DirtyRow } from '../database/dirty';
 import { UnitOfWork } from '../database/unit-of-work';
 import { expectedReadings, type TowerLayout } from '../towers/tower-layout';
@@ -9,17 +8,21 @@ import { blockFacts, type KeptMean } from './block-facts';
 import { findingsOf } from './findings';
 import { Hours } from './hours';
 import { profileRow } from './profile-row';
-import { ProfileStore, type TowerBlock } from './profile-store';
+import { ProfileStore, type MeansOfBlock } from './profile-store';
 
 /** Blocks worked out at a time. */
-const BATCH = 1_000;
+const BATCH = 500;
 const HOUR_S = 3600;
 const LEAST_GRACE_S = 120;
 
-interface Waiting {
+interface Waiting extends MeansOfBlock {
   readonly row: DirtyRow;
   readonly tower: TowerLayout;
-  readonly means: readonly KeptMean[];
+}
+
+interface Made extends Waiting {
+  /** Undefined where the block holds no reading. */
+  readonly profile: ReturnType<typeof profileRow> | undefined;
 }
 
 /** How long after a block's end late readings are waited for, s, before the block counts as closed. */
@@ -28,6 +31,8 @@ export const graceS = (intervalS: number): number => Math.max(LEAST_GRACE_S, int
 /** Stage 2: makes a profile of every closed block whose means changed, and rolls its hour up. */
 @Injectable()
 export class ProfilesStage implements OnModuleInit {
+  private readonly log = new Logger(ProfilesStage.name);
+
   constructor(
     private readonly dirty: DirtyStages,
     private readonly store: ProfileStore,
@@ -46,22 +51,34 @@ export class ProfilesStage implements OnModuleInit {
     const closed = rows.length === 0 ? [] : await this.closedOf(rows);
     if (closed.length === 0) return 0;
     const hours = await this.pm25Hours(closed);
-    const made = closed.flatMap(({ row, tower, means }, i) => {
-      const facts = blockFacts(tower, row.t, means, hours[i]);
-      return facts ? [profileRow(facts, findingsOf(facts, tower))] : [];
-    });
-    const districts = groupBy(await this.store.districtsOfTowers(), ({ towerId }) => towerId);
-    await this.work.run(async () => {
-      const changed = await this.store.write(made, this.clock.now());
-      const blockS = new Map(closed.map(({ tower }) => [tower.id, tower.blockS]));
-      await this.hours.rollUp(changed.map((block) => ({ ...block, blockS: blockS.get(block.towerId)! })));
-      await this.dirty.mark(3, districtBlocks(changed, districts));
-      await this.dirty.settle(
-        2,
-        closed.map(({ row }) => row),
-      );
-    }, 'bulk');
-    return closed.length;
+    const made = closed.flatMap((waiting, i) => this.make(waiting, hours[i]));
+    await this.work.run(() => this.write(made), 'bulk');
+    return made.length;
+  }
+
+  /** A block that cannot be worked out is logged and keeps its mark; the others go on. */
+  private make(waiting: Waiting, pm25Hour: number | undefined): Made[] {
+    const { row, tower, means } = waiting;
+    try {
+      const facts = blockFacts(tower, row.t, means, pm25Hour);
+      return [{ ...waiting, profile: facts && profileRow(facts, findingsOf(facts, tower)) }];
+    } catch (error) {
+      this.log.error(`The block of tower ${tower.id} that ends at ${row.t} could not be worked out`, error);
+      return [];
+    }
+  }
+
+  private async write(made: readonly Made[]): Promise<void> {
+    const before = made.flatMap(({ hasProfile, profile }) => (hasProfile && profile ? [profile] : []));
+    await this.store.keepPast(before, this.clock.now());
+    const changed = await this.store.write(made.flatMap(({ profile }) => (profile ? [profile] : [])));
+    const blockS = new Map(made.map(({ tower }) => [tower.id, tower.blockS]));
+    await this.hours.rollUp(changed.map((block) => ({ ...block, blockS: blockS.get(block.towerId)! })));
+    await this.dirty.markDistricts(changed.map(({ towerId, tEnd }) => [towerId, tEnd]));
+    await this.dirty.settle(
+      2,
+      made.map(({ row }) => row),
+    );
   }
 
   /** Those that are closed: all expected readings are in, or the grace after the block's end is over. */
@@ -72,12 +89,12 @@ export class ProfilesStage implements OnModuleInit {
       ...{ towerId: subject, tEnd: t },
       sensorIds: towers.get(subject)!.sensors.map(({ id }) => id),
     }));
-    const means = await this.store.means(blocks);
+    const found = await this.store.means(blocks);
     const now = this.clock.now();
     return rows.flatMap((row, i): Waiting[] => {
       const tower = towers.get(row.subject)!;
-      const isClosed = row.t + graceS(tower.intervalS) <= now || isComplete(tower, means[i]!);
-      return isClosed ? [{ row, tower, means: means[i]! }] : [];
+      const isClosed = row.t + graceS(tower.intervalS) <= now || isComplete(tower, found[i]!.means);
+      return isClosed ? [{ row, tower, ...found[i]! }] : [];
     });
   }
 
@@ -104,15 +121,3 @@ const isComplete = (tower: TowerLayout, means: readonly KeptMean[]): boolean =>
     const kept = means.find((each) => each.sensorId === id);
     return retiredAt !== null || (kept !== undefined && kept.n >= expectedReadings(tower));
   });
-
-const districtBlocks = (
-  changed: readonly TowerBlock[],
-  districts: ReadonlyMap<number, readonly { districtId: number }[]>,
-): [number, number][] => {
-  const blocks = new Map<string, [number, number]>();
-  for (const { towerId, tEnd } of changed) {
-    for (const { districtId } of districts.get(towerId) ?? [])
-      blocks.set(`${districtId} ${tEnd}`, [districtId, tEnd]);
-  }
-  return [...blocks.values()];
-};

@@ -80,9 +80,12 @@ async function load(order: number): Promise<Record<string, object[]>> {
   ];
   const inOrder = order === 0 ? [...first, ...wrong] : shuffled([...first, ...wrong], next);
   const rows = [...inOrder, ...(order === 0 ? late : shuffled(late, next))];
-  for (let at = 0; at < rows.length; ) {
+  for (let at = 0; at < rows.length;) {
     const size = 1 + Math.floor(next() * rows.length * 0.4);
-    await pipeline.readings.ingest(towerId, rows.slice(at, at + size), { origin: 'folder', name: 'mast.csv' });
+    await pipeline.readings.ingest(towerId, rows.slice(at, at + size), {
+      origin: 'folder',
+      name: 'mast.csv',
+    });
     if (next() < 0.6) await pipeline.dirty.drainAll();
     at += size;
   }
@@ -101,7 +104,9 @@ describe('the same readings in any order, in batches of any size, late and corre
     for (let order = 1; order < ORDERS; order += 1) {
       const found = await load(order);
       for (const table of Object.keys(TABLES)) {
-        const differ = found[table]!.filter((row, i) => JSON.stringify(row) !== JSON.stringify(expected[table]![i]));
+        const differ = found[table]!.filter(
+          (row, i) => JSON.stringify(row) !== JSON.stringify(expected[table]![i]),
+        );
         expect({ order, table, differ: differ.slice(0, 3) }).toEqual({ order, table, differ: [] });
         expect(found[table]!.length).toBe(expected[table]!.length);
       }

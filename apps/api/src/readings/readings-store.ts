@@ -29,8 +29,9 @@ const KEEP_PAST = `INSERT INTO reading_past (sensor_id, t_end, until_at, value, 
   SELECT value->>0, value->>1, $2, CAST(value->>2 AS REAL), value->>3, value->>4 FROM json_each($1)`;
 const REFUSE = `INSERT INTO refused_row (import_id, row_no, col, code, text, raw)
   SELECT $2, value->>0, value->>1, value->>2, value->>3, value->>4 FROM json_each($1)`;
-const BEGIN = `WITH made(x) AS (SELECT 1) INSERT INTO import (tower_id, origin, name, received_at)
-  SELECT $1, $2, $3, $4 FROM made RETURNING id`;
+const BEGIN = `WITH made(x) AS (SELECT 1)
+  INSERT INTO import (tower_id, origin, name, received_at, new_count, repeated_count, corrected_count, refused_count)
+  SELECT $1, $2, $3, $4, $5, $6, $7, $8 FROM made RETURNING id`;
 const COUNT = `UPDATE import SET new_count = new_count + $2, repeated_count = repeated_count + $3,
   corrected_count = corrected_count + $4, refused_count = refused_count + $5 WHERE id = $1`;
 
@@ -39,9 +40,21 @@ const COUNT = `UPDATE import SET new_count = new_count + $2, repeated_count = re
 export class ReadingsStore {
   constructor(private readonly sql: Sql) {}
 
-  /** Begins an import and gives its id. */
-  async begin(towerId: number, origin: string, name: string, receivedAt: number): Promise<number> {
-    const [made] = await this.sql.returning<{ id: number }>(BEGIN, [towerId, origin, name, receivedAt]);
+  /** Begins an import with its first counts and gives its id. */
+  async begin(
+    towerId: number,
+    { origin, name }: { origin: string; name: string },
+    receivedAt: number,
+    counts: Counts,
+  ): Promise<number> {
+    const counted = [counts.new, counts.repeated, counts.corrected, counts.refused];
+    const [made] = await this.sql.returning<{ id: number }>(BEGIN, [
+      towerId,
+      origin,
+      name,
+      receivedAt,
+      ...counted,
+    ]);
     return made!.id;
   }
 
@@ -57,10 +70,17 @@ export class ReadingsStore {
     await this.sql.run(WRITE, [JSON.stringify(values), importId]);
   }
 
-  /** Keeps values that are no longer in force, with when they ceased to be. */
-  async keepPast(past: readonly InForce[], untilAt: number): Promise<void> {
+  /** Keeps values that are no longer in force, with when they ceased to be; those without an import are of this one. */
+  async keepPast(
+    past: readonly (ParsedReading | InForce)[],
+    importId: number,
+    untilAt: number,
+  ): Promise<void> {
     if (past.length === 0) return;
-    const values = past.map((was) => [was.sensorId, was.tEnd, was.value, was.importId, was.rowNo]);
+    const values = past.map((was) => [
+      ...[was.sensorId, was.tEnd, was.value],
+      ...['importId' in was ? was.importId : importId, was.rowNo],
+    ]);
     await this.sql.run(KEEP_PAST, [JSON.stringify(values), untilAt]);
   }
 

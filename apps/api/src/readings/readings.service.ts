@@ -30,7 +30,8 @@ const NONE: Counts = { new: 0, repeated: 0, corrected: 0, refused: 0 };
 
 interface Sorted {
   readonly write: ParsedReading[];
-  readonly past: InForce[];
+  /** Those without an import are of this one. */
+  readonly past: (ParsedReading | InForce)[];
   readonly counts: Counts;
 }
 
@@ -61,58 +62,64 @@ export class ReadingsService {
     const layout = await this.layouts.of(towerId);
     refuseStrangers(layout, rows);
     const refused = origin.refused ?? [];
-    let importId = 0;
+    let importId: number | undefined;
     let total = NONE;
     for (let at = 0; at === 0 || at < Math.max(rows.length, refused.length); at += CHUNK_ROWS) {
       await this.work.run(async () => {
-        importId ||= await this.store.begin(towerId, origin.origin, origin.name, this.clock.now());
-        const refusedHere = refused.slice(at, at + CHUNK_ROWS);
-        const sorted = await this.takeChunk(layout, rows.slice(at, at + CHUNK_ROWS), importId);
-        await this.store.refuse(refusedHere, importId);
-        const counts = { ...sorted, refused: refusedHere.length };
-        await this.store.count(importId, counts);
+        const chunk = { rows: rows.slice(at, at + CHUNK_ROWS), refused: refused.slice(at, at + CHUNK_ROWS) };
+        const sorted = sortRows(chunk.rows, await this.store.inForce(chunk.rows));
+        const counts = { ...sorted.counts, refused: chunk.refused.length };
+        if (importId === undefined)
+          importId = await this.store.begin(towerId, origin, this.clock.now(), counts);
+        else await this.store.count(importId, counts);
+        await this.keep(layout, sorted, chunk.refused, importId);
         total = sum(total, counts);
       }, lane);
     }
-    return { importId, ...total };
+    return { importId: importId!, ...total };
   }
 
-  private async takeChunk(
+  private async keep(
     layout: TowerLayout,
-    rows: readonly ParsedReading[],
+    { write, past }: Sorted,
+    refused: readonly RefusedRow[],
     importId: number,
-  ): Promise<Counts> {
-    if (rows.length === 0) return NONE;
-    const { write, past, counts } = sortRows(rows, await this.store.inForce(rows), importId);
+  ): Promise<void> {
     await this.store.write(write, importId);
-    await this.store.keepPast(past, this.clock.now());
+    await this.store.keepPast(past, importId, this.clock.now());
+    await this.store.refuse(refused, importId);
     const blocks = new Set(write.map((row) => blockEndOf(row.tEnd, layout.blockS)));
     await this.dirty.mark(
       1,
       [...blocks].map((t) => [layout.id, t] as const),
     );
-    return counts;
   }
 }
 
 const keyOf = (row: { sensorId: number; tEnd: number }): string => `${row.sensorId} ${row.tEnd}`;
 
+/**
+ * The store reads decimal text, which can be off by the last bit of a double: values that close are the same, or a
+ * file sent twice would correct itself.
+ */
+const isSame = (a: number, b: number): boolean => Math.abs(a - b) <= 4 * Number.EPSILON * Math.abs(a);
+
 /** Sorts rows into new, repeated and corrected; of several rows for one instant the last is in force. */
-function sortRows(rows: readonly ParsedReading[], known: readonly InForce[], importId: number): Sorted {
-  const inForce = new Map<string, InForce>(known.map((row) => [keyOf(row), row]));
+function sortRows(rows: readonly ParsedReading[], known: readonly InForce[]): Sorted {
+  const inForce = new Map<string, ParsedReading | InForce>(known.map((row) => [keyOf(row), row]));
   const write = new Map<string, ParsedReading>();
-  const past: InForce[] = [];
+  const past: (ParsedReading | InForce)[] = [];
   let [fresh, repeated] = [0, 0];
   for (const row of rows) {
     const key = keyOf(row);
     const was = inForce.get(key);
-    if (was?.value === row.value) {
+    if (was && isSame(was.value, row.value)) {
       repeated += 1;
       continue;
     }
     if (was) past.push(was);
     else fresh += 1;
-    inForce.set(key, { ...row, importId });
+    inForce.set(key, row);
     write.set(key, row);
   }
   const counts = { new: fresh, repeated, corrected: past.length, refused: 0 };

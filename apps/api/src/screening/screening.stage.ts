@@ -13,7 +13,7 @@ import { firstAfter, type Flags, type Series, type SetSpan, type Stretch } from 
 import { stretchesOf } from './stretches';
 
 /** Blocks worked out at a time. */
-const BATCH = 1_000;
+const BATCH = 500;
 const EVER = Number.MAX_SAFE_INTEGER;
 const HOUR_S = 3600;
 

@@ -1,6 +1,6 @@
 import { HeaderError, type ParsedReadings } from './parsed-readings';
 import type { ReadingContext } from './read-csv';
-import { readNumber } from './number-cell';
+import { isMeasurable, readNumber } from './number-cell';
 import { quoted } from '../../common/quoted';
 import { refusedRow, type Refusal } from '../refusal';
 import { intervalEnd } from '../../towers/time-keeping/interval-end';
@@ -19,9 +19,12 @@ const notAReading: Refusal = {
 
 const valueOf = (value: unknown, given: ReadingContext): number | Refusal | undefined => {
   if (value === null || value === undefined) return undefined;
-  if (typeof value === 'number' && Number.isFinite(value)) return value;
+  if (typeof value === 'number' && isMeasurable(value)) return value;
   if (typeof value !== 'string') {
-    return { code: 'value-not-a-number', why: 'the value is neither a number nor null; send a number.' };
+    return {
+      code: 'value-not-a-number',
+      why: 'the value is neither null nor a number that can be held; send a number.',
+    };
   }
   const none = value.trim() === '' || given.mapping.missing.includes(value.trim());
   return none ? undefined : readNumber(value, given.mapping.decimal);
