@@ -1,6 +1,8 @@
 import { Module } from '@nestjs/common';
 import { SchedulerModule } from '../scheduler/scheduler.module';
 import { TowersModule } from '../towers/towers.module';
+import { FilePositions } from './collector/file-positions';
+import { ReadingsCollector } from './collector/readings-collector';
 import { ImportsController } from './imports.controller';
 import { ImportsService } from './imports.service';
 import { IngestController } from './ingest.controller';
@@ -13,7 +15,15 @@ import { ReadingsStore } from './readings-store';
 @Module({
   imports: [TowersModule, SchedulerModule],
   controllers: [IngestController, ImportsController],
-  providers: [ReadingsStore, ReadingsService, ReadingContexts, PushService, ImportsService],
-  exports: [ReadingsService],
+  providers: [
+    ReadingsStore,
+    ReadingsService,
+    ReadingContexts,
+    PushService,
+    ImportsService,
+    FilePositions,
+    ReadingsCollector,
+  ],
+  exports: [ReadingsService, ReadingsCollector],
 })
 export class ReadingsModule {}

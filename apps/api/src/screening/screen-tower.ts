@@ -5,7 +5,6 @@ import {
   type MeasuredQuantity,
   type ScreenedReading,
   type ScreeningContext,
-  type SensorLimits,
   type SensorSeries,
 } from '@lidwatch/atmosphere';
 import { checkBits, qualityCodes } from '@lidwatch/contracts';
@@ -41,7 +40,7 @@ const described = (tower: TowerLayout, sensor: LayoutSensor, t: number): Omit<Se
     sensorId: String(sensor.id),
     quantity: quantities[sensor.quantity],
     intervalS: tower.intervalS,
-    limits: sensor.limits as Partial<SensorLimits>,
+    limits: sensor.limits,
     ...{ heightM, sigma },
   };
 };

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
 import { ActivityService } from '../activity/activity.service';
 import type { SignedIn } from '../auth/signed-in';
+import { Clock } from '../common/clock';
 import { Problem } from '../common/problem';
 import { UnitOfWork } from '../database/unit-of-work';
 import { showSource, type SourceDto, type SourceInput } from './dto/source.dto';
@@ -9,6 +10,8 @@ import { Source } from './models/source.model';
 import { TowerLayouts } from './tower-layouts';
 
 const USUAL_INTERVAL_S = 60;
+/** Each failure in a row doubles the wait before the next try, up to 64 times the interval. */
+const MOST_DOUBLINGS = 6;
 
 /** Where a tower's readings come from, and how each source's data is laid out. */
 @Injectable()
@@ -17,6 +20,7 @@ export class SourcesService {
     @InjectModel(Source) private readonly sources: typeof Source,
     private readonly layouts: TowerLayouts,
     private readonly work: UnitOfWork,
+    private readonly clock: Clock,
     private readonly activity: ActivityService,
   ) {}
 
@@ -46,5 +50,24 @@ export class SourcesService {
   async pushMapping(towerId: number): Promise<string | undefined> {
     const source = await this.sources.findOne({ where: { towerId, kind: 'push', retiredAt: null } });
     return source?.mapping;
+  }
+
+  /** The folder sources whose turn it is. */
+  async dueFolders(): Promise<Source[]> {
+    const now = this.clock.now();
+    const all = await this.sources.findAll({
+      where: { kind: 'folder', retiredAt: null },
+      order: [['id', 'ASC']],
+    });
+    return all.filter(({ nextAt }) => nextAt === null || nextAt <= now);
+  }
+
+  /** Keeps how a collection went; after a failure the next try waits the longer, the more there were in a row. */
+  async collected(source: Source, result: string, failed: boolean): Promise<void> {
+    const now = this.clock.now();
+    const failures = failed ? source.failures + 1 : 0;
+    const waitS = source.intervalS * 2 ** Math.min(failures, MOST_DOUBLINGS);
+    const values = { lastAt: now, lastResult: result, failures, nextAt: now + waitS };
+    await this.sources.update(values, { where: { id: source.id } });
   }
 }

@@ -15,12 +15,6 @@ export interface ReadingContext {
   readonly nowS: number;
 }
 
-/** Where a text continues a file: the header read earlier, and the number of its first row. */
-export interface Continued {
-  readonly header?: readonly string[];
-  readonly firstRowNo?: number;
-}
-
 const cellsDoNotMatch = (found: number, expected: number): Refusal => ({
   code: 'cells-do-not-match-header',
   why: `it has ${found} cells where the header has ${expected}; send the whole line again.`,
@@ -30,6 +24,7 @@ class Reader {
   readonly result: ParsedReadings = { rows: [], refused: [], ignoredColumns: [] };
   private wide?: WideHeader;
   private long?: LongHeader;
+  private headerRaw?: string;
   private readonly noReading: ReadonlySet<string>;
 
   constructor(private readonly given: ReadingContext) {
@@ -40,7 +35,8 @@ class Reader {
     return this.wide !== undefined || this.long !== undefined;
   }
 
-  readHeader(cells: readonly string[]): void {
+  readHeader({ cells, raw }: CsvRecord): void {
+    this.headerRaw = raw;
     if (this.given.mapping.format === 'wide') {
       this.wide = wideHeader(cells, this.given.mapping, this.given.sensorIds);
     } else this.long = longHeader(cells, this.given.mapping);
@@ -49,6 +45,7 @@ class Reader {
 
   read(record: CsvRecord): void {
     const header = (this.wide ?? this.long)!;
+    if (record.raw === this.headerRaw) return;
     if (record.cells.length !== header.cells) {
       this.refuse(record, undefined, cellsDoNotMatch(record.cells.length, header.cells));
       return;
@@ -92,21 +89,17 @@ class Reader {
 const pause = (): Promise<void> => new Promise((resolve) => setImmediate(resolve));
 
 /**
- * Reads a CSV text of readings, wide or long. Bad cells and bad rows are refused one by one, the rest is taken; a
- * header that cannot be used throws a `HeaderError`. Gives way to other work between batches of lines.
+ * Reads a CSV text of readings, wide or long, its header line first; `headerRowNo` is the row number the header counts
+ * as. Bad cells and bad rows are refused one by one, the rest is taken; a header that cannot be used throws a
+ * `HeaderError`. The header written again, as loggers do when they start anew, is passed over. Gives way to other work between batches of lines.
  */
-export async function readCsv(
-  text: string,
-  given: ReadingContext,
-  continued: Continued = {},
-): Promise<ParsedReadings> {
+export async function readCsv(text: string, given: ReadingContext, headerRowNo = 1): Promise<ParsedReadings> {
   const reader = new Reader(given);
-  if (continued.header) reader.readHeader(continued.header);
-  const batches = readRecords(text, given.mapping.separator, reader.result.refused, continued.firstRowNo);
+  const batches = readRecords(text, given.mapping.separator, reader.result.refused, headerRowNo);
   for (const batch of batches) {
     for (const record of batch) {
       if (reader.hasHeader) reader.read(record);
-      else reader.readHeader(record.cells);
+      else reader.readHeader(record);
     }
     await pause();
   }

@@ -21,7 +21,7 @@ const options = (separator: string) => ({
 });
 
 const cellsOf = (text: string, separator: string): string[][] => {
-  const rows = parse(text, options(separator)) as string[][];
+  const rows: string[][] = parse(text, options(separator));
   return separator === 'blank' ? rows.map((row) => row.filter((cell) => cell !== '')) : rows;
 };
 

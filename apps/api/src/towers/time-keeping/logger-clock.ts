@@ -36,7 +36,10 @@ const offsetAt = (zone: string, utcS: number): number =>
 const offsetsAround = (zone: string, shownS: number): readonly [number, number] => {
   const day = Math.floor(shownS / DAY_S);
   let days = daysOfZone.get(zone);
-  if (!days || days.size > KEPT_DAYS) daysOfZone.set(zone, (days = new Map()));
+  if (!days || days.size > KEPT_DAYS) {
+    days = new Map<number, readonly [number, number]>();
+    daysOfZone.set(zone, days);
+  }
   let around = days.get(day);
   if (!around) {
     around = [offsetAt(zone, (day - 1) * DAY_S), offsetAt(zone, (day + 2) * DAY_S)];

@@ -1,5 +1,5 @@
-import { openPipeline, type Pipeline, type TestTower } from './pipeline.testing';
-import type { ParsedReading } from './parse/parsed-readings';
+import { openPipeline, type Pipeline, type TestTower } from './testing/pipeline';
+import type { ParsedReading } from '../readings/parse/parsed-readings';
 
 const INTERVAL_S = 300;
 const BEGIN = Date.UTC(2025, 11, 1) / 1000;
