@@ -4,17 +4,19 @@ import type { ColumnSize, Geometry } from './geometry';
 
 const LINE: Record<ColumnSize, number> = { small: 2, medium: 2.4, full: 3 };
 
-/** The cold air under the lid, tinted, and the lid: a line where the tower reaches it, dashed with a chevron where not. */
-export function LidDrawing({
-  lid,
-  size,
-  geometry,
-}: {
+interface LidDrawingProps {
   lid: ColumnLid;
+  levels: readonly ColumnLevel[];
   size: ColumnSize;
   geometry: Geometry;
-}) {
-  const { left, right, top, bottom, y } = geometry;
+}
+
+/**
+ * The cold air under the lid, tinted, and the lid: a line where the tower reaches it, dashed with a chevron where not.
+ * The chevron stands on the side away from the trace.
+ */
+export function LidDrawing({ lid, levels, size, geometry }: LidDrawingProps) {
+  const { left, right, top, bottom, x, y } = geometry;
   const open = lid.open !== 'no';
   const lidY = lid.open === 'at the top' ? top + 1 : y(lid.topM);
   const reach = size === 'small' ? 3 : 5;

@@ -89,7 +89,7 @@ export function MeasureCell({
 }) {
   if (drawable(value) === null) {
     return (
-      <Box as="span" color="unknown" title={'notKnown' in value ? value.notKnown : undefined}>
+      <Box as="span" color="unknown" title={value.notKnown}>
         <span aria-hidden="true">–</span>
         <Box as="span" srOnly>
           not known
