@@ -4,6 +4,7 @@ import { SessionService } from './auth/sessions/session.service';
 import { ProblemFilter } from './common/problem.filter';
 import { validationPipe } from './common/validation';
 import { Settings } from './config/settings';
+import { serveApiDescription } from './http/api-description';
 import { limitBodies } from './http/body-limits';
 import { securityHeaders } from './http/security-headers';
 
@@ -19,4 +20,5 @@ export function configureApp(app: NestExpressApplication): void {
   for (const step of app.get(SessionService).middleware()) app.use(step);
   app.useGlobalPipes(validationPipe());
   app.useGlobalFilters(new ProblemFilter());
+  serveApiDescription(app);
 }

@@ -27,6 +27,7 @@ async function listen(): Promise<NestExpressApplication> {
   const app = await NestFactory.create<NestExpressApplication>(AppModule, {
     bodyParser: false,
     bufferLogs: true,
+    autoFlushLogs: false,
     abortOnError: false,
   });
   app.useLogger(app.get(Logger));

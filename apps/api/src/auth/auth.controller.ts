@@ -1,5 +1,5 @@
 import { Body, Controller, Get, HttpCode, Param, Post, Req, Res } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import type { Request, Response } from 'express';
 import { LinksService } from './accounts/links.service';
 import { AuthService } from './auth.service';
@@ -18,6 +18,7 @@ export class AuthController {
   ) {}
 
   @Post('sign-in')
+  @ApiOkResponse({ type: Me })
   @Public()
   @HttpCode(200)
   signIn(
@@ -29,6 +30,7 @@ export class AuthController {
   }
 
   @Post('sign-out')
+  @ApiNoContentResponse()
   @Roles('administrator', 'analyst', 'officer')
   @HttpCode(204)
   signOut(
@@ -40,18 +42,21 @@ export class AuthController {
   }
 
   @Get('me')
+  @ApiOkResponse({ type: Me })
   @Roles('administrator', 'analyst', 'officer')
   me(@CurrentUser() user: SignedIn): Promise<Me> {
     return this.auth.me(user);
   }
 
   @Get('link/:token')
+  @ApiOkResponse({ type: LinkView })
   @Public()
   link(@Param('token') token: string): Promise<LinkView> {
     return this.links.look(token);
   }
 
   @Post('first-administrator')
+  @ApiOkResponse({ type: Me })
   @Public()
   @HttpCode(200)
   firstAdministrator(@Body() wanted: FirstAdministrator, @Req() request: Request): Promise<Me> {
@@ -59,6 +64,7 @@ export class AuthController {
   }
 
   @Post('invitations/accept')
+  @ApiOkResponse({ type: Me })
   @Public()
   @HttpCode(200)
   accept(@Body() wanted: AcceptInvitation, @Req() request: Request): Promise<Me> {

@@ -21,6 +21,7 @@ const details: Partial<Record<ErrorCode, string>> = {
   'not-allowed': 'Your role may not do this.',
   'too-large': 'The request is larger than this address takes. Send it in smaller parts.',
   'type-not-served': 'Send application/json, or what this address says it takes.',
+  'not-ready': 'The service is starting or its database does not answer. Try again shortly.',
   unexpected: 'Try again. If it stays, tell your administrator the time at which it happened.',
 };
 

@@ -1,10 +1,19 @@
 import { Module } from '@nestjs/common';
 import { LoggerModule } from 'nestjs-pino';
 import type { IncomingMessage, ServerResponse } from 'node:http';
+import type { LogFn, Logger } from 'pino';
 import { Settings } from '../config/settings';
 
 /** Addresses whose requests are not logged: asked every few seconds, or plain files. */
 const quiet = /^\/(health|assets|favicon)/;
+
+const assembly = new Set([
+  'InstanceLoader',
+  'NestApplication',
+  'NestFactory',
+  'RouterExplorer',
+  'RoutesResolver',
+]);
 
 /** Structured logs: one line per API request with method, path without its query, status and time; nothing secret. */
 @Module({
@@ -12,7 +21,10 @@ const quiet = /^\/(health|assets|favicon)/;
     LoggerModule.forRootAsync({
       inject: [Settings],
       useFactory: (settings: Settings) => ({
+        // Under the global prefix: pages and files are not logged.
+        forRoutes: ['{*path}'],
         pinoHttp: {
+          hooks: { logMethod: leaveOutAssembly },
           level: settings.logLevel,
           customLogLevel: levelOf,
           customSuccessMessage: ({ method }, { statusCode }, ms: number) =>
@@ -29,6 +41,12 @@ const quiet = /^\/(health|assets|favicon)/;
   ],
 })
 export class LoggingModule {}
+
+/** Nest tells of each module and route it puts together; only its warnings and errors are of interest. */
+function leaveOutAssembly(this: Logger, args: Parameters<LogFn>, log: LogFn, level: number): void {
+  const [{ context }] = args as unknown as [{ context?: string }];
+  if (level > 30 || !assembly.has(context ?? '')) log.apply(this, args);
+}
 
 /** Links carry secrets in their path, so whatever follows a token's place is left out. */
 function requestFacts({ id, method, url }: { id: unknown; method: string; url: string }): object {
