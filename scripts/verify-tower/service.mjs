@@ -28,6 +28,19 @@ const run = (file, args) =>
     child.once('exit', (code) => (code === 0 ? resolve() : reject(new Error(`${file} ended with ${code}.`))));
   });
 
+const LINK_MS = 5_000;
+
+/** The token of the link printed at start. */
+const tokenIn = async (output) => {
+  const until = Date.now() + LINK_MS;
+  while (Date.now() < until) {
+    const token = /\/welcome\/([\w.~-]+)/.exec(output())?.[1];
+    if (token) return token;
+    await pause(50);
+  }
+  throw new Error('The service printed no link for the first administrator.');
+};
+
 const waitUntilReady = async (url, ended) => {
   const until = Date.now() + START_MS;
   while (Date.now() < until) {
@@ -58,7 +71,8 @@ export async function startService() {
   const url = `http://127.0.0.1:${port}`;
   const env = { ...process.env, PORT: String(port), DATA_DIR: dataDir, DEMO: 'off', PUBLIC_URL: url };
   env.LOGGER_DIR = path.join(dataDir, 'loggers');
-  env.LOG_LEVEL = 'error';
+  // The first administrator's link is a warning in the log.
+  env.LOG_LEVEL = 'warn';
   const child = spawn(process.execPath, [main], { cwd: root, env, stdio: ['ignore', 'pipe', 'pipe'] });
   let output = '';
   for (const stream of [child.stdout, child.stderr]) stream.on('data', (text) => (output += text));
@@ -68,9 +82,7 @@ export async function startService() {
   };
   try {
     await waitUntilReady(url, () => child.exitCode !== null);
-    const token = /\/welcome\/([\w.~-]+)/.exec(output)?.[1];
-    if (!token) throw new Error('The service printed no link for the first administrator.');
-    return { url, token, close };
+    return { url, token: await tokenIn(() => output), close };
   } catch (error) {
     await close();
     throw new Error(`${error.message}\n${output.slice(-4000)}`, { cause: error });

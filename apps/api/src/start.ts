@@ -31,6 +31,7 @@ async function listen(): Promise<NestExpressApplication> {
     abortOnError: false,
   });
   app.useLogger(app.get(Logger));
+  app.flushLogs();
   const settings = app.get(Settings);
   configureApp(app);
   app.enableShutdownHooks(['SIGINT', 'SIGTERM']);
