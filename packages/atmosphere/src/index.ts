@@ -12,3 +12,4 @@ export * from './screening';
 export * from './air-quality';
 export * from './districts';
 export * from './episodes';
+export * from './batch';

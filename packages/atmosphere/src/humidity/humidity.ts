@@ -1,6 +1,10 @@
 import { exactly, isKnown, notKnown, type Quantity } from '../bounds';
 import { ZERO_CELSIUS_K } from '../constants';
-import { saturationVapourPressureIceHPa, saturationVapourPressureWaterHPa } from '../temperature';
+import {
+  moistAirFactor,
+  saturationVapourPressureIceHPa,
+  saturationVapourPressureWaterHPa,
+} from '../temperature';
 import { absoluteHumidityGPerM3, mixingRatio, specificHumidity, virtualTemperatureK } from './content';
 import { dewPointC, frostPointC } from './dew-point';
 import { ICE_FORMULA_C, vapourPressureHPa, WATER_FORMULA_C, type MeasuredHumidity } from './vapour-pressure';
@@ -48,8 +52,9 @@ const unknown = (reason: string): Humidity => {
  * All humidity quantities from air temperature and any one of relative humidity, dew point or wet bulb.
  *
  * Units: °C, %, hPa in; as each field names out. Valid: each within its formula's range (over water −45 to 60 °C, over
- * ice −65 to 0 °C), else that one is not known with its reason; a missing temperature leaves all not known. Relative
- * humidity without the moist-air factor; wet bulb and psychrometer with it.
+ * ice −65 to 0 °C), else that one is not known with its reason; a missing temperature leaves all not known. A
+ * psychrometer measures the vapour pressure in moist air, which is freed of the moist-air factor before it is turned
+ * into a dew point or a relative humidity; from humidity or dew point the vapour pressure is that of pure vapour.
  * Source: [WMO8] annex 4.B; [AMSGlossary] mixing ratio, specific humidity, virtual temperature.
  */
 export function humidityOf(
@@ -62,14 +67,16 @@ export function humidityOf(
   const vapour = vapourPressureHPa(temperatureC, measured, pressureHPa);
   if (!isKnown(vapour)) return unknown(vapour.reason ?? 'the vapour pressure is not known');
   const e = vapour.lo;
-  const overWater = (100 * e) / saturationVapourPressureWaterHPa(temperatureC);
-  const overIce = (100 * e) / saturationVapourPressureIceHPa(temperatureC);
+  const factor = moistAirFactor(pressureHPa);
+  const pure = measured.kind === 'wet bulb' ? e / factor : e;
+  const overWater = (100 * pure) / saturationVapourPressureWaterHPa(temperatureC);
+  const overIce = (100 * pure) / saturationVapourPressureIceHPa(temperatureC);
   const ratio = mixingRatio(e, pressureHPa);
   const pressed = 'the pressure is not known';
   return {
     vapourPressureHPa: vapour,
-    dewPointC: dewPointC(e),
-    frostPointC: frostPointC(e),
+    dewPointC: dewPointC(pure),
+    frostPointC: frostPointC(pure),
     overWaterPercent: within(temperatureC, WATER_FORMULA_C)
       ? exactly(overWater)
       : notKnown('air is outside −45 to 60 °C'),
@@ -84,6 +91,8 @@ export function humidityOf(
       pressed,
     ),
     wetBulbC:
-      measured.kind === 'wet bulb' ? exactly(measured.wetBulbC) : wetBulbC(temperatureC, e, pressureHPa),
+      measured.kind === 'wet bulb'
+        ? exactly(measured.wetBulbC)
+        : wetBulbC(temperatureC, e * factor, pressureHPa),
   };
 }

@@ -1,0 +1,3 @@
+export * from './profiles';
+export { smallExp } from './small-exp';
+export * from './analyse-batch';
