@@ -12,7 +12,7 @@ const notFound = {
 
 /** Everything staff do, in the frame with the navigation; a page that breaks does not take the frame with it. */
 const staffFrame: RouteObject = {
-  lazy: async () => ({ Component: (await import('../components/layout/staff-frame')).StaffFrame }),
+  lazy: async () => ({ Component: (await import('./frame/staff-frame')).StaffFrame }),
   children: [{ ...pageFailed, children: [...staffRoutes, ...adminRoutes] }],
 };
 

@@ -1,7 +1,7 @@
 import {
+  BarController,
+  BarElement,
   Chart,
-  Filler,
-  Legend,
   LinearScale,
   LineController,
   LineElement,
@@ -11,4 +11,13 @@ import {
 } from 'chart.js';
 import 'chartjs-adapter-luxon';
 
-Chart.register(LineController, LineElement, PointElement, LinearScale, TimeScale, Tooltip, Filler, Legend);
+Chart.register(
+  BarController,
+  BarElement,
+  LineController,
+  LineElement,
+  PointElement,
+  LinearScale,
+  TimeScale,
+  Tooltip,
+);

@@ -114,21 +114,25 @@ function drawNotices({ context, area, x }: Drawing, { notices, colors }: Backdro
   }
 }
 
-function drawn(
-  chart: Chart,
-  backdrop: Backdrop,
-  parts: readonly ((d: Drawing, b: Backdrop) => void)[],
-): void {
-  const drawing = drawingOf(chart);
-  if (!drawing) return;
+const backdrops = new WeakMap<Chart, Backdrop>();
+
+/** Gives a chart its backdrop and draws it. */
+export function showBackdrop(chart: Chart, backdrop: Backdrop): void {
+  backdrops.set(chart, backdrop);
+  chart.draw();
+}
+
+function drawn(chart: Chart, parts: readonly ((d: Drawing, b: Backdrop) => void)[]): void {
+  const [drawing, backdrop] = [drawingOf(chart), backdrops.get(chart)];
+  if (!drawing || !backdrop) return;
   drawing.context.save();
   for (const draw of parts) draw(drawing, backdrop);
   drawing.context.restore();
 }
 
-/** The chart.js plugin that draws a backdrop, read anew at each drawing; names come last, over the line. */
-export const backdropPlugin = (backdrop: () => Backdrop): Plugin<'line'> => ({
+/** The chart.js plugin that draws the backdrop a chart was given; names come last, over the line. */
+export const backdropPlugin: Plugin<'line' | 'bar'> = {
   id: 'backdrop',
-  beforeDatasetsDraw: (chart) => drawn(chart, backdrop(), [drawNights, drawGaps, drawLimits, drawNotices]),
-  afterDatasetsDraw: (chart) => drawn(chart, backdrop(), [nameLimits]),
-});
+  beforeDatasetsDraw: (chart) => drawn(chart, [drawNights, drawGaps, drawLimits, drawNotices]),
+  afterDatasetsDraw: (chart) => drawn(chart, [nameLimits]),
+};

@@ -1,77 +1,62 @@
 import { Box } from '@chakra-ui/react';
-import { useMemo, useRef } from 'react';
-import { Line } from 'react-chartjs-2';
+import type { Chart as ChartJS } from 'chart.js';
+import { useEffect, useMemo, useRef } from 'react';
+import { Chart } from 'react-chartjs-2';
 import type { DistrictHistory } from '../../lib/api/types';
 import { useChartColors } from './chart-colors';
-import { limitLines } from './limit-lines';
+import { isNightly } from './nightly';
 import './register';
-import { backdropPlugin, type Backdrop } from './strength-backdrop';
+import { backdropPlugin, showBackdrop } from './strength-backdrop';
+import { lineDrawing, nightlyDrawing } from './strength-datasets';
 import { strengthOptions } from './strength-options';
-import { gapsOf, strengthPoints, withBreaks } from './strength-series';
+import { useBackdrop } from './use-backdrop';
 
-const ms = (instant: string) => new Date(instant).getTime();
+const PLUGINS = [backdropPlugin];
 
-/** Strength within the tower over time, with nights, notices, limits and what is not known. Its words are elsewhere. */
-export function StrengthChart({
-  history,
-  label,
-  height,
-}: {
+interface StrengthChartProps {
   history: DistrictHistory;
+  /** The chart in words. */
   label: string;
   height: number;
-}) {
+}
+
+/**
+ * Strength within the tower over time: a line, or over long spans a bar each night, with nights, notices, the rule's
+ * limits and what is not known.
+ */
+export function StrengthChart({ history, label, height }: StrengthChartProps) {
   const colors = useChartColors();
-  const points = useMemo(() => strengthPoints(history), [history]);
-  const backdrop: Backdrop = useMemo(
-    () => ({
-      colors,
-      gaps: gapsOf(points, history.stepMinutes),
-      limits: limitLines(history.limits),
-      nights: history.nights.map(({ from, to }) => ({ from: ms(from), to: ms(to) })),
-      notices: history.notices.map((notice) => ({
-        ...notice,
-        from: ms(notice.effectiveAt),
-        to: ms(notice.endedAt ?? notice.expiresAt),
-      })),
-    }),
-    [colors, history, points],
+  const bars = isNightly(history);
+  const backdrop = useBackdrop(history, colors, !bars);
+  const chart = useRef<ChartJS<'line' | 'bar'>>(null);
+  const { data, behind } = useMemo(
+    () => (bars ? nightlyDrawing : lineDrawing)(history, colors),
+    [bars, history, colors],
   );
-  const shown = useRef(backdrop);
-  shown.current = backdrop;
-  const plugins = useMemo(() => [backdropPlugin(() => shown.current)], []);
   const options = useMemo(
     () =>
       strengthOptions({
-        zone: history.timeZone,
-        from: ms(history.from),
-        to: ms(history.to),
+        history,
         colors,
-        points: new Map(points.map((point) => [point.x, point])),
+        behind,
         highest: Math.max(0, ...backdrop.limits.map(({ y }) => y + 0.5)),
       }),
-    [history, colors, points, backdrop],
+    [history, colors, behind, backdrop],
   );
-  const data = useMemo(
-    () => ({
-      datasets: [
-        {
-          data: withBreaks(points, history.stepMinutes),
-          borderColor: colors.air,
-          borderWidth: 1.8,
-          pointRadius: 0,
-          pointHoverRadius: 4,
-          pointHoverBackgroundColor: colors.card,
-          spanGaps: false,
-          tension: 0,
-        },
-      ],
-    }),
-    [points, history.stepMinutes, colors],
-  );
+  useEffect(() => {
+    if (chart.current) showBackdrop(chart.current, backdrop);
+  }, [backdrop, options]);
   return (
     <Box height={`${height}px`} position="relative">
-      <Line data={data} options={options} plugins={plugins} role="img" aria-label={label} />
+      <Chart
+        ref={chart}
+        type={bars ? 'bar' : 'line'}
+        data={data}
+        options={options}
+        plugins={PLUGINS}
+        role="img"
+        aria-label={label}
+      />
     </Box>
   );
 }

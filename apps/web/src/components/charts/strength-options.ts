@@ -1,4 +1,5 @@
 import type { ChartOptions } from 'chart.js';
+import type { DistrictHistory } from '../../lib/api/types';
 import { rangeText } from '../../lib/format/range';
 import { dayAndTime } from '../../lib/format/time';
 import type { ColorName } from '../../theme/palette';
@@ -6,18 +7,20 @@ import { NOTICE_ROOM_PX } from './strength-backdrop';
 import type { StrengthPoint } from './strength-series';
 
 interface Shown {
-  zone: string;
-  from: number;
-  to: number;
+  history: DistrictHistory;
   colors: Record<ColorName, string>;
-  points: ReadonlyMap<number, StrengthPoint>;
+  /** The point of the history behind each x. */
+  behind: ReadonlyMap<number, StrengthPoint>;
+  /** What the axis must reach, °C. */
   highest: number;
 }
 
 const SURE = { true: 'sure', false: 'not sure', 'not known': '' } as const;
 
-/** Chart.js options for the strength history: the district's zone on the axis, a 24-hour clock, still when asked. */
-export function strengthOptions({ zone, from, to, colors, points, highest }: Shown): ChartOptions<'line'> {
+/** Chart.js options for the strength history: the district's zone on the axis, a 24-hour clock, no animation. */
+export function strengthOptions({ history, colors, behind, highest }: Shown): ChartOptions<'line' | 'bar'> {
+  const zone = history.timeZone;
+  const [from, to] = [new Date(history.from).getTime(), new Date(history.to).getTime()];
   const days = (to - from) / 86_400_000;
   const text = { color: colors.mute, font: { family: '"Source Sans 3", sans-serif', size: 12.5 } };
   return {
@@ -57,9 +60,12 @@ export function strengthOptions({ zone, from, to, colors, points, highest }: Sho
         titleColor: colors.card,
         bodyColor: colors.card,
         callbacks: {
-          title: ([item]) => (item ? dayAndTime(Number(item.parsed.x), zone) : ''),
+          title: ([item]) => {
+            const point = behind.get(Number(item?.parsed.x));
+            return point ? dayAndTime(point.x, zone) : '';
+          },
           label: ({ parsed }) => {
-            const point = points.get(Number(parsed.x))?.from;
+            const point = behind.get(Number(parsed.x))?.from;
             if (!point) return '';
             return `${rangeText(point.strength, { unit: '°C', style: 'words' })} · ${SURE[point.sure]}`;
           },

@@ -16,7 +16,9 @@ export function toZonedInput(instant: string | number, zone: string): string {
 export function fromZonedInput(text: string, zone: string): string | null {
   const match = /^(\d{4})-(\d\d)-(\d\d)(?:T(\d\d):(\d\d))?/.exec(text);
   if (!match) return null;
-  const [year, month, day, hour, minute] = match.slice(1).map((part) => Number(part ?? 0)) as number[];
-  const at = new TZDate(year ?? 0, (month ?? 1) - 1, day ?? 1, hour ?? 0, minute ?? 0, zone);
+  const [year = 0, month = 1, day = 1, hour = 0, minute = 0] = match
+    .slice(1)
+    .map((part) => Number(part ?? 0));
+  const at = new TZDate(year, month - 1, day, hour, minute, 0, zone);
   return Number.isNaN(at.getTime()) ? null : new Date(at.getTime()).toISOString();
 }

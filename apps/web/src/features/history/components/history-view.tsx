@@ -1,4 +1,5 @@
 import { Box, Stack } from '@chakra-ui/react';
+import { isNightly } from '../../../components/charts/nightly';
 import { StrengthHistory } from '../../../components/charts/strength-history';
 import { Empty } from '../../../components/states/empty';
 import { Loaded } from '../../../components/states/loaded';
@@ -67,8 +68,10 @@ function DistrictHistoryView({ districts, chosen, choice }: DistrictHistoryViewP
               <>
                 <StrengthHistory history={data} name={chosen.name} height={340} />
                 <Box color="mute" fontSize="sm">
-                  One point each {data.stepMinutes} min, within the tower; framed: not known; dashed: the
-                  rule’s limits.
+                  {isNightly(data)
+                    ? 'One bar each night, noon to noon: its strongest within the tower'
+                    : `One point each ${data.stepMinutes} min, within the tower`}
+                  ; framed: not known; dashed: the rule’s limits.
                 </Box>
               </>
             )}

@@ -31,13 +31,17 @@ const Td = chakra('td', {
 });
 const Tr = chakra('tr', {
   base: {
-    display: { base: 'block', md: 'table-row' },
+    display: { base: 'grid', md: 'table-row' },
+    gridTemplateColumns: '1fr 1fr',
     py: { base: '2.5', md: '0' },
     borderTopWidth: { base: '1px', md: '0' },
     borderColor: 'line',
     _first: { borderTopWidth: '0' },
   },
 });
+
+/** What a column's head says, where there are no columns. */
+const OnPhone = chakra('span', { base: { display: { base: 'inline', md: 'none' }, color: 'mute' } });
 
 /** Notices, one line each. */
 export function NoticeTable({
@@ -81,12 +85,16 @@ function NoticeLine({ notice, zone }: { notice: NoticeRow; zone: string }) {
         <KindPill notice={notice} />
       </Td>
       <Td>
+        <OnPhone>issued </OnPhone>
         {dateAndTime(notice.issuedAt, zone)}
         <Box color="mute" fontSize="sm">
           by {notice.issuedBy}
         </Box>
       </Td>
-      <Td>{dateAndTime(notice.endedAt ?? notice.expiresAt, zone)}</Td>
+      <Td>
+        <OnPhone>until </OnPhone>
+        {dateAndTime(notice.endedAt ?? notice.expiresAt, zone)}
+      </Td>
       <Td>
         <Box fontWeight={isInForce(notice) ? '600' : undefined}>{noticeStateWords(notice)}</Box>
         {notice.endedBy && (

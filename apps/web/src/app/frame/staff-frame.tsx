@@ -1,10 +1,11 @@
 import { Box } from '@chakra-ui/react';
 import { LazyMotion } from 'framer-motion';
 import { Navigate, Outlet, useLocation } from 'react-router-dom';
-import { paths } from '../../app/paths';
+import { paths } from '../paths';
+import { SessionEnded } from '../../features/auth/components/session-ended';
 import { useMe } from '../../lib/api/use-me';
-import { Failed } from '../states/failed';
-import { Loading } from '../states/loading';
+import { Failed } from '../../components/states/failed';
+import { Loading } from '../../components/states/loading';
 import { BottomBar } from './bottom-bar';
 import { SideRail } from './side-rail';
 import { TopStrip } from './top-strip';
@@ -48,6 +49,7 @@ export function StaffFrame() {
         </Box>
         <BottomBar me={me} />
       </Box>
+      <SessionEnded />
     </LazyMotion>
   );
 }

@@ -1,4 +1,4 @@
-import { paths } from '../../app/paths';
+import { paths } from '../paths';
 import type { Role } from '../../lib/api/types';
 import type { IconName } from './nav-icon';
 

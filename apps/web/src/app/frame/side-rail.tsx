@@ -1,6 +1,6 @@
 import { Box, HStack, Stack } from '@chakra-ui/react';
 import type { Me } from '../../lib/api/types';
-import { Mark } from '../ui/mark';
+import { Mark } from '../../components/ui/mark';
 import { NavIcon } from './nav-icon';
 import { PlaceLink } from './nav-link';
 import { placesOf } from './navigation';

@@ -1,6 +1,6 @@
 import { HStack } from '@chakra-ui/react';
 import type { Me } from '../../lib/api/types';
-import { Mark } from '../ui/mark';
+import { Mark } from '../../components/ui/mark';
 import { PersonMenu } from './person-menu';
 
 /** The head of the page on a phone. */

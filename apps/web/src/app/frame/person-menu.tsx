@@ -1,12 +1,12 @@
 import { Box, Menu, Portal } from '@chakra-ui/react';
 import { useNavigate } from 'react-router-dom';
 import { useSWRConfig } from 'swr';
-import { paths } from '../../app/paths';
+import { paths } from '../paths';
 import { api } from '../../lib/api/client';
 import type { Me } from '../../lib/api/types';
 import { ME } from '../../lib/api/use-me';
 import { chooseColorMode, useColorMode, type ColorModeChoice } from '../../theme/color-mode';
-import { Button } from '../ui/button';
+import { Button } from '../../components/ui/button';
 import { NavIcon } from './nav-icon';
 
 const MODES: [ColorModeChoice, string][] = [
