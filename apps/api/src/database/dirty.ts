@@ -31,7 +31,7 @@ const SETTLE = `DELETE FROM dirty WHERE (stage, subject, t) IN (
   ON d.stage = $1 AND d.subject = j.value->>0 AND d.t = j.value->>1 AND d.gen = j.value->>2)`;
 const MARK_TOWER = `INSERT INTO dirty (stage, subject, t)
   SELECT DISTINCT stage.value, $1, b.t_end FROM json_each('[1,2]') stage, block_mean b
-  WHERE b.sensor_id IN (SELECT id FROM sensor WHERE tower_id = $1) AND b.t_end > $2
+  WHERE b.sensor_id IN (SELECT id FROM sensor WHERE tower_id = $1) AND b.t_end > $2 AND b.t_end <= $3
   ON CONFLICT DO UPDATE SET gen = gen + 1`;
 const MARK_DISTRICTS = `INSERT INTO dirty (stage, subject, t)
   SELECT DISTINCT 3, d.district_id, j.value->>1 FROM json_each($1) j JOIN (
@@ -74,9 +74,9 @@ export class DirtyStages implements OnModuleDestroy {
     this.work.afterCommit(() => this.soon(stage));
   }
 
-  /** Marks every block of a tower that ends after an instant: its settings or sensors changed. */
-  async markTower(towerId: number, afterT = 0): Promise<void> {
-    await this.sql.run(MARK_TOWER, [towerId, afterT]);
+  /** Marks every block of a tower that ends in (afterT, untilT]: its settings, sensors or set spans changed. */
+  async markTower(towerId: number, afterT = 0, untilT = Number.MAX_SAFE_INTEGER): Promise<void> {
+    await this.sql.run(MARK_TOWER, [towerId, afterT, untilT]);
     this.work.afterCommit(() => this.soon(1));
   }
 

@@ -1,5 +1,5 @@
 import { Body, Controller, Get, Param, ParseIntPipe, Patch, Post } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { ApiCreatedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { CurrentUser, Roles } from '../auth/decorators';
 import type { SignedIn } from '../auth/signed-in';
 import { DistrictsService } from './districts.service';
@@ -15,6 +15,7 @@ export class DistrictsController {
   /** Lists every district. */
   @Get()
   @Roles('administrator', 'analyst', 'officer')
+  @ApiOkResponse({ type: [DistrictDto] })
   list(): Promise<DistrictDto[]> {
     return this.districts.list();
   }
@@ -22,6 +23,7 @@ export class DistrictsController {
   /** Shows one district. */
   @Get(':id')
   @Roles('administrator', 'analyst', 'officer')
+  @ApiOkResponse({ type: DistrictDto })
   get(@Param('id', ParseIntPipe) id: number): Promise<DistrictDto> {
     return this.districts.get(id);
   }
@@ -29,6 +31,7 @@ export class DistrictsController {
   /** Makes a district. */
   @Post()
   @Roles('administrator')
+  @ApiCreatedResponse({ type: DistrictDto })
   create(@Body() input: DistrictInput, @CurrentUser() by: SignedIn): Promise<DistrictDto> {
     return this.districts.create(input, by);
   }
@@ -36,6 +39,7 @@ export class DistrictsController {
   /** Changes a district. */
   @Patch(':id')
   @Roles('administrator')
+  @ApiOkResponse({ type: DistrictDto })
   change(
     @Param('id', ParseIntPipe) id: number,
     @Body() patch: DistrictPatch,

@@ -1,5 +1,5 @@
 import { Controller, Get, Param, ParseIntPipe, Query } from '@nestjs/common';
-import { ApiProperty, ApiTags } from '@nestjs/swagger';
+import { ApiOkResponse, ApiProperty, ApiTags } from '@nestjs/swagger';
 import { Roles } from '../auth/decorators';
 import { PipelineService } from './pipeline.service';
 import { ProfileDto, ProfileSpan } from './dto/profile.dto';
@@ -27,12 +27,14 @@ export class ProfilesController {
 
   /** Shows the newest profile. */
   @Get('profile')
+  @ApiOkResponse({ type: ProfileDto })
   latest(@Param('id', ParseIntPipe) id: number): Promise<ProfileDto> {
     return this.profiles.latest(id);
   }
 
   /** Lists profiles in order of time. */
   @Get('profiles')
+  @ApiOkResponse({ type: ProfileSpan })
   range(
     @Param('id', ParseIntPipe) id: number,
     @Query() { from, to, limit }: ProfilesQuery,
@@ -42,6 +44,7 @@ export class ProfilesController {
 
   /** Says how much waits to be worked out. */
   @Get('pipeline')
+  @ApiOkResponse({ type: PipelineState })
   state(@Param('id', ParseIntPipe) id: number): Promise<PipelineState> {
     return this.pipeline.state(id);
   }

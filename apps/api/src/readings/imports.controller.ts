@@ -1,5 +1,5 @@
 import { Controller, Get, Param, ParseIntPipe, Query } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { Roles } from '../auth/decorators';
 import { PageQuery } from '../common/paging';
 import { ImportPage, ImportsQuery, RefusedRowPage } from './dto/import.dto';
@@ -14,12 +14,14 @@ export class ImportsController {
 
   /** Lists imports, the newest first. */
   @Get()
+  @ApiOkResponse({ type: ImportPage })
   list(@Query() query: ImportsQuery): Promise<ImportPage> {
     return this.imports.list(query);
   }
 
   /** Lists an import's refused rows with their reasons. */
   @Get(':id/refused')
+  @ApiOkResponse({ type: RefusedRowPage })
   refused(@Param('id', ParseIntPipe) id: number, @Query() query: PageQuery): Promise<RefusedRowPage> {
     return this.imports.refused(id, query);
   }

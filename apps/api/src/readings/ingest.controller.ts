@@ -1,5 +1,5 @@
 import { Body, Controller, Headers, HttpCode, Post, UseGuards } from '@nestjs/common';
-import { ApiBearerAuth, ApiConsumes, ApiTags } from '@nestjs/swagger';
+import { ApiBearerAuth, ApiConsumes, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { Public } from '../auth/decorators';
 import { IngestResult } from './dto/ingest-result.dto';
 import { PushService } from './push.service';
@@ -21,6 +21,7 @@ export class IngestController {
   @Public()
   @UseGuards(SiteKeyGuard)
   @ApiConsumes('application/json', 'text/csv')
+  @ApiOkResponse({ type: IngestResult })
   readings(
     @SiteTower() towerId: number,
     @Headers('content-type') contentType: string | undefined,

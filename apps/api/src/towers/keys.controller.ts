@@ -1,5 +1,5 @@
 import { Body, Controller, Delete, Get, HttpCode, Param, ParseIntPipe, Post } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { ApiCreatedResponse, ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { CurrentUser, Roles } from '../auth/decorators';
 import type { SignedIn } from '../auth/signed-in';
 import { KeyDto, KeyInput, KeyMade } from './dto/key.dto';
@@ -14,6 +14,7 @@ export class KeysController {
   /** Lists a tower's keys and when each was last used. */
   @Get('towers/:id/keys')
   @Roles('administrator', 'analyst')
+  @ApiOkResponse({ type: [KeyDto] })
   list(@Param('id', ParseIntPipe) id: number): Promise<KeyDto[]> {
     return this.keys.list(id);
   }
@@ -21,6 +22,7 @@ export class KeysController {
   /** Makes a key; the answer is the only time it is shown. */
   @Post('towers/:id/keys')
   @Roles('administrator')
+  @ApiCreatedResponse({ type: KeyMade })
   create(
     @Param('id', ParseIntPipe) id: number,
     @Body() { name }: KeyInput,
@@ -33,6 +35,7 @@ export class KeysController {
   @Delete('keys/:id')
   @HttpCode(204)
   @Roles('administrator')
+  @ApiNoContentResponse()
   revoke(@Param('id', ParseIntPipe) id: number, @CurrentUser() by: SignedIn): Promise<void> {
     return this.keys.revoke(id, by);
   }

@@ -1,5 +1,5 @@
 import { Body, Controller, Get, Param, ParseIntPipe, Patch, Post } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { ApiCreatedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { CurrentUser, Roles } from '../auth/decorators';
 import type { SignedIn } from '../auth/signed-in';
 import { SensorInput, SensorPatch } from './dto/sensor-input.dto';
@@ -23,6 +23,7 @@ export class TowersController {
   /** Lists every tower with its sensors. */
   @Get('towers')
   @Roles('administrator', 'analyst', 'officer')
+  @ApiOkResponse({ type: [TowerDto] })
   list(): Promise<TowerDto[]> {
     return this.towers.list();
   }
@@ -30,6 +31,7 @@ export class TowersController {
   /** Shows one tower. */
   @Get('towers/:id')
   @Roles('administrator', 'analyst', 'officer')
+  @ApiOkResponse({ type: TowerDto })
   get(@Param('id', ParseIntPipe) id: number): Promise<TowerDto> {
     return this.towers.get(id);
   }
@@ -37,6 +39,7 @@ export class TowersController {
   /** Makes a tower. */
   @Post('towers')
   @Roles('administrator', 'analyst')
+  @ApiCreatedResponse({ type: TowerDto })
   create(@Body() input: TowerInput, @CurrentUser() by: SignedIn): Promise<TowerDto> {
     return this.towers.create(input, by);
   }
@@ -44,6 +47,7 @@ export class TowersController {
   /** Changes a tower. */
   @Patch('towers/:id')
   @Roles('administrator', 'analyst')
+  @ApiOkResponse({ type: TowerDto })
   change(
     @Param('id', ParseIntPipe) id: number,
     @Body() patch: TowerPatch,
@@ -55,6 +59,7 @@ export class TowersController {
   /** Adds a sensor to a tower. */
   @Post('towers/:id/sensors')
   @Roles('administrator', 'analyst')
+  @ApiCreatedResponse({ type: SensorDto })
   addSensor(
     @Param('id', ParseIntPipe) id: number,
     @Body() input: SensorInput,
@@ -66,6 +71,7 @@ export class TowersController {
   /** Changes a sensor from an instant on. */
   @Patch('sensors/:id')
   @Roles('administrator', 'analyst')
+  @ApiOkResponse({ type: SensorDto })
   changeSensor(
     @Param('id', ParseIntPipe) id: number,
     @Body() patch: SensorPatch,
@@ -77,6 +83,7 @@ export class TowersController {
   /** Lists a tower's sources with what their last collection gave. */
   @Get('towers/:id/sources')
   @Roles('administrator', 'analyst')
+  @ApiOkResponse({ type: [SourceDto] })
   listSources(@Param('id', ParseIntPipe) id: number): Promise<SourceDto[]> {
     return this.sources.list(id);
   }
@@ -84,6 +91,7 @@ export class TowersController {
   /** Adds a source. */
   @Post('towers/:id/sources')
   @Roles('administrator', 'analyst')
+  @ApiCreatedResponse({ type: SourceDto })
   addSource(
     @Param('id', ParseIntPipe) id: number,
     @Body() input: SourceInput,
