@@ -1,4 +1,5 @@
 import { ApiProblem, unreachable } from './problem';
+import { announceSessionEnded } from './session-ended';
 
 async function request<T>(method: string, path: string, body?: unknown): Promise<T> {
   const response = await fetch(path, {
@@ -15,8 +16,10 @@ async function request<T>(method: string, path: string, body?: unknown): Promise
   const text = await response.text();
   const isJson = (response.headers.get('content-type') ?? '').includes('json');
   const answer: unknown = isJson && text !== '' ? JSON.parse(text) : {};
-  if (!response.ok) throw new ApiProblem(response.status, answer as object);
-  return answer as T;
+  if (response.ok) return answer as T;
+  const problem = new ApiProblem(response.status, answer as object);
+  if (problem.code === 'sign-in-needed') announceSessionEnded();
+  throw problem;
 }
 
 /** Requests to the service's own API. Each throws an `ApiProblem` when it is refused or cannot be reached. */
