@@ -5,15 +5,20 @@ import { AuthModule } from './auth/auth.module';
 import { CommonModule } from './common/common.module';
 import { ConfigModule } from './config/config.module';
 import { DatabaseModule } from './database/database.module';
+import { DeliveryModule } from './delivery/delivery.module';
 import { DistrictsModule } from './districts/districts.module';
 import { HealthModule } from './health/health.module';
 import { LoggingModule } from './http/logging.module';
 import { WebFilesModule } from './http/web-files.module';
+import { NoticesModule } from './notices/notices.module';
+import { OfficeModule } from './office/office.module';
+import { OutboxModule } from './outbox/outbox.module';
 import { ProfilesModule } from './profiles/profiles.module';
 import { ReadingsModule } from './readings/readings.module';
 import { RulesModule } from './rules/rules.module';
 import { SchedulerModule } from './scheduler/scheduler.module';
 import { ScreeningModule } from './screening/screening.module';
+import { SubscribersModule } from './subscribers/subscribers.module';
 import { TowersModule } from './towers/towers.module';
 import { UsersModule } from './users/users.module';
 
@@ -35,6 +40,11 @@ import { UsersModule } from './users/users.module';
     ScreeningModule,
     ProfilesModule,
     RulesModule,
+    OfficeModule,
+    OutboxModule,
+    SubscribersModule,
+    NoticesModule,
+    DeliveryModule,
     HealthModule,
     WebFilesModule,
   ],

@@ -32,11 +32,3 @@ export function normalPhone(text: string): string | undefined {
 export function addressHash(secret: string, channel: Channel, address: string): string {
   return createHmac('sha256', secret).update(`${channel}:${address}`).digest('base64url');
 }
-
-/** An address for people who need not know it: `m…@pellworth.example`, `… 42`. */
-export function maskedAddress(channel: Channel, address: string | null): string {
-  if (!address) return 'forgotten';
-  if (channel === 'sms') return `… ${address.slice(-2)}`;
-  const [local = '', domain = ''] = address.split('@');
-  return `${local.slice(0, 1)}…@${domain}`;
-}

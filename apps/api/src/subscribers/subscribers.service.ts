@@ -1,9 +1,10 @@
 import { Injectable } from '@nestjs/common';
 import { Clock } from '../common/clock';
+import { maskedAddress } from '../common/masked-address';
 import { Problem } from '../common/problem';
 import { Sql } from '../database/sql';
 import { UnitOfWork } from '../database/unit-of-work';
-import { maskedAddress, normalEmail, normalPhone, type Channel } from './addresses';
+import { normalEmail, normalPhone, type Channel } from './addresses';
 import { ContactsService } from './contacts.service';
 import type {
   ConfirmedDto,

@@ -172,6 +172,8 @@ export const up: readonly string[] = [
      UNIQUE (topic, revision, contact_id)) STRICT`,
   `CREATE INDEX outbox_due ON outbox(channel, priority DESC, next_at, id) WHERE state = 'queued'`,
   `CREATE INDEX outbox_sending ON outbox(lease_until) WHERE state = 'sending'`,
+  `CREATE TABLE outbox_topic (topic TEXT PRIMARY KEY, silent_before INTEGER NOT NULL) STRICT, WITHOUT ROWID`,
+  `CREATE INDEX outbox_topic_rows ON outbox(topic, state)`,
   `CREATE TABLE attempt (
      outbox_id INTEGER NOT NULL REFERENCES outbox(id), n INTEGER NOT NULL, at INTEGER NOT NULL, outcome TEXT NOT NULL, code TEXT, detail TEXT, PRIMARY KEY (outbox_id, n)) STRICT, WITHOUT ROWID`,
 
