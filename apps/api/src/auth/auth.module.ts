@@ -11,6 +11,7 @@ import { UsersController } from './accounts/users.controller';
 import { AuthController } from './auth.controller';
 import { AuthService } from './auth.service';
 import { LinkTokens } from './links/link-tokens';
+import { ActivityController } from './record/activity.controller';
 import { SessionRow } from './models/session.model';
 import { Attempts } from './passwords/attempts';
 import { PasswordHasher } from './passwords/password-hasher';
@@ -21,7 +22,7 @@ import { StaleSessions } from './sessions/stale-sessions';
 /** Who is signed in and what they may do; every route is refused unless it is opened. */
 @Module({
   imports: [UsersModule, SequelizeModule.forFeature([SessionRow])],
-  controllers: [AuthController, UsersController],
+  controllers: [ActivityController, AuthController, UsersController],
   providers: [
     { provide: APP_GUARD, useClass: AccessGuard },
     Attempts,

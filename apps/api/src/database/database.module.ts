@@ -3,6 +3,7 @@ import { InjectConnection, SequelizeModule } from '@nestjs/sequelize';
 import type { Sequelize } from 'sequelize';
 import { Settings } from '../config/settings';
 import { DirtyStages } from './dirty';
+import { closeStore } from './close-store';
 import { openStore } from './open-store';
 import { lockDataDir } from './process-lock';
 import { Sql } from './sql';
@@ -41,7 +42,7 @@ export class DatabaseModule implements OnApplicationShutdown {
 
   /** Lets the writes under way finish, closes the store and gives the data folder back. */
   async onApplicationShutdown(): Promise<void> {
-    await this.sequelize.close();
+    await closeStore(this.sequelize);
     await this.unlock();
   }
 }

@@ -11,16 +11,17 @@ import { UnitOfWork } from './unit-of-work';
  */
 export async function migrate(sequelize: Sequelize, steps: readonly Migration[] = migrations): Promise<void> {
   const units = new UnitOfWork(sequelize);
+  const storage = new SequelizeStorage({ sequelize, modelName: 'migration', tableName: 'migration' });
   const umzug = new Umzug({
     migrations: steps.map(({ name, up }) => ({ name, up: () => units.run(() => runAll(sequelize, up)) })),
-    storage: new SequelizeStorage({ sequelize, modelName: 'migration', tableName: 'migration' }),
+    storage,
     logger: undefined,
   });
   const known = new Set(steps.map(({ name }) => name));
-  const unknown = (await umzug.executed()).find(({ name }) => !known.has(name));
+  const unknown = (await storage.executed()).find((name) => !known.has(name));
   if (unknown)
     throw new StartFault(
-      `The database has "${unknown.name}", which this version does not know: start the newer version, or restore a backup.`,
+      `The database has "${unknown}", which this version does not know: start the newer version, or restore a backup.`,
     );
   const done = await umzug.up();
   if (done.length > 0) new Logger('Migrations').log(`Migrated: ${done.map(({ name }) => name).join(', ')}`);

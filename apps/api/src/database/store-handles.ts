@@ -8,6 +8,7 @@ import { unitHere } from './unit-context';
 export class StoreHandles {
   readonly reads: ReadPool;
   readonly writer: Database;
+  private closing: Promise<void> | undefined;
 
   constructor(
     private readonly handles: Handles,
@@ -32,9 +33,9 @@ export class StoreHandles {
     return this.gate.enter(unit?.lane ?? 'people');
   }
 
-  /** Lets those who wait at the gate finish, then closes every handle. */
-  async close(): Promise<void> {
-    await this.gate.close();
-    await closeHandles(this.handles);
+  /** Lets those who wait at the gate finish, then closes every handle; asked again, it waits for the same. */
+  close(): Promise<void> {
+    this.closing ??= this.gate.close().then(() => closeHandles(this.handles));
+    return this.closing;
   }
 }
