@@ -1,4 +1,4 @@
-import { openPipeline, type Pipeline, type TestTower } from './testing/pipeline';
+import { openPipeline, type Pipeline, type TestTower } from '../testing/pipeline';
 import type { ParsedReading } from '../readings/parse/parsed-readings';
 
 const INTERVAL_S = 300;

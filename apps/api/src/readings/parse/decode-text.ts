@@ -31,7 +31,7 @@ export function decodeText(bytes: Buffer): string {
   try {
     return new TextDecoder('utf-8', { fatal: true }).decode(bytes);
   } catch (error) {
-    if (!(error instanceof TypeError)) throw error;
+    if ((error as NodeJS.ErrnoException).code !== 'ERR_ENCODING_INVALID_ENCODED_DATA') throw error;
     throw new NotTextError('The file is not UTF-8 text; save it as UTF-8 and send it again.');
   }
 }

@@ -3,20 +3,20 @@ import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { Global, Module } from '@nestjs/common';
 import { Test, type TestingModule } from '@nestjs/testing';
-import { Clock, SetClock } from '../../common/clock';
-import { Settings } from '../../config/settings';
-import { DatabaseModule } from '../../database/database.module';
-import { DirtyStages } from '../../database/dirty';
-import { Sql } from '../../database/sql';
-import { Hours } from '../hours';
-import { ProfileStore } from '../profile-store';
-import { ProfilesStage } from '../profiles.stage';
-import { ReadingWindows } from '../../screening/reading-windows';
-import { ScreeningStage } from '../../screening/screening.stage';
-import { ScreeningStore } from '../../screening/screening-store';
-import { TowerLayouts } from '../../towers/tower-layouts';
-import { ReadingsService } from '../../readings/readings.service';
-import { ReadingsStore } from '../../readings/readings-store';
+import { Clock, SetClock } from '../common/clock';
+import { Settings } from '../config/settings';
+import { DatabaseModule } from '../database/database.module';
+import { DirtyStages } from '../database/dirty';
+import { Sql } from '../database/sql';
+import { Hours } from '../profiles/hours';
+import { ProfileStore } from '../profiles/profile-store';
+import { ProfilesStage } from '../profiles/profiles.stage';
+import { ReadingWindows } from '../screening/reading-windows';
+import { ScreeningStage } from '../screening/screening.stage';
+import { ScreeningStore } from '../screening/screening-store';
+import { TowerLayouts } from '../towers/tower-layouts';
+import { ReadingsService } from '../readings/readings.service';
+import { ReadingsStore } from '../readings/readings-store';
 
 /** The way of a reading on a store of its own, without the rest of the house. */
 export interface Pipeline {
