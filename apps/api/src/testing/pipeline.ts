@@ -8,6 +8,7 @@ import { Settings } from '../config/settings';
 import { DatabaseModule } from '../database/database.module';
 import { DirtyStages } from '../database/dirty';
 import { Sql } from '../database/sql';
+import { UnitOfWork } from '../database/unit-of-work';
 import { Hours } from '../profiles/hours';
 import { ProfileStore } from '../profiles/profile-store';
 import { ProfilesStage } from '../profiles/profiles.stage';
@@ -24,6 +25,7 @@ export interface Pipeline {
   readonly clock: SetClock;
   readonly readings: ReadingsService;
   readonly dirty: DirtyStages;
+  readonly work: UnitOfWork;
   /** Makes a tower with these sensors and gives their ids. */
   makeTower(tower: TestTower): Promise<{ towerId: number; sensorIds: number[] }>;
   close(): Promise<void>;
@@ -94,6 +96,7 @@ export async function openPipeline(nowS: number): Promise<Pipeline> {
     ...{ sql, clock },
     readings: module.get(ReadingsService),
     dirty: module.get(DirtyStages),
+    work: module.get(UnitOfWork),
     makeTower: (tower) => makeTower(sql, tower),
     close: async () => {
       await module.close();
