@@ -1,0 +1,110 @@
+import { appendFileSync, mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import path from 'node:path';
+import { SourcesService } from '../../towers/sources.service';
+import { signInAs } from '../../testing/people';
+import { makeTower } from '../../testing/places';
+import { createTestApp, testNow, type TestApp } from '../../testing/test-app';
+import { ReadingsCollector } from './readings-collector';
+
+const line = (minutesAgo: number, ...cells: (number | string)[]): string =>
+  [new Date((testNow - minutesAgo * 60) * 1000).toISOString(), ...cells].join(',');
+const HEADER = 'time,temperature_2m,temperature_10m\n';
+
+describe("the collector of loggers' files", () => {
+  let test: TestApp;
+  let loggerDir: string;
+  let towerId: number;
+  let folder: string;
+
+  beforeAll(async () => {
+    loggerDir = mkdtempSync(path.join(tmpdir(), 'lidwatch-loggers-'));
+    test = await createTestApp({ settings: { loggerDir } });
+  });
+  afterAll(async () => {
+    await test.close();
+    rmSync(loggerDir, { recursive: true });
+  });
+  beforeEach(async () => {
+    ({ towerId } = await makeTower(test, { heightsM: [2, 10] }));
+    folder = path.join(loggerDir, `mast-${towerId}`);
+    mkdirSync(folder);
+    const admin = await signInAs(test, 'administrator');
+    const source = { kind: 'folder', path: `mast-${towerId}`, mapping: { missing: ['NaN'] } };
+    await admin.http.post(`/api/towers/${towerId}/sources`).send(source).expect(201);
+  });
+
+  const collect = async (): Promise<void> => {
+    test.clock.advance(60);
+    await test.app.get(ReadingsCollector).collect();
+  };
+  const readings = () =>
+    test.sql.all(
+      'SELECT value FROM reading r JOIN sensor s ON s.id = r.sensor_id WHERE tower_id = $1 ORDER BY value',
+      [towerId],
+    );
+  const source = async () => (await test.app.get(SourcesService).list(towerId))[0]!;
+
+  it('reads on where it was, leaves half lines, and takes nothing twice', async () => {
+    const file = path.join(folder, 'january.csv');
+    writeFileSync(file, `${HEADER}${line(60, -9.5, -7.7)}\n${line(50, -9.6, 'NaN')}\n${line(40, -9.7)}`);
+    await collect();
+    expect(await readings()).toEqual([{ value: -9.6 }, { value: -9.5 }, { value: -7.7 }]);
+    expect((await source()).lastResult).toBe('3 readings read, 0 rows refused, 1 unfinished line waits.');
+    appendFileSync(file, ',-7.9\n');
+    await collect();
+    await collect();
+    expect((await readings()).length).toBe(5);
+    const imports = await test.sql.all(
+      'SELECT origin, name, new_count, refused_count FROM import WHERE tower_id = $1',
+      [towerId],
+    );
+    expect(imports).toEqual([
+      { origin: 'folder', name: 'january.csv', new_count: 3, refused_count: 0 },
+      { origin: 'folder', name: 'january.csv', new_count: 2, refused_count: 0 },
+    ]);
+  });
+
+  it('reads a file that was replaced anew, without taking readings twice', async () => {
+    const file = path.join(folder, 'mast.csv');
+    writeFileSync(file, `${HEADER}${line(60, -9.5, -7.7)}\n${line(50, -9.6, -7.8)}\n`);
+    await collect();
+    writeFileSync(file, `${HEADER}${line(60, -9.5, -7.7)}\n`);
+    await collect();
+    expect((await readings()).length).toBe(4);
+    appendFileSync(file, `${line(30, 'broken', -7.6)}\n`);
+    await collect();
+    const refused = await test.sql.all(
+      'SELECT row_no, col, code FROM refused_row r JOIN import i ON i.id = r.import_id WHERE tower_id = $1',
+      [towerId],
+    );
+    expect(refused).toEqual([{ row_no: 3, col: 'temperature_2m', code: 'value-not-a-number' }]);
+  });
+
+  it('says why a source fails, and waits longer each time', async () => {
+    rmSync(folder, { recursive: true });
+    await collect();
+    const first = await source();
+    expect(first.lastResult).toMatch(/is not there\. Look whether the logger's folder is connected/);
+    expect(first.failures).toBe(1);
+    const wait = ({ nextAt, lastAt }: { nextAt: string | null; lastAt: string | null }): number =>
+      (Date.parse(nextAt!) - Date.parse(lastAt!)) / 1000;
+    expect(wait(first)).toBe(120);
+    test.clock.advance(120);
+    await collect();
+    expect(wait(await source())).toBe(240);
+    mkdirSync(folder);
+    writeFileSync(path.join(folder, 'mast.csv'), `${HEADER}${line(60, -9.5, -7.7)}\n`);
+    test.clock.advance(240);
+    await collect();
+    expect(await source()).toMatchObject({ failures: 0, lastResult: '2 readings read, 0 rows refused.' });
+  });
+
+  it('goes on with the other files when one cannot be read', async () => {
+    writeFileSync(path.join(folder, 'a.csv'), 'when,what\n1,2\n');
+    writeFileSync(path.join(folder, 'b.csv'), `${HEADER}${line(60, -9.5, -7.7)}\n`);
+    await collect();
+    expect((await readings()).length).toBe(2);
+    expect((await source()).lastResult).toMatch(/^a\.csv: The header has no column "time"/);
+  });
+});
