@@ -7,6 +7,7 @@ import { Settings } from './config/settings';
 import { serveApiDescription } from './http/api-description';
 import { limitBodies } from './http/body-limits';
 import { securityHeaders } from './http/security-headers';
+import { PublicPages } from './public-status/public-pages';
 
 /** Everything between the socket and the routes, the same for the service and its tests. Call it before `init`. */
 export function configureApp(app: NestExpressApplication): void {
@@ -16,6 +17,7 @@ export function configureApp(app: NestExpressApplication): void {
   app.setGlobalPrefix('api', { exclude: ['health/{*path}', 'feeds/{*path}'] });
   app.use(securityHeaders(settings.publicUrl));
   app.use(compression());
+  app.use(app.get(PublicPages).handle);
   limitBodies(app);
   for (const step of app.get(SessionService).middleware()) app.use(step);
   app.useGlobalPipes(validationPipe());

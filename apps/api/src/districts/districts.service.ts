@@ -1,4 +1,5 @@
 import { Injectable } from '@nestjs/common';
+import { EventEmitter2 } from '@nestjs/event-emitter';
 import { InjectModel } from '@nestjs/sequelize';
 import { ActivityService } from '../activity/activity.service';
 import type { SignedIn } from '../auth/signed-in';
@@ -24,6 +25,7 @@ export class DistrictsService {
     private readonly work: UnitOfWork,
     private readonly clock: Clock,
     private readonly activity: ActivityService,
+    private readonly events: EventEmitter2,
   ) {}
 
   /** Every district, by name. */
@@ -123,6 +125,7 @@ export class DistrictsService {
   }
 
   private record(act: string, districtId: number, by: SignedIn, body: object): Promise<void> {
+    this.work.afterCommit(() => this.events.emit('district.changed', { districtId }));
     return this.activity.record({ actor: by, act, subject: `district ${districtId}`, districtId, body });
   }
 }

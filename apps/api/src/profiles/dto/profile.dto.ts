@@ -40,7 +40,8 @@ export class SurfaceInversionDto {
   @ApiProperty(number) sigmaC!: number | null;
   @ApiProperty({ ...number, description: 'P(strength > 0)' }) probability!: number | null;
   @ApiProperty() gradientCPer100m!: number;
-  @ApiProperty({ enum: ['no', 'at the top', 'cut by a missing level'] }) open!: string;
+  @ApiProperty({ enum: ['no', 'at the top', 'cut by a missing level'] }) open!:
+    'no' | 'at the top' | 'cut by a missing level';
   @ApiProperty({ description: 'A missing level lies just below' }) baseAtOrBelow!: boolean;
   @ApiProperty() sure!: boolean;
   @ApiProperty({ enum: ['plain', 'sensor-aware'] }) form!: string;
@@ -65,7 +66,7 @@ export class ProfileDto {
   @ApiProperty({ type: [ProfileLevelDto] }) levels!: ProfileLevelDto[];
   @ApiProperty({ type: [ProfileLayerDto], description: 'Between each two neighbouring levels the tower has' })
   layers!: ProfileLayerDto[];
-  @ApiProperty({ enum: ['present', 'absent', 'not known'] }) surface!: string;
+  @ApiProperty({ enum: ['present', 'absent', 'not known'] }) surface!: 'present' | 'absent' | 'not known';
   @ApiPropertyOptional({ description: 'Why the surface finding is not known' }) reason?: string;
   @ApiProperty({ type: SurfaceInversionDto, nullable: true }) inversion!: SurfaceInversionDto | null;
   @ApiProperty({ type: [ElevatedInversionDto] }) elevated!: ElevatedInversionDto[];
