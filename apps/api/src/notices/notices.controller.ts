@@ -1,5 +1,5 @@
 import { Body, Controller, Get, HttpCode, Param, ParseIntPipe, Post, Query } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { ApiCreatedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { CurrentUser, Roles } from '../auth/decorators';
 import type { SignedIn } from '../auth/signed-in';
 import { OutboxPage } from '../outbox/dto/outbox-row.dto';
@@ -20,6 +20,7 @@ export class NoticesController {
 
   /** Lists notices, newest first. */
   @Get()
+  @ApiOkResponse({ type: NoticePage })
   @Roles('administrator', 'analyst', 'officer')
   page(@Query() query: NoticeQuery): Promise<NoticePage> {
     return this.log.page(query);
@@ -27,6 +28,7 @@ export class NoticesController {
 
   /** Shows a notice exactly as it would go out. */
   @Post('preview')
+  @ApiOkResponse({ type: NoticePreview })
   @HttpCode(200)
   @Roles('officer')
   preview(@Body() draft: NoticeDraft, @CurrentUser() by: SignedIn): Promise<NoticePreview> {
@@ -35,6 +37,7 @@ export class NoticesController {
 
   /** Issues a notice without a proposal, in one's own district. */
   @Post()
+  @ApiCreatedResponse({ type: NoticeDetail })
   @Roles('officer')
   issue(@Body() notice: NoticeByHand, @CurrentUser() by: SignedIn): Promise<NoticeDetail> {
     return this.desk.issue(notice, by);
@@ -42,6 +45,7 @@ export class NoticesController {
 
   /** Shows one notice with its texts, events and delivery. */
   @Get(':id')
+  @ApiOkResponse({ type: NoticeDetail })
   @Roles('administrator', 'analyst', 'officer')
   detail(@Param('id', ParseIntPipe) id: number): Promise<NoticeDetail> {
     return this.log.detail(id);
@@ -49,6 +53,7 @@ export class NoticesController {
 
   /** Lists a notice's messages with masked addresses. */
   @Get(':id/deliveries')
+  @ApiOkResponse({ type: OutboxPage })
   @Roles('administrator', 'analyst', 'officer')
   deliveries(
     @Param('id', ParseIntPipe) id: number,
@@ -60,6 +65,7 @@ export class NoticesController {
 
   /** Shows the message that would tell subscribers of the end. */
   @Post(':id/end-preview')
+  @ApiOkResponse({ type: NoticePreview })
   @HttpCode(200)
   @Roles('officer')
   previewEnd(@Param('id', ParseIntPipe) id: number, @CurrentUser() by: SignedIn): Promise<NoticePreview> {
@@ -68,6 +74,7 @@ export class NoticesController {
 
   /** Ends a notice before its written end. */
   @Post(':id/end')
+  @ApiOkResponse({ type: NoticeDetail })
   @HttpCode(200)
   @Roles('officer')
   end(

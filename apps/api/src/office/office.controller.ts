@@ -1,5 +1,5 @@
 import { Body, Controller, Get, Put } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { CurrentUser, Roles } from '../auth/decorators';
 import type { SignedIn } from '../auth/signed-in';
 import { OfficeDto } from './dto/office.dto';
@@ -13,6 +13,7 @@ export class OfficeController {
 
   /** Shows the office. */
   @Get()
+  @ApiOkResponse({ type: OfficeDto })
   @Roles('administrator', 'analyst', 'officer')
   get(): Promise<OfficeDto> {
     return this.office.get();
@@ -20,6 +21,7 @@ export class OfficeController {
 
   /** Changes the office. */
   @Put()
+  @ApiOkResponse({ type: OfficeDto })
   @Roles('administrator')
   set(@Body() office: OfficeDto, @CurrentUser() by: SignedIn): Promise<OfficeDto> {
     return this.office.set(office, by);

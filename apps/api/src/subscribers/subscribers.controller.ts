@@ -1,5 +1,5 @@
 import { Controller, Get } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { Roles } from '../auth/decorators';
 import { SubscriberCountsService } from './counts.service';
 import { SubscriberCount } from './dto/subscriber-count.dto';
@@ -12,6 +12,7 @@ export class SubscribersController {
 
   /** Counts subscribers for each district and kind of notice. */
   @Get('counts')
+  @ApiOkResponse({ type: [SubscriberCount] })
   @Roles('administrator', 'analyst', 'officer')
   list(): Promise<SubscriberCount[]> {
     return this.counts.list();
