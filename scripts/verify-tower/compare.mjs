@@ -9,9 +9,9 @@ const rangeNumber = (range) => range?.exactly ?? range?.atLeast;
 const isBlank = (cell) => cell === undefined || cell === '' || /^(nan|null)$/i.test(cell);
 const equal = (found, wanted) => found === wanted;
 const within = (limit) => (found, wanted) => typeof found === 'number' && Math.abs(found - wanted) <= limit;
-const likeLapseRates = (found, wanted) =>
-  typeof found === 'number' &&
-  Math.abs(found - wanted) <= Math.max(LAPSE_RATE_K_PER_KM, OF_ITS_SIZE * Math.abs(wanted));
+/** Absurd values make absurd differences: beyond some size the limit is a share of it. */
+const withinOrOfItsSize = (limit) => (found, wanted) =>
+  typeof found === 'number' && Math.abs(found - wanted) <= Math.max(limit, OF_ITS_SIZE * Math.abs(wanted));
 
 const lowestInverted = ({ surface }) => ({ present: 1, absent: 0 })[surface];
 
@@ -22,7 +22,7 @@ const FINDINGS = [
   {
     column: 'sbi_strength_K',
     found: (profile) => rangeNumber(profile.inversion?.strengthC),
-    agree: within(STRENGTH_C),
+    agree: withinOrOfItsSize(STRENGTH_C),
   },
   {
     column: 'sbi_cut_by_gap',
@@ -43,7 +43,7 @@ const layersIn = (truth, levels) =>
     const found = (profile) =>
       profile.layers.find(({ lowerM, upperM }) => lowerM === lower.heightM && upperM === upper.heightM)
         ?.lapseRateKPerKm ?? undefined;
-    return [{ column, found, agree: likeLapseRates, isLapseRate: true }];
+    return [{ column, found, agree: withinOrOfItsSize(LAPSE_RATE_K_PER_KM), isLapseRate: true }];
   });
 
 /** Whether a stamp of the truth can be compared: it stands once in the file and is alone in its block. */
