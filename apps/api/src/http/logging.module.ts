@@ -1,11 +1,12 @@
 import { Module } from '@nestjs/common';
+import type { Request } from 'express';
 import { LoggerModule } from 'nestjs-pino';
 import type { IncomingMessage, ServerResponse } from 'node:http';
 import type { LogFn, Logger } from 'pino';
 import { Settings } from '../config/settings';
 
-/** Addresses whose requests are not logged: asked every few seconds, or plain files. */
-const quiet = /^\/(health|assets|favicon)/;
+/** Addresses whose requests are not logged, for they are asked every few seconds. */
+const quiet = /^\/health\//;
 
 const assembly = new Set([
   'InstanceLoader',
@@ -30,7 +31,7 @@ const assembly = new Set([
           customSuccessMessage: ({ method }, { statusCode }, ms: number) =>
             `${method} ${statusCode} in ${ms} ms`,
           customErrorMessage: ({ method }, { statusCode }) => `${method} ${statusCode}`,
-          autoLogging: { ignore: ({ url = '' }: IncomingMessage) => quiet.test(url) },
+          autoLogging: { ignore: (request) => quiet.test((request as Request).originalUrl) },
           serializers: {
             req: requestFacts,
             res: ({ statusCode }: { statusCode: number }) => ({ statusCode }),
