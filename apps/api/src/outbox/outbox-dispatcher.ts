@@ -112,8 +112,10 @@ export class OutboxDispatcher implements OnModuleInit, BeforeApplicationShutdown
     const writeNow = (): Promise<void> =>
       write().catch((error: unknown) => this.logger.error(error, 'Results are written again shortly'));
     const one = async (): Promise<void> => {
-      for (let message = waiting.shift(); message; message = waiting.shift())
-        results.push({ message, outcome: await this.attempt(sending, message) });
+      for (let message = waiting.shift(); message; message = waiting.shift()) {
+        const outcome = await this.attempt(sending, message);
+        results.push({ message, outcome });
+      }
     };
     let writing = Promise.resolve();
     const timer = setInterval(() => (writing = writing.then(writeNow)), WRITE_EVERY_MS);
