@@ -6,6 +6,8 @@ import { CommonModule } from './common/common.module';
 import { ConfigModule } from './config/config.module';
 import { DatabaseModule } from './database/database.module';
 import { DeliveryModule } from './delivery/delivery.module';
+import { DemoModule } from './demo/demo.module';
+import { DeskModule } from './desk/desk.module';
 import { DistrictsModule } from './districts/districts.module';
 import { HealthModule } from './health/health.module';
 import { LoggingModule } from './http/logging.module';
@@ -14,6 +16,8 @@ import { NoticesModule } from './notices/notices.module';
 import { OfficeModule } from './office/office.module';
 import { OutboxModule } from './outbox/outbox.module';
 import { ProfilesModule } from './profiles/profiles.module';
+import { ProposalsModule } from './proposals/proposals.module';
+import { PublicStatusModule } from './public-status/public-status.module';
 import { ReadingsModule } from './readings/readings.module';
 import { RulesModule } from './rules/rules.module';
 import { SchedulerModule } from './scheduler/scheduler.module';
@@ -44,7 +48,11 @@ import { UsersModule } from './users/users.module';
     OutboxModule,
     SubscribersModule,
     NoticesModule,
+    ProposalsModule,
+    DeskModule,
     DeliveryModule,
+    DemoModule,
+    PublicStatusModule,
     HealthModule,
     WebFilesModule,
   ],

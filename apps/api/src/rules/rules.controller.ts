@@ -1,5 +1,5 @@
-import { Body, Controller, Get, Param, ParseIntPipe, Post } from '@nestjs/common';
-import { ApiTags } from '@nestjs/swagger';
+import { Body, Controller, Get, HttpCode, Param, ParseIntPipe, Post } from '@nestjs/common';
+import { ApiCreatedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { CurrentUser, Roles } from '../auth/decorators';
 import type { SignedIn } from '../auth/signed-in';
 import { MeasureDto, showMeasures } from './dto/measure.dto';
@@ -16,6 +16,7 @@ export class RulesController {
   /** Lists everything a rule may ask about. */
   @Get('rules/measures')
   @Roles('administrator', 'analyst', 'officer')
+  @ApiOkResponse({ type: [MeasureDto] })
   measures(): MeasureDto[] {
     return showMeasures();
   }
@@ -23,6 +24,7 @@ export class RulesController {
   /** Lists the versions of a district's rule, newest first. */
   @Get('districts/:id/rules')
   @Roles('administrator', 'analyst', 'officer')
+  @ApiOkResponse({ type: [RuleDto] })
   list(@Param('id', ParseIntPipe) districtId: number): Promise<RuleDto[]> {
     return this.rules.list(districtId);
   }
@@ -30,6 +32,7 @@ export class RulesController {
   /** Keeps a draft of a district's rule. */
   @Post('districts/:id/rules')
   @Roles('analyst')
+  @ApiCreatedResponse({ type: RuleDto })
   draft(
     @Param('id', ParseIntPipe) districtId: number,
     @Body() input: RuleInput,
@@ -41,6 +44,8 @@ export class RulesController {
   /** Puts a draft in force. */
   @Post('rules/:id/put-in-force')
   @Roles('analyst')
+  @HttpCode(200)
+  @ApiOkResponse({ type: RuleDto })
   putInForce(@Param('id', ParseIntPipe) id: number, @CurrentUser() by: SignedIn): Promise<RuleDto> {
     return this.rules.putInForce(id, by);
   }

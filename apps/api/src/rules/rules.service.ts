@@ -50,6 +50,13 @@ export class RulesService {
     return { id, districtId, version, sha256, body: JSON.parse(rule.body) as RuleDefinition };
   }
 
+  /** The definition of one version; 404 without it. */
+  async body(id: number): Promise<RuleDefinition> {
+    const rule = await this.rules.findByPk(id);
+    if (!rule) throw new Problem('not-found', `There is no rule ${id}.`);
+    return JSON.parse(rule.body) as RuleDefinition;
+  }
+
   /** Keeps a draft; 422 `rule-not-valid` with each fault by its path. */
   async draft(districtId: number, input: RuleInput, by: SignedIn): Promise<RuleDto> {
     const validation = validateRule(input.body);

@@ -13,7 +13,7 @@ describe('district findings', () => {
   async function night(valley: Valley, tower: number, strengths: readonly (number | null)[]): Promise<void> {
     for (const [i, strength] of strengths.entries()) {
       const t = testNow - (strengths.length - 1 - i) * BLOCK_S;
-      if (strength !== null) await valley.give(tower, t, inversion(strength));
+      if (strength !== null) await valley.give(tower, t, inversion(strength, t));
     }
     await valley.settle();
   }
@@ -81,7 +81,8 @@ describe('district findings', () => {
     for (const i of [8, 2, 5, 0, 3, 6, 1, 4]) {
       const strength = strengths[i];
       if (typeof strength !== 'number') continue;
-      await shuffled.give(0, testNow - (strengths.length - 1 - i) * BLOCK_S, inversion(strength));
+      const t = testNow - (strengths.length - 1 - i) * BLOCK_S;
+      await shuffled.give(0, t, inversion(strength, t));
       await shuffled.settle();
     }
     const rows = (id: number) =>

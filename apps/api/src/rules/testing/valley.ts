@@ -16,9 +16,16 @@ export interface Valley {
   settle(): Promise<void>;
 }
 
-/** Temperatures of an inversion of some strength, °C: three quarters of it below 30 m. */
-export const inversion = (strengthC: number): number[] =>
-  [0, 0.4, 0.75, 1].map((share) => -8 + share * strengthC);
+/**
+ * Temperatures of an inversion of some strength at 2, 10, 30 and 60 m, °C. From 2 °C it reaches the top of the tower;
+ * a weaker one ends at 30 m, so that its strength is a number. The whole cools with time, as a sensor that stood still
+ * would not be believed.
+ */
+export function inversion(strengthC: number, tEnd: number): number[] {
+  const groundC = -8 - 0.05 * ((tEnd / BLOCK_S) % 97);
+  const shares = strengthC >= 2 ? [0, 0.4, 0.75, 1] : [0, 0.6, 1, 0.4];
+  return shares.map((share) => groundC + share * strengthC);
+}
 
 /** Makes a district with as many towers as asked, in this order, with what is given for each link. */
 export async function makeValley(
