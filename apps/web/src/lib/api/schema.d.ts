@@ -1,5 +1,21 @@
 /** Written by `npm run openapi` from the API's description; change the API, not this file. */
 export interface paths {
+  '/api/activity': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Activity.page'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/auth/sign-in': {
     parameters: {
       query?: never;
@@ -352,6 +368,38 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/overrides': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Overrides.list'];
+    put?: never;
+    post: operations['Overrides.set'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/overrides/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete: operations['Overrides.undo'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/towers/{id}/profile': {
     parameters: {
       query?: never;
@@ -448,6 +496,374 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/office': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Office.get'];
+    put: operations['Office.set'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/subscribers/counts': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Subscribers.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/public/subscriptions': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Subscriptions.subscribe'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/public/subscriptions/confirm': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Subscriptions.confirm'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/public/subscriptions/{token}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Subscriptions.view'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Subscriptions.change'];
+    trace?: never;
+  };
+  '/api/public/subscriptions/{token}/leave': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Subscriptions.leave'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/notices': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Notices.page'];
+    put?: never;
+    post: operations['Notices.issue'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/notices/preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Notices.preview'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/notices/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Notices.detail'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/notices/{id}/deliveries': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Notices.deliveries'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/notices/{id}/end-preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Notices.previewEnd'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/notices/{id}/end': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Notices.end'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/proposals': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Proposals.page'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/proposals/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Proposals.detail'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/proposals/{id}/confirm': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Proposals.confirm'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/proposals/{id}/decline': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Proposals.decline'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/proposals/{id}/return': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Proposals.return'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/proposals/{id}/preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Proposals.preview'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/proposals/{id}/issue': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Proposals.issue'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/desk': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Desk.now'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/districts/{id}/history': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Desk.past'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/public/status': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['PublicStatus.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/public/districts/{slug}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['PublicStatus.get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/health/live': {
     parameters: {
       query?: never;
@@ -484,11 +900,49 @@ export interface paths {
 export type webhooks = Record<string, never>;
 export interface components {
   schemas: {
+    ActivityEntry: {
+      seq: number;
+      /** Format: date-time */
+      at: string;
+      /** @description A person's name, or `service`. */
+      actor: string;
+      act: string;
+      subject: string;
+      districtId: number | null;
+      /** @description Links the entry to the one before it. */
+      hash: string;
+    };
+    ActivityPage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['ActivityEntry'][];
+    };
     SignIn: {
       /** Format: email */
       email: string;
       /** Format: password */
       password: string;
+    };
+    MyDistrict: {
+      id: number;
+      slug: string;
+      name: string;
+    };
+    Me: {
+      id: number;
+      name: string;
+      email: string;
+      /** @enum {string} */
+      role: 'administrator' | 'analyst' | 'officer';
+      /** @description An officer's own districts; every district for the others. */
+      districts: components['schemas']['MyDistrict'][];
+    };
+    LinkView: {
+      /** @enum {string} */
+      purpose: 'first-administrator' | 'invitation' | 'password';
+      email?: string;
+      name?: string;
     };
     FirstAdministrator: {
       token: string;
@@ -503,6 +957,27 @@ export interface components {
       /** Format: password */
       password: string;
     };
+    UserView: {
+      id: number;
+      email: string;
+      name: string;
+      /** @enum {string} */
+      role: 'administrator' | 'analyst' | 'officer';
+      /** @enum {string} */
+      state: 'invited' | 'active' | 'retired';
+      /** @description The districts an officer acts in. */
+      districtIds: number[];
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      retiredAt?: string;
+    };
+    UserPage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['UserView'][];
+    };
     InviteUser: {
       /** Format: email */
       email: string;
@@ -511,11 +986,77 @@ export interface components {
       role: 'administrator' | 'analyst' | 'officer';
       districtIds?: number[];
     };
+    InvitedUser: {
+      user: components['schemas']['UserView'];
+      /** @description Works once, for seven days. Hand it to this person only. */
+      invitationUrl: string;
+    };
     ChangeUser: {
       name?: string;
       /** @enum {string} */
       role?: 'administrator' | 'analyst' | 'officer';
       districtIds?: number[];
+    };
+    PasswordLink: {
+      /** @description Works once, for a day. Hand it to this person only. */
+      url: string;
+    };
+    SensorVersion: {
+      /** @description null: from the beginning */
+      from: string | null;
+      heightM: number;
+      /** @description One standard deviation, in the unit */
+      sigma: number;
+      pairSigma: number | null;
+      offset: number;
+      gain: number;
+      note: string;
+    };
+    Sensor: {
+      id: number;
+      towerId: number;
+      /** @description The column name of the sensor's readings */
+      name: string;
+      /** @enum {string} */
+      quantity:
+        | 'air temperature'
+        | 'relative humidity'
+        | 'dew point'
+        | 'wet bulb'
+        | 'wind speed'
+        | 'wind direction'
+        | 'station pressure'
+        | 'pm2.5';
+      unit: string;
+      heightM: number;
+      sigma: number;
+      pairSigma: number | null;
+      offset: number;
+      gain: number;
+      retired: boolean;
+      versions: components['schemas']['SensorVersion'][];
+    };
+    Tower: {
+      id: number;
+      slug: string;
+      name: string;
+      elevationM: number;
+      latitude: number;
+      longitude: number;
+      intervalMinutes: number;
+      blockMinutes: number;
+      staleLimitMinutes: number | null;
+      clock: string;
+      /** @enum {string} */
+      stamp: 'instant' | 'start' | 'middle' | 'end';
+      /** @enum {string} */
+      screening: 'full' | 'report-only';
+      /** @enum {string} */
+      inversionForm: 'plain' | 'sensor-aware';
+      embedDepthM: number;
+      retired: boolean;
+      sensors: components['schemas']['Sensor'][];
+      version: number;
     };
     TowerInput: {
       slug?: string;
@@ -694,6 +1235,21 @@ export interface components {
        */
       stamp?: 'instant' | 'start' | 'middle' | 'end';
     };
+    Source: {
+      id: number;
+      towerId: number;
+      /** @enum {string} */
+      kind: 'folder' | 'push';
+      path: string | null;
+      mapping: components['schemas']['Mapping'];
+      intervalSeconds: number;
+      lastAt: string | null;
+      /** @description What the last collection gave, or why it failed */
+      lastResult: string | null;
+      /** @description Failures in a row */
+      failures: number;
+      nextAt: string | null;
+    };
     SourceInput: {
       /** @enum {string} */
       kind: 'folder' | 'push';
@@ -703,9 +1259,49 @@ export interface components {
       /** @default 60 */
       intervalSeconds: number;
     };
+    IngestKey: {
+      id: number;
+      name: string;
+      createdAt: string;
+      lastUsedAt: string | null;
+      revokedAt: string | null;
+    };
     KeyInput: {
       /** @example mast logger */
       name: string;
+    };
+    KeyMade: {
+      id: number;
+      /** @description Keep it now: it is never shown again */
+      key: string;
+    };
+    DistrictTower: {
+      towerId: number;
+      /** @description Whether what this tower shows may begin a finding */
+      mayBegin: boolean;
+      /** @description Whether what this tower shows may end a finding */
+      mayEnd: boolean;
+    };
+    District: {
+      id: number;
+      slug: string;
+      name: string;
+      /** @example America/Denver */
+      timeZone: string;
+      latitude: number;
+      longitude: number;
+      elevationM: number | null;
+      population: number | null;
+      areaText: string;
+      ordinanceRef: string;
+      contactPhone: string;
+      /** @enum {string} */
+      combine: 'first-fresh' | 'any' | 'all' | 'median';
+      towers: components['schemas']['DistrictTower'][];
+      floorTowerId: number | null;
+      benchTowerId: number | null;
+      pm25TowerId: number | null;
+      version: number;
     };
     DistrictTowerInput: {
       towerId: number;
@@ -764,6 +1360,222 @@ export interface components {
       /** @description The version that was read */
       version: number;
     };
+    RefusedRowShown: {
+      /** @description The header is row 1; in JSON the place in the list, from 1 */
+      row: number;
+      column: string | null;
+      code: string;
+      /** @description Names the row, the column and the cure */
+      text: string;
+    };
+    IngestResult: {
+      importId: number;
+      new: number;
+      /** @description Known already; nothing changed */
+      repeated: number;
+      /** @description Took the place of another value */
+      corrected: number;
+      refused: number;
+      /** @description The first 100 */
+      refusedRows: components['schemas']['RefusedRowShown'][];
+      /** @description Columns that no sensor of the tower has */
+      ignoredColumns: string[];
+    };
+    Import: {
+      id: number;
+      towerId: number;
+      /** @enum {string} */
+      origin: 'folder' | 'push' | 'demo';
+      name: string;
+      receivedAt: string;
+      new: number;
+      repeated: number;
+      corrected: number;
+      refused: number;
+    };
+    ImportPage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['Import'][];
+    };
+    RefusedRow: {
+      /** @description The header is row 1; in JSON the place in the list, from 1 */
+      row: number;
+      column: string | null;
+      code: string;
+      /** @description Names the row, the column and the cure */
+      text: string;
+      raw: string;
+    };
+    RefusedRowPage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['RefusedRow'][];
+    };
+    Override: {
+      id: number;
+      sensorId: number;
+      sensorName: string;
+      from: string;
+      to: string;
+      /** @enum {string} */
+      quality: 'valid' | 'failed';
+      reason: string;
+      by: string;
+      at: string;
+      undoneBy: string | null;
+      undoneAt: string | null;
+    };
+    OverrideInput: {
+      sensorId: number;
+      /** @description End of the first reading of the span */
+      from: string;
+      /** @description End of the last reading of the span */
+      to: string;
+      /** @enum {string} */
+      quality: 'valid' | 'failed';
+      /** @description Why; it is kept with your name */
+      reason: string;
+    };
+    ProfileLevel: {
+      heightM: number;
+      temperatureC: number | null;
+      sigmaC: number;
+      /** @description Readings in the mean */
+      n: number;
+      /** @enum {string} */
+      quality: 'valid' | 'suspect' | 'failed' | 'missing';
+    };
+    ProfileLayer: {
+      lowerM: number;
+      upperM: number;
+      /** @description −dT/dz: positive where it cools upward */
+      lapseRateKPerKm: number | null;
+      sigmaKPerKm: number | null;
+      textbookClass: string | null;
+      probabilityTRises: number | null;
+      /** @description Moist-adiabatic rate at its temperature and pressure */
+      moistLapseRateKPerKm: number | null;
+      superadiabatic: boolean | null;
+      autoconvective: boolean | null;
+    };
+    RangeValue: {
+      exactly?: number;
+      atLeast?: number;
+      atMost?: number;
+      between?: number[];
+      /** @description The reason, in plain words */
+      notKnown?: string;
+    };
+    SurfaceInversion: {
+      baseM: number;
+      /** @description The lowest level at which its top can lie */
+      topM: number;
+      depthM: components['schemas']['RangeValue'];
+      strengthC: components['schemas']['RangeValue'];
+      strengthWithinTowerC: number;
+      sigmaC: number | null;
+      /** @description P(strength > 0) */
+      probability: number | null;
+      gradientCPer100m: number;
+      /** @enum {string} */
+      open: 'no' | 'at the top' | 'cut by a missing level';
+      /** @description A missing level lies just below */
+      baseAtOrBelow: boolean;
+      sure: boolean;
+      /** @enum {string} */
+      form: 'plain' | 'sensor-aware';
+    };
+    ElevatedInversion: {
+      baseM: number;
+      topM: number;
+      strengthC: components['schemas']['RangeValue'];
+      sure: boolean;
+    };
+    Profile: {
+      towerId: number;
+      /** @description End of the block */
+      tEnd: string;
+      blockMinutes: number;
+      /** @description Counts how often it was worked out anew with another result */
+      rev: number;
+      levels: components['schemas']['ProfileLevel'][];
+      /** @description Between each two neighbouring levels the tower has */
+      layers: components['schemas']['ProfileLayer'][];
+      /** @enum {string} */
+      surface: 'present' | 'absent' | 'not known';
+      /** @description Why the surface finding is not known */
+      reason?: string;
+      inversion: components['schemas']['SurfaceInversion'] | null;
+      elevated: components['schemas']['ElevatedInversion'][];
+      stableDepthM: components['schemas']['RangeValue'];
+      heatDeficitMJPerM2: components['schemas']['RangeValue'];
+      breakUpTemperatureC: components['schemas']['RangeValue'];
+      pressureHpa: number;
+      /** @description The standard atmosphere’s, none being measured */
+      pressureAssumed: boolean;
+      relativeHumidityPct?: number;
+      windSpeedMPerS?: number;
+      windDirectionDeg?: number;
+      /** @description Block mean, µg/m³ */
+      pm25?: number;
+      /** @description Mean of the hour that ends with the block, µg/m³ */
+      pm25Hour?: number;
+    };
+    ProfileSpan: {
+      items: components['schemas']['Profile'][];
+      /** @description Ask again with `from` set to this for what follows */
+      next?: string;
+    };
+    PipelineState: {
+      /** @description Blocks that ended and wait; 0 when everything is worked out */
+      pending: number;
+    };
+    LabelDto: {
+      en: string;
+      es: string;
+    };
+    Measure: {
+      name: string;
+      /** @enum {string} */
+      kind: 'number' | 'yes-no';
+      unit: string;
+      label: components['schemas']['LabelDto'];
+      docs: string;
+      /** @description Comparisons that make sense for it */
+      ops: string[];
+      /** @description The smallest limit a rule may set */
+      least: number;
+      /** @description The largest limit a rule may set */
+      most: number;
+    };
+    RuleInWords: {
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      begin: string[];
+      end: string[];
+    };
+    RuleRow: {
+      id: number;
+      districtId: number;
+      version: number;
+      /** @enum {string} */
+      state: 'draft' | 'in force' | 'past';
+      note: string;
+      body: {
+        [key: string]: unknown;
+      };
+      inWords: components['schemas']['RuleInWords'][];
+      sha256: string;
+      /** Format: date-time */
+      createdAt: string;
+      /** Format: date-time */
+      fromAt?: string;
+      /** Format: date-time */
+      toAt?: string;
+    };
     RuleInput: {
       /** @description advisory, burnBan or both */
       body: {
@@ -771,6 +1583,606 @@ export interface components {
       };
       /** @description Why this version; for the record */
       note?: string;
+    };
+    Office: {
+      /** @example Pellworth Clean Air Office */
+      name: string;
+      /**
+       * @description Where residents may call; empty when nowhere
+       * @example 208 555 0142
+       */
+      phone: string;
+    };
+    SubscriberCount: {
+      districtId: number;
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      people: number;
+      /** @description Confirmed e-mail addresses */
+      emails: number;
+      /** @description Confirmed telephone numbers */
+      texts: number;
+    };
+    SubscriptionRequest: {
+      /** @enum {string} */
+      lang: 'en' | 'es';
+      districtSlugs: string[];
+      kinds: ('advisory' | 'burnBan')[];
+      /** @example ada@pellworth.example */
+      email?: string;
+      /** @example 208 555 0142 */
+      phone?: string;
+    };
+    SubscriptionReceipt: {
+      message: string;
+    };
+    ConfirmRequest: {
+      token: string;
+    };
+    ConfirmedDto: {
+      manageToken: string;
+    };
+    ContactView: {
+      /** @enum {string} */
+      channel: 'email' | 'sms';
+      /** @description Masked */
+      address: string;
+      confirmed: boolean;
+    };
+    SubscriptionView: {
+      /** @enum {string} */
+      lang: 'en' | 'es';
+      districtSlugs: string[];
+      kinds: ('advisory' | 'burnBan')[];
+      contacts: components['schemas']['ContactView'][];
+    };
+    SubscriptionPatch: {
+      /** @enum {string} */
+      lang?: 'en' | 'es';
+      districtSlugs?: string[];
+      kinds?: ('advisory' | 'burnBan')[];
+    };
+    NoticeBrief: {
+      id: number;
+      /** @example MF-26-017 */
+      ref: string;
+      districtId: number;
+      districtName: string;
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** @enum {string} */
+      state: 'in force' | 'ended' | 'replaced';
+      /** Format: date-time */
+      issuedAt: string;
+      /** @description Name of the officer */
+      issuedBy: string;
+      /** Format: date-time */
+      effectiveAt: string;
+      /**
+       * Format: date-time
+       * @description Written end
+       */
+      expiresAt: string;
+      /** Format: date-time */
+      endedAt?: string;
+      /** @description Who ended it; absent when it came to its written end */
+      endedBy?: string;
+      endReason?: string;
+      version: number;
+    };
+    NoticePage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['NoticeBrief'][];
+    };
+    NoticeDraft: {
+      districtId: number;
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** Format: date-time */
+      expiresAt: string;
+      /** @description Why it is issued without a proposal; kept, not sent */
+      reason: string;
+    };
+    StoveText: {
+      /** @enum {string} */
+      kind: 'uncertified' | 'certified' | 'pellet' | 'fireplace' | 'open burning';
+      /** @example certified stove */
+      name: string;
+      text: string;
+    };
+    PublicText: {
+      headline: string;
+      untilText: string;
+      whatToDo: string[];
+      stoves: components['schemas']['StoveText'][];
+      why: string;
+      exemptions: string;
+      cautions: string[];
+    };
+    NoticeText: {
+      subject: string;
+      mailText: string;
+      mailHtml: string;
+      /** @description GSM 7-bit characters only */
+      sms: string;
+      public: components['schemas']['PublicText'];
+    };
+    NoticeTexts: {
+      en: components['schemas']['NoticeText'];
+      es: components['schemas']['NoticeText'];
+    };
+    RecipientCount: {
+      people: number;
+      emails: number;
+      texts: number;
+    };
+    SegmentCount: {
+      en: number;
+      es: number;
+    };
+    NoticePreview: {
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** @enum {string} */
+      act: 'begin' | 'end';
+      districtId: number;
+      ref: string;
+      /** Format: date-time */
+      expiresAt: string;
+      hash: string;
+      texts: components['schemas']['NoticeTexts'];
+      recipients: components['schemas']['RecipientCount'];
+      segments: components['schemas']['SegmentCount'];
+      /** @description Whether issuing or ending asks for the password again */
+      needsPassword: boolean;
+    };
+    NoticeByHand: {
+      districtId: number;
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** Format: date-time */
+      expiresAt: string;
+      /** @description Why it is issued without a proposal; kept, not sent */
+      reason: string;
+      previewHash: string;
+      password?: string;
+      requestKey: string;
+    };
+    NoticeEvidence: {
+      sha256: string;
+      en: string[];
+      es: string[];
+    };
+    NoticeEvent: {
+      seq: number;
+      /** @enum {string} */
+      kind: 'issued' | 'ended' | 'expired' | 'replaced';
+      /** Format: date-time */
+      at: string;
+      /** @description A name, or "the service" */
+      by: string;
+      text: string;
+    };
+    DeliveryCount: {
+      /** @enum {string} */
+      channel: 'email' | 'sms';
+      /** @enum {string} */
+      state: 'queued' | 'sending' | 'accepted' | 'delivered' | 'failed' | 'suppressed' | 'expired';
+      count: number;
+    };
+    NoticeDetail: {
+      id: number;
+      /** @example MF-26-017 */
+      ref: string;
+      districtId: number;
+      districtName: string;
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** @enum {string} */
+      state: 'in force' | 'ended' | 'replaced';
+      /** Format: date-time */
+      issuedAt: string;
+      /** @description Name of the officer */
+      issuedBy: string;
+      /** Format: date-time */
+      effectiveAt: string;
+      /**
+       * Format: date-time
+       * @description Written end
+       */
+      expiresAt: string;
+      /** Format: date-time */
+      endedAt?: string;
+      /** @description Who ended it; absent when it came to its written end */
+      endedBy?: string;
+      endReason?: string;
+      version: number;
+      /** @enum {string} */
+      origin: 'proposal' | 'by hand';
+      reason: string;
+      texts: components['schemas']['NoticeTexts'];
+      evidence?: components['schemas']['NoticeEvidence'];
+      events: components['schemas']['NoticeEvent'][];
+      delivery: components['schemas']['DeliveryCount'][];
+    };
+    Delivery: {
+      id: number;
+      /** @enum {string} */
+      channel: 'email' | 'sms';
+      /** @description Masked */
+      to: string;
+      /** @enum {string} */
+      state: 'queued' | 'sending' | 'accepted' | 'delivered' | 'failed' | 'suppressed' | 'expired';
+      attempts: number;
+      /** Format: date-time */
+      lastAt: string | null;
+      detail: string | null;
+    };
+    DeliveryPage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['Delivery'][];
+    };
+    NoticeEnding: {
+      previewHash: string;
+      /** @description Again, for a burn ban */
+      password?: string;
+      /** @description Chosen by the client, the same for repeats of one click */
+      requestKey: string;
+      version: number;
+      reason: string;
+    };
+    ProposalCard: {
+      id: number;
+      districtId: number;
+      districtName: string;
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** @enum {string} */
+      act: 'begin' | 'end';
+      /** @enum {string} */
+      state: 'open' | 'confirmed' | 'declined' | 'returned' | 'issued' | 'lapsed';
+      /** Format: date-time */
+      openedAt: string;
+      /**
+       * Format: date-time
+       * @description End of the block that was judged
+       */
+      tEnd: string;
+      /** @description What decided, in one line */
+      summary: string;
+      confirmedBy?: string;
+      /** Format: date-time */
+      confirmedAt?: string;
+      /** @description The analyst's sentence for the officer */
+      note?: string;
+      /** @description Why it was declined or returned, or why it lapsed */
+      reason?: string;
+      closedBy?: string;
+      /** Format: date-time */
+      closedAt?: string;
+      noticeId?: number;
+      version: number;
+    };
+    ProposalPage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['ProposalCard'][];
+    };
+    ProposalRule: {
+      id: number;
+      version: number;
+    };
+    HeldFacts: {
+      neededMinutes: number;
+      toleratedMinutes: number;
+      recordMinutes: number;
+      trueMinutes: number;
+      falseMinutes: number;
+      notKnownMinutes: number;
+      /** @enum {string} */
+      recordStartsAfter?: 'change of tower' | 'start of record' | 'nothing on record';
+    };
+    EvaluatedNode: {
+      /** @enum {string} */
+      kind: 'clause' | 'all' | 'any' | 'not';
+      /**
+       * @description What counts, held-for included
+       * @enum {string}
+       */
+      truth: 'true' | 'false' | 'not known';
+      /**
+       * @description What holds at this block
+       * @enum {string}
+       */
+      now: 'true' | 'false' | 'not known';
+      /** @description The condition and what was found, in one sentence */
+      sentence: string;
+      held?: components['schemas']['HeldFacts'];
+      /** @enum {string} */
+      measure?:
+        | 'inversionStrengthC'
+        | 'strengthWithinTowerC'
+        | 'gradientCPer100m'
+        | 'depthM'
+        | 'inversionSure'
+        | 'episodeMinutes'
+        | 'stableDepthM'
+        | 'elevatedLid'
+        | 'elevatedLidBaseM'
+        | 'elevatedLidStrengthC'
+        | 'floorToBenchC'
+        | 'deltaTClass'
+        | 'heatDeficitMJPerM2'
+        | 'mixingHeightM'
+        | 'ventilationIndexM2PerS'
+        | 'surfaceTemperatureC'
+        | 'relativeHumidityPct'
+        | 'windSpeedMPerS'
+        | 'pm25Hour'
+        | 'pm25NowCast'
+        | 'pm25Day'
+        | 'pm25Running24h'
+        | 'forecastLowC'
+        | 'forecastHighC'
+        | 'forecastWindMPerS'
+        | 'forecastMixingHeightM'
+        | 'hourOfDay'
+        | 'month';
+      /** @enum {string} */
+      op?: '>=' | '>' | '<=' | '<' | '=';
+      value?: number | boolean;
+      measured?: components['schemas']['RangeValue'];
+      parts?: components['schemas']['EvaluatedNode'][];
+    };
+    EvidenceSentences: {
+      en: string[];
+      es: string[];
+    };
+    Evidence: {
+      tree: components['schemas']['EvaluatedNode'];
+      sentences: components['schemas']['EvidenceSentences'];
+      /** @description SHA-256 of the evidence as it is kept */
+      sha256: string;
+    };
+    HistoryEntry: {
+      /** Format: date-time */
+      at: string;
+      by: string;
+      act: string;
+      text: string;
+    };
+    ProposalDetail: {
+      id: number;
+      districtId: number;
+      districtName: string;
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** @enum {string} */
+      act: 'begin' | 'end';
+      /** @enum {string} */
+      state: 'open' | 'confirmed' | 'declined' | 'returned' | 'issued' | 'lapsed';
+      /** Format: date-time */
+      openedAt: string;
+      /**
+       * Format: date-time
+       * @description End of the block that was judged
+       */
+      tEnd: string;
+      /** @description What decided, in one line */
+      summary: string;
+      confirmedBy?: string;
+      /** Format: date-time */
+      confirmedAt?: string;
+      /** @description The analyst's sentence for the officer */
+      note?: string;
+      /** @description Why it was declined or returned, or why it lapsed */
+      reason?: string;
+      closedBy?: string;
+      /** Format: date-time */
+      closedAt?: string;
+      noticeId?: number;
+      version: number;
+      rule: components['schemas']['ProposalRule'];
+      evidence: components['schemas']['Evidence'];
+      profile: components['schemas']['Profile'] | null;
+      history: components['schemas']['HistoryEntry'][];
+      /**
+       * Format: date-time
+       * @description The written end proposed for the notice
+       */
+      suggestedExpiresAt: string;
+    };
+    ConfirmProposal: {
+      /** @description The version that was read */
+      version: number;
+      note?: string;
+    };
+    RefuseProposal: {
+      /** @description The version that was read */
+      version: number;
+      reason: string;
+    };
+    PreviewProposal: {
+      /**
+       * Format: date-time
+       * @description The rule's longest validity when left out
+       */
+      expiresAt?: string;
+    };
+    IssueProposal: {
+      /** @description The version that was read */
+      version: number;
+      /** @description Hash of the preview that was read */
+      previewHash: string;
+      /** Format: date-time */
+      expiresAt?: string;
+      /** @description Asked again for a burn ban */
+      password?: string;
+      /** @description Made by the client; the same key issues once however often it is sent */
+      requestKey: string;
+    };
+    SpeakerDto: {
+      towerId: number;
+      name: string;
+    };
+    AirFinding: {
+      /** @enum {string} */
+      surface: 'present' | 'absent' | 'not known';
+      strengthC: components['schemas']['RangeValue'];
+      /**
+       * @description Whether it is beyond what the sensors could mistake
+       * @enum {string}
+       */
+      sure: 'true' | 'false' | 'not known';
+      /** @description How long the episode has lasted */
+      forMinutes: components['schemas']['RangeValue'];
+      /** @description Height of its top above ground; the lowest it can be where it is open */
+      topM?: number;
+      /** @enum {string} */
+      open: 'no' | 'at the top' | 'cut by a missing level';
+    };
+    DistrictAir: {
+      districtId: number;
+      slug: string;
+      name: string;
+      timeZone: string;
+      /** Format: date-time */
+      tEnd: string | null;
+      /** @description Whether the newest block is recent enough to speak for now */
+      fresh: boolean;
+      /** @description Why nothing is known of now */
+      reason?: string;
+      speaker: components['schemas']['SpeakerDto'] | null;
+      /** @description Towers that gave nothing for this block */
+      silent: string[];
+      finding: components['schemas']['AirFinding'];
+      /** @enum {string} */
+      elevatedLid: 'true' | 'false' | 'not known';
+      pm25Hour: components['schemas']['RangeValue'];
+      pm25NowCast: components['schemas']['RangeValue'];
+      pm25Running24h: components['schemas']['RangeValue'];
+      floorToBenchC: components['schemas']['RangeValue'];
+      heatDeficitMJPerM2: components['schemas']['RangeValue'];
+      breakUpTemperatureC: components['schemas']['RangeValue'];
+      mixingHeightM: components['schemas']['RangeValue'];
+      windSpeedMPerS: components['schemas']['RangeValue'];
+      surfaceTemperatureC: components['schemas']['RangeValue'];
+      levels: components['schemas']['ProfileLevel'][];
+      inForce: components['schemas']['NoticeBrief'][];
+    };
+    TowerFreshness: {
+      id: number;
+      name: string;
+      /** Format: date-time */
+      newest: string | null;
+      late: boolean;
+    };
+    Desk: {
+      /** Format: date-time */
+      at: string;
+      districts: components['schemas']['DistrictAir'][];
+      proposals: components['schemas']['ProposalCard'][];
+      towers: components['schemas']['TowerFreshness'][];
+    };
+    HistoryPoint: {
+      /** Format: date-time */
+      t: string;
+      strength: components['schemas']['RangeValue'];
+      /** @description Strength within the tower, °C */
+      within: number | null;
+      /** @enum {string} */
+      sure: 'true' | 'false' | 'not known';
+      speakerId: number | null;
+      reason?: string;
+    };
+    HistoryLimit: {
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** @enum {string} */
+      act: 'begin' | 'end';
+      measure: string;
+      op: string;
+      value: number;
+      heldMinutes: number;
+    };
+    NightSpan: {
+      /** Format: date-time */
+      from: string;
+      /** Format: date-time */
+      to: string;
+    };
+    DistrictHistory: {
+      districtId: number;
+      timeZone: string;
+      /** Format: date-time */
+      from: string;
+      /** Format: date-time */
+      to: string;
+      /** @description Minutes between points; more than a block where every block would be too many */
+      stepMinutes: number;
+      points: components['schemas']['HistoryPoint'][];
+      limits: components['schemas']['HistoryLimit'][];
+      notices: components['schemas']['NoticeBrief'][];
+      nights: components['schemas']['NightSpan'][];
+    };
+    PublicNotice: {
+      ref: string;
+      /** @enum {string} */
+      kind: 'advisory' | 'burnBan';
+      /** Format: date-time */
+      until: string;
+      /** Format: date-time */
+      issuedAt: string;
+    };
+    PublicTexts: {
+      en: components['schemas']['PublicText'];
+      es: components['schemas']['PublicText'];
+    };
+    PublicSmoke: {
+      pm25: components['schemas']['RangeValue'];
+      /** Format: date-time */
+      at: string;
+    };
+    PublicLevel: {
+      heightM: number;
+      temperatureC: number | null;
+    };
+    PublicInversion: {
+      /** @enum {string} */
+      surface: 'present' | 'absent' | 'not known';
+      topM: number | null;
+      /** @enum {string} */
+      open: 'no' | 'at the top' | 'cut by a missing level';
+    };
+    PublicStatus: {
+      slug: string;
+      name: string;
+      timeZone: string;
+      /** @enum {string} */
+      state: 'no restriction' | 'advisory' | 'burn ban' | 'not known';
+      notice?: components['schemas']['PublicNotice'];
+      texts: components['schemas']['PublicTexts'];
+      smoke?: components['schemas']['PublicSmoke'];
+      levels?: components['schemas']['PublicLevel'][];
+      inversion?: components['schemas']['PublicInversion'];
+      /**
+       * Format: date-time
+       * @description End of the newest block
+       */
+      at: string | null;
+      /**
+       * Format: date-time
+       * @description When the service last looked
+       */
+      checkedAt: string;
+      contactPhone: string;
+      ordinanceRef: string;
+      officeName: string;
     };
   };
   responses: never;
@@ -781,6 +2193,29 @@ export interface components {
 }
 export type $defs = Record<string, never>;
 export interface operations {
+  'Activity.page': {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        districtId?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ActivityPage'];
+        };
+      };
+    };
+  };
   'Auth.signIn': {
     parameters: {
       query?: never;
@@ -798,7 +2233,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Me'];
+        };
       };
     };
   };
@@ -832,7 +2269,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Me'];
+        };
       };
     };
   };
@@ -851,7 +2290,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['LinkView'];
+        };
       };
     };
   };
@@ -872,7 +2313,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Me'];
+        };
       };
     };
   };
@@ -893,7 +2336,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Me'];
+        };
       };
     };
   };
@@ -913,7 +2358,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['UserPage'];
+        };
       };
     };
   };
@@ -934,7 +2381,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['InvitedUser'];
+        };
       };
     };
   };
@@ -957,7 +2406,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['UserView'];
+        };
       };
     };
   };
@@ -976,7 +2427,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['UserView'];
+        };
       };
     };
   };
@@ -995,7 +2448,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['PasswordLink'];
+        };
       };
     };
   };
@@ -1012,7 +2467,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Tower'][];
+        };
       };
     };
   };
@@ -1033,7 +2490,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Tower'];
+        };
       };
     };
   };
@@ -1052,7 +2511,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Tower'];
+        };
       };
     };
   };
@@ -1075,7 +2536,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Tower'];
+        };
       };
     };
   };
@@ -1098,7 +2561,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Sensor'];
+        };
       };
     };
   };
@@ -1121,7 +2586,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Sensor'];
+        };
       };
     };
   };
@@ -1140,7 +2607,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Source'][];
+        };
       };
     };
   };
@@ -1163,7 +2632,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Source'];
+        };
       };
     };
   };
@@ -1182,7 +2653,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['IngestKey'][];
+        };
       };
     };
   };
@@ -1205,7 +2678,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['KeyMade'];
+        };
       };
     };
   };
@@ -1241,7 +2716,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['District'][];
+        };
       };
     };
   };
@@ -1262,7 +2739,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['District'];
+        };
       };
     };
   };
@@ -1281,7 +2760,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['District'];
+        };
       };
     };
   };
@@ -1304,7 +2785,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['District'];
+        };
       };
     };
   };
@@ -1321,7 +2804,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['IngestResult'];
+        };
       };
     };
   };
@@ -1342,7 +2827,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['ImportPage'];
+        };
       };
     };
   };
@@ -1364,7 +2851,74 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['RefusedRowPage'];
+        };
+      };
+    };
+  };
+  'Overrides.list': {
+    parameters: {
+      query: {
+        towerId: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Override'][];
+        };
+      };
+    };
+  };
+  'Overrides.set': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['OverrideInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Override'];
+        };
+      };
+    };
+  };
+  'Overrides.undo': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Override'];
+        };
       };
     };
   };
@@ -1383,7 +2937,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Profile'];
+        };
       };
     };
   };
@@ -1406,7 +2962,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['ProfileSpan'];
+        };
       };
     };
   };
@@ -1425,7 +2983,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['PipelineState'];
+        };
       };
     };
   };
@@ -1442,7 +3002,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['Measure'][];
+        };
       };
     };
   };
@@ -1461,7 +3023,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['RuleRow'][];
+        };
       };
     };
   };
@@ -1484,7 +3048,9 @@ export interface operations {
         headers: {
           [name: string]: unknown;
         };
-        content?: never;
+        content: {
+          'application/json': components['schemas']['RuleRow'];
+        };
       };
     };
   };
@@ -1499,11 +3065,609 @@ export interface operations {
     };
     requestBody?: never;
     responses: {
-      201: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['RuleRow'];
+        };
+      };
+    };
+  };
+  'Office.get': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Office'];
+        };
+      };
+    };
+  };
+  'Office.set': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['Office'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Office'];
+        };
+      };
+    };
+  };
+  'Subscribers.list': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SubscriberCount'][];
+        };
+      };
+    };
+  };
+  'Subscriptions.subscribe': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SubscriptionRequest'];
+      };
+    };
+    responses: {
+      202: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SubscriptionReceipt'];
+        };
+      };
+    };
+  };
+  'Subscriptions.confirm': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ConfirmRequest'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ConfirmedDto'];
+        };
+      };
+    };
+  };
+  'Subscriptions.view': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        token: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SubscriptionView'];
+        };
+      };
+    };
+  };
+  'Subscriptions.change': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        token: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SubscriptionPatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SubscriptionView'];
+        };
+      };
+    };
+  };
+  'Subscriptions.leave': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        token: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
         headers: {
           [name: string]: unknown;
         };
         content?: never;
+      };
+    };
+  };
+  'Notices.page': {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        districtId?: number;
+        kind?: 'advisory' | 'burnBan';
+        state?: 'in force' | 'ended' | 'replaced';
+        /** @description Issued at or after */
+        from?: string;
+        /** @description Issued before */
+        to?: string;
+        /** @description Words in reference, reason or texts */
+        q?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NoticePage'];
+        };
+      };
+    };
+  };
+  'Notices.issue': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['NoticeByHand'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NoticeDetail'];
+        };
+      };
+    };
+  };
+  'Notices.preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['NoticeDraft'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NoticePreview'];
+        };
+      };
+    };
+  };
+  'Notices.detail': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NoticeDetail'];
+        };
+      };
+    };
+  };
+  'Notices.deliveries': {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        state?: 'queued' | 'sending' | 'accepted' | 'delivered' | 'failed' | 'suppressed' | 'expired';
+        channel?: 'email' | 'sms';
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['DeliveryPage'];
+        };
+      };
+    };
+  };
+  'Notices.previewEnd': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NoticePreview'];
+        };
+      };
+    };
+  };
+  'Notices.end': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['NoticeEnding'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NoticeDetail'];
+        };
+      };
+    };
+  };
+  'Proposals.page': {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description waiting: open, confirmed or returned */
+        state?: 'open' | 'confirmed' | 'declined' | 'returned' | 'issued' | 'lapsed' | 'waiting';
+        districtId?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProposalPage'];
+        };
+      };
+    };
+  };
+  'Proposals.detail': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProposalDetail'];
+        };
+      };
+    };
+  };
+  'Proposals.confirm': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ConfirmProposal'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProposalDetail'];
+        };
+      };
+    };
+  };
+  'Proposals.decline': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['RefuseProposal'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProposalDetail'];
+        };
+      };
+    };
+  };
+  'Proposals.return': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['RefuseProposal'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProposalDetail'];
+        };
+      };
+    };
+  };
+  'Proposals.preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PreviewProposal'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NoticePreview'];
+        };
+      };
+    };
+  };
+  'Proposals.issue': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['IssueProposal'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NoticeDetail'];
+        };
+      };
+    };
+  };
+  'Desk.now': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Desk'];
+        };
+      };
+    };
+  };
+  'Desk.past': {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['DistrictHistory'];
+        };
+      };
+    };
+  };
+  'PublicStatus.list': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PublicStatus'][];
+        };
+      };
+    };
+  };
+  'PublicStatus.get': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        slug: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PublicStatus'];
+        };
       };
     };
   };
