@@ -41,10 +41,11 @@ export class Journal<T> {
     return index;
   }
 
-  /** The record with this number. @throws RangeError when there is none. */
+  /** The record with this number, once it is written. @throws RangeError when there is none. */
   async read(index: number): Promise<T> {
     if (!Number.isInteger(index) || index < 0 || index >= this.lines)
       throw new RangeError(`There is no record ${index}: the last one is ${this.lines - 1}.`);
+    await this.flushing;
     const start = this.starts[index]!;
     const stop = index + 1 < this.lines ? this.starts[index + 1]! : this.end;
     const { buffer } = await this.file.read(Buffer.alloc(stop - start), 0, stop - start, start);
