@@ -41,13 +41,20 @@ function clientStatusOf(error: unknown): number {
   return typeof status === 'number' && expose === true ? status : 500;
 }
 
+/** What Nest and the body parser say, in the user's words. */
+const inPlainWords: readonly [RegExp, string][] = [
+  [/^Cannot [A-Z]+ \//, 'There is nothing at this address.'],
+  [/in JSON|JSON input|is not valid JSON/, 'The body is not valid JSON.'],
+  [/^Failed to decode param|URI malformed/, 'The address is not written correctly.'],
+  [/numeric string is expected/, 'The number in the address is not a whole number.'],
+];
+
 function detailOf(code: ErrorCode, error: unknown): string {
-  const { type } = (error ?? {}) as { type?: string };
-  if (type === 'entity.parse.failed') return 'The body is not valid JSON.';
-  if (type === 'encoding.unsupported' || type === 'charset.unsupported')
-    return 'Send the body as UTF-8 text.';
+  const { type = '' } = (error ?? {}) as { type?: string };
+  if (/^(encoding|charset)\.unsupported$/.test(type)) return 'Send the body as UTF-8 text.';
   const fixed = details[code];
   if (fixed) return fixed;
   const message = error instanceof Error ? error.message : '';
-  return message || errorCodes[code].title;
+  const plain = inPlainWords.find(([pattern]) => pattern.test(message));
+  return plain?.[1] ?? (message || errorCodes[code].title);
 }
