@@ -1,5 +1,5 @@
-import { goBy, putRuleInForce } from '../rules/testing/evening';
-import { makeValley, type Valley } from '../rules/testing/valley';
+import { goBy, putRuleInForce } from '../testing/evening';
+import { makeValley, type Valley } from '../testing/valley';
 import { signInAs, testPassword, type SignedInAgent } from '../testing/people';
 import { createTestApp, type TestApp } from '../testing/test-app';
 

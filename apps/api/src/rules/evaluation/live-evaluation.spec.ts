@@ -3,8 +3,8 @@ import { notKnown } from '@lidwatch/atmosphere';
 import fc from 'fast-check';
 import { createTestApp, type TestApp } from '../../testing/test-app';
 import { DistrictRows } from '../findings/district-rows';
-import { eveningRule, goBy, putRuleInForce } from '../testing/evening';
-import { makeValley, type Valley } from '../testing/valley';
+import { eveningRule, goBy, putRuleInForce } from '../../testing/evening';
+import { makeValley, type Valley } from '../../testing/valley';
 
 /** An evening that begins to hold, falters, is silent for a while and ends. */
 const NIGHT = [1, 2, 2, 3, 3, 4, 4, 5, 6, 6, 6, 6, 6, 6, null, 6, 4, 1.9, 3, 3, 1, 0.5, 0, 0, 0, 0, 0, 0, 0];

@@ -1,5 +1,5 @@
 import { createTestApp, testNow, type TestApp } from '../../testing/test-app';
-import { BLOCK_S, inversion, makeValley, type Valley } from '../testing/valley';
+import { BLOCK_S, inversion, makeValley, type Valley } from '../../testing/valley';
 import { DistrictFindingsService } from './district-findings.service';
 
 describe('district findings', () => {

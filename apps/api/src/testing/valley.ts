@@ -1,7 +1,7 @@
-import { DirtyStages } from '../../database/dirty';
-import { ReadingsService } from '../../readings/readings.service';
-import { makeDistrict, makeTower } from '../../testing/places';
-import type { TestApp } from '../../testing/test-app';
+import { DirtyStages } from '../database/dirty';
+import { ReadingsService } from '../readings/readings.service';
+import { makeDistrict, makeTower } from './places';
+import type { TestApp } from './test-app';
 
 /** Length of the blocks of the towers `makeValley` makes, s. */
 export const BLOCK_S = 600;

@@ -1,8 +1,8 @@
 import type { RuleDefinition } from '@lidwatch/rules';
-import type { SignedIn } from '../../auth/signed-in';
-import { makeUser } from '../../testing/people';
-import type { TestApp } from '../../testing/test-app';
-import { RulesService } from '../rules.service';
+import type { SignedIn } from '../auth/signed-in';
+import { makeUser } from './people';
+import type { TestApp } from './test-app';
+import { RulesService } from '../rules/rules.service';
 import { BLOCK_S, inversion, type Valley } from './valley';
 
 const strong = (value: number) =>
