@@ -8,6 +8,8 @@ import type { ParsedReading } from '../readings/parse/parsed-readings';
 const INTERVAL_S = 300;
 const BEGIN = Date.UTC(2025, 11, 1) / 1000;
 const END = BEGIN + 1.75 * 86_400;
+/** Corrections come to the first hours only: later ones must be right without being touched again. */
+const CORRECTED_S = 12 * 3600;
 const ORDERS = 20;
 
 const BLOCK_S = 900;
@@ -29,6 +31,13 @@ const shuffled = <T>(list: readonly T[], next: () => number): T[] => {
   return all;
 };
 
+/** The order of one loading: as recorded, in time, backwards in time (both in small batches), then at random. */
+function arranged(rows: readonly ParsedReading[], order: number, next: () => number): ParsedReading[] {
+  if (order > 2) return shuffled(rows, next);
+  const inTime = [...rows].sort((a, b) => a.tEnd - b.tEnd);
+  return [[...rows], inTime, inTime.toReversed()][order]!;
+}
+
 /** Nights with an inversion, gaps, single spikes, a stuck sensor, values beyond what is possible. */
 function record(sensorIds: readonly number[]): ParsedReading[] {
   const next = numbersFrom(7);
@@ -37,7 +46,7 @@ function record(sensorIds: readonly number[]): ParsedReading[] {
     const night = Math.cos(((t - BEGIN) / 86_400) * 2 * Math.PI);
     sensorIds.forEach((sensorId, level) => {
       const noise = Math.round((next() - 0.5) * 10) / 10;
-      const stuck = level === 1 && t > BEGIN + 30_000 && t < BEGIN + 55_000;
+      const stuck = level === 1 && t > BEGIN + 108_000 && t < BEGIN + 129_600;
       const temperature = stuck ? -7.25 : -6 + night * (level * 1.2 - 2) + noise;
       const usual = level === 4 ? 80 + 10 * noise : level === 5 ? 20 + 15 * night + noise : temperature;
       const chance = next();
@@ -99,16 +108,17 @@ describe('the same readings in any order, in batches of any size, late and corre
     const [readings, dirty] = [test.app.get(ReadingsService, { strict: false }), test.app.get(DirtyStages)];
     const right = record(sensorIds);
     const next = numbersFrom(order + 100);
-    const isWrong = right.map(() => next() < 0.05);
+    const isWrong = right.map(({ tEnd }) => next() < 0.1 && tEnd < BEGIN + CORRECTED_S);
     const wrong = right.filter((_, i) => isWrong[i]).map((row) => ({ ...row, value: row.value + 3 }));
     const first = right.filter((_, i) => !isWrong[i]);
     const late = right.filter((_, i) => isWrong[i]);
-    const mixed = <T>(list: T[]): T[] => (order === 0 ? list : shuffled(list, next));
-    const rows = [...mixed([...first, ...wrong]), ...mixed(late)];
-    for (let at = 0, size = 0; at < rows.length; at += size) {
-      size = 1 + Math.floor(next() * rows.length * 0.4);
-      await readings.ingest(towerId, rows.slice(at, at + size), { origin: 'folder', name: 'mast.csv' });
+    const rows = [...arranged([...first, ...wrong], order, next), ...arranged(late, order, next)];
+    const largest = rows.length * (order === 1 || order === 2 ? 0.05 : 0.4);
+    for (let at = 0; at < rows.length;) {
+      const batch = rows.slice(at, at + 1 + Math.floor(next() * largest));
+      await readings.ingest(towerId, batch, { origin: 'folder', name: 'mast.csv' });
       if (next() < 0.6) await dirty.drainAll();
+      at += batch.length;
     }
     await dirty.drainAll();
     const tables: Record<string, object[]> = {};
