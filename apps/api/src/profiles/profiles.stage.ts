@@ -12,6 +12,8 @@ import { ProfileStore, type MeansOfBlock } from './profile-store';
 
 /** Blocks worked out at a time. */
 const BATCH = 500;
+/** Blocks worked out before other requests get their turn. */
+const AT_ONCE = 100;
 const HOUR_S = 3600;
 const LEAST_GRACE_S = 120;
 
@@ -24,6 +26,8 @@ interface Made extends Waiting {
   /** Undefined where the block holds no reading. */
   readonly profile: ReturnType<typeof profileRow> | undefined;
 }
+
+const pause = (): Promise<void> => new Promise((resolve) => setImmediate(resolve));
 
 /** How long after a block's end late readings are waited for, s, before the block counts as closed. */
 export const graceS = (intervalS: number): number => Math.max(LEAST_GRACE_S, intervalS / 2);
@@ -51,7 +55,11 @@ export class ProfilesStage implements OnModuleInit {
     const closed = rows.length === 0 ? [] : await this.closedOf(rows);
     if (closed.length === 0) return 0;
     const hours = await this.pm25Hours(closed);
-    const made = closed.flatMap((waiting, i) => this.make(waiting, hours[i]));
+    const made: Made[] = [];
+    for (const [i, waiting] of closed.entries()) {
+      if (i % AT_ONCE === AT_ONCE - 1) await pause();
+      made.push(...this.make(waiting, hours[i]));
+    }
     await this.work.run(() => this.write(made), 'bulk');
     return made.length;
   }

@@ -13,14 +13,14 @@ export class IngestController {
   constructor(private readonly pushed: PushService) {}
 
   /**
-   * Takes readings of the key's own tower: JSON `{"readings": [{time, sensor, value}]}`, or CSV laid out as the
-   * tower's push source says. Sending the same again changes nothing.
+   * Takes readings of the key's own tower: JSON `{"readings": [{time, sensor, value}]}`, one such object a line
+   * (NDJSON), or CSV laid out as the tower's push source says; gzip too. Sending the same again changes nothing.
    */
   @Post('readings')
   @HttpCode(200)
   @Public()
   @UseGuards(SiteKeyGuard)
-  @ApiConsumes('application/json', 'text/csv')
+  @ApiConsumes('application/json', 'application/x-ndjson', 'text/csv')
   @ApiOkResponse({ type: IngestResult })
   readings(
     @SiteTower() towerId: number,

@@ -6,7 +6,7 @@ import { decodeText, NotTextError } from './parse/decode-text';
 import { readMapping } from './parse/mapping';
 import { HeaderError, type ParsedReadings } from './parse/parsed-readings';
 import { readCsv, type ReadingContext } from './parse/read-csv';
-import { readJson } from './parse/read-json';
+import { readJson, readNdjson } from './parse/read-json';
 import { ReadingContexts } from './reading-contexts';
 import { ReadingsService } from './readings.service';
 
@@ -14,6 +14,7 @@ type Read = (text: string, context: ReadingContext) => Promise<ParsedReadings> |
 
 const readers: Readonly<Record<string, Read>> = {
   'application/json': readJson,
+  'application/x-ndjson': readNdjson,
   'text/csv': readCsv,
   'text/plain': readCsv,
 };
@@ -34,7 +35,10 @@ export class PushService {
   async push(towerId: number, contentType: string, body: unknown): Promise<IngestResult> {
     const read = readers[contentType.split(';')[0]!.trim().toLowerCase()];
     if (!read)
-      throw new Problem('type-not-served', 'Send application/json or text/csv, and say so in Content-Type.');
+      throw new Problem(
+        'type-not-served',
+        'Send application/json, application/x-ndjson or text/csv, and say so in Content-Type.',
+      );
     if (!Buffer.isBuffer(body) || body.length === 0) {
       throw new Problem('invalid', 'The body is empty. Send the readings in it.');
     }

@@ -161,6 +161,21 @@ describe('readings that a site pushes', () => {
     await send(packed.subarray(0, 20)).set('Content-Encoding', 'gzip').expect(400);
   });
 
+  it('may come a reading a line, each taken or refused alone', async () => {
+    const lines = [
+      JSON.stringify({ time: iso(T), sensor: 'temperature_2m', value: -9.5 }),
+      '{"time": "cut o',
+      '',
+      JSON.stringify({ time: iso(T), sensor: 'temperature_10m', value: null }),
+    ];
+    const answer = await send(lines.join('\n'), { type: 'application/x-ndjson' }).expect(200);
+    expect(answer.body).toMatchObject({
+      new: 1,
+      refused: 1,
+      refusedRows: [{ row: 2, code: 'not-a-reading' }],
+    });
+  });
+
   it('leave their refused rows to be read', async () => {
     const { body } = await send(wide([[T, 'broken', -7.7]])).expect(200);
     const { importId } = body as Counts;

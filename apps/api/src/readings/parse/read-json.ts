@@ -50,24 +50,47 @@ const readEntry = (entry: Entry, at: number, given: ReadingContext, into: Parsed
   into.rows.push({ sensorId, tEnd, value, rowNo: at });
 };
 
+const parsed = (text: string): unknown => {
+  try {
+    return JSON.parse(text);
+  } catch (error) {
+    if (!(error instanceof SyntaxError)) throw error;
+    return error;
+  }
+};
+
+const readList = (list: readonly unknown[], given: ReadingContext): ParsedReadings => {
+  const result: ParsedReadings = { rows: [], refused: [], ignoredColumns: [] };
+  list.forEach((entry, i) => {
+    if (entry !== null && typeof entry === 'object' && !(entry instanceof SyntaxError)) {
+      readEntry(entry as Entry, i + 1, given, result);
+    } else if (entry !== undefined) {
+      const raw = entry instanceof SyntaxError ? entry.message : JSON.stringify(entry);
+      result.refused.push(refusedRow(i + 1, undefined, notAReading, raw));
+    }
+  });
+  return result;
+};
+
 /**
  * Reads `{"readings": [{time, sensor, value}, …]}`. Entries are refused one by one, the rest is taken; text that is no
  * such object throws a `HeaderError`.
  */
 export function readJson(text: string, given: ReadingContext): ParsedReadings {
-  let body: unknown;
-  try {
-    body = JSON.parse(text);
-  } catch (error) {
-    if (!(error instanceof SyntaxError)) throw error;
-    throw new HeaderError(`The text is no JSON (${error.message.slice(0, 120)}); send {"readings": […]}.`);
+  const body = parsed(text);
+  if (body instanceof SyntaxError) {
+    throw new HeaderError(`The text is no JSON (${body.message.slice(0, 120)}); send {"readings": […]}.`);
   }
   const list = (body as { readings?: unknown } | null)?.readings;
   if (!Array.isArray(list)) throw new HeaderError('The JSON has no list "readings"; send {"readings": […]}.');
-  const result: ParsedReadings = { rows: [], refused: [], ignoredColumns: [] };
-  list.forEach((entry, i) => {
-    if (entry !== null && typeof entry === 'object') readEntry(entry as Entry, i + 1, given, result);
-    else result.refused.push(refusedRow(i + 1, undefined, notAReading, JSON.stringify(entry)));
-  });
-  return result;
+  return readList(list, given);
+}
+
+/** Reads a reading per line, each a JSON object {time, sensor, value}. Lines are refused one by one. */
+export function readNdjson(text: string, given: ReadingContext): ParsedReadings {
+  const lines = text.split(/\r\n|\n/);
+  return readList(
+    lines.map((line) => (line.trim() === '' ? undefined : parsed(line))),
+    given,
+  );
 }
