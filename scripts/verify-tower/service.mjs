@@ -82,7 +82,7 @@ export async function startService() {
   };
   try {
     await waitUntilReady(url, () => child.exitCode !== null);
-    return { url, token: await tokenIn(() => output), close };
+    return { url, token: await tokenIn(() => output), pid: child.pid, close };
   } catch (error) {
     await close();
     throw new Error(`${error.message}\n${output.slice(-4000)}`, { cause: error });
