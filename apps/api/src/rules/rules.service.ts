@@ -44,10 +44,18 @@ export class RulesService {
 
   /** The rule in force in a district; undefined where none is. */
   async inForce(districtId: number): Promise<RuleInForce | undefined> {
-    const rule = await this.rules.findOne({ where: { districtId, state: 'in force' } });
-    if (!rule) return undefined;
-    const { id, version, sha256 } = rule;
-    return { id, districtId, version, sha256, body: JSON.parse(rule.body) as RuleDefinition };
+    return (await this.inForceIn([districtId])).get(districtId);
+  }
+
+  /** The rules in force in some districts, by district. */
+  async inForceIn(districtIds: readonly number[]): Promise<Map<number, RuleInForce>> {
+    const rules = await this.rules.findAll({ where: { districtId: [...districtIds], state: 'in force' } });
+    return new Map(
+      rules.map(({ id, districtId, version, sha256, body }) => [
+        districtId,
+        { id, districtId, version, sha256, body: JSON.parse(body) as RuleDefinition },
+      ]),
+    );
   }
 
   /** The definition of one version; 404 without it. */

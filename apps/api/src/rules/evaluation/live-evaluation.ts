@@ -5,6 +5,7 @@ import {
   partsOf,
   type Condition,
   type EvaluatedNode,
+  type MeasureName,
   type NoticeKind,
 } from '@lidwatch/rules';
 import { Injectable } from '@nestjs/common';
@@ -20,7 +21,7 @@ import { RulesService, type RuleInForce } from '../rules.service';
 /** Only blocks that ended this recently are judged live; older ones were judged when they were new, s. */
 const LIVE_S = 24 * 3600;
 /** How far before the longest held-for a series is read, so that a silence does not hide who spoke before it, s. */
-const LOOK_BACK_S = 6 * 3600;
+const LOOK_BACK_S = 3 * 3600;
 
 /** What the rule in force says of one block. */
 export interface DistrictEvaluation {
@@ -41,6 +42,9 @@ const KEEP = `INSERT INTO evaluation (district_id, t_end, rule_id, input_rev, tr
   SELECT value->>0, value->>1, value->>2, value->>3, value->>4, $2 FROM json_each($1) WHERE true
   ON CONFLICT DO UPDATE SET rule_id = excluded.rule_id, input_rev = excluded.input_rev, truths = excluded.truths,
     at = excluded.at`;
+
+const NEWEST = `SELECT value districtId, (SELECT max(t_end) FROM district_block WHERE district_id = value) tEnd
+  FROM json_each($1)`;
 
 const longestHeldMinutes = (condition: Condition): number =>
   (condition.heldMinutes ?? 0) + Math.max(0, ...partsOf(condition).map(longestHeldMinutes));
@@ -76,25 +80,33 @@ export class LiveEvaluation {
   /** Judges blocks that have just been written; what is not recent is left as it was judged then. */
   async evaluate(blocks: readonly { readonly districtId: number; readonly tEnd: number }[]): Promise<void> {
     const recent = blocks.filter(({ tEnd }) => tEnd > this.clock.now() - LIVE_S);
-    for (const [districtId, own] of groupBy(recent, (block) => block.districtId)) {
-      const rule = await this.rules.inForce(districtId);
-      if (rule)
-        await this.evaluateDistrict(
-          rule,
-          own.map(({ tEnd }) => tEnd),
-        );
-      const tEnd = Math.max(...own.map((block) => block.tEnd));
+    if (recent.length === 0) return;
+    const ends = new Map(
+      [...groupBy(recent, ({ districtId }) => districtId)].map(([id, own]) => [
+        id,
+        own.map(({ tEnd }) => tEnd),
+      ]),
+    );
+    const rules = [...(await this.rules.inForceIn([...ends.keys()])).values()];
+    if (rules.length > 0) await this.evaluateAll(rules, ends);
+    for (const [districtId, own] of ends) {
+      const tEnd = Math.max(...own);
       this.work.afterCommit(() => this.events.emit('district.evaluated', { districtId, tEnd }));
     }
   }
 
-  private async evaluateDistrict(rule: RuleInForce, ends: readonly number[]): Promise<void> {
-    const { districtId } = rule;
-    const until = Math.max(...ends);
-    const after = Math.min(...ends) - longestHeldS(rule) - LOOK_BACK_S;
-    const inputs = await this.rows.series(districtId, after, until);
-    const evaluations = judge(rule, inputs, new Set(ends));
-    const kept = evaluations.map(({ tEnd, rev, kinds }) => {
+  private async evaluateAll(
+    rules: readonly RuleInForce[],
+    ends: ReadonlyMap<number, readonly number[]>,
+  ): Promise<void> {
+    const judged = rules.map(({ districtId }) => districtId);
+    const all = judged.flatMap((id) => ends.get(id)!);
+    const after = Math.min(...all) - Math.max(...rules.map(longestHeldS)) - LOOK_BACK_S;
+    const series = await this.rows.series(judged, after, Math.max(...all), measuresOf(rules));
+    const evaluations = rules.map((rule) =>
+      judge(rule, series.get(rule.districtId) ?? [], new Set(ends.get(rule.districtId))),
+    );
+    const kept = evaluations.flat().map(({ districtId, tEnd, rule, rev, kinds }) => {
       const truths = [...kinds].map(([kind, { begin, end }]) => [
         kind,
         { begin: begin.truth, end: end.truth },
@@ -102,21 +114,30 @@ export class LiveEvaluation {
       return [districtId, tEnd, rule.id, rev, JSON.stringify(Object.fromEntries(truths))];
     });
     await this.sql.run(KEEP, [JSON.stringify(kept), this.clock.now()]);
-    const newest = evaluations.at(-1);
-    if (!newest || newest.tEnd !== (await this.newestEnd(districtId))) return;
-    const plan = (await this.plans.all()).get(districtId);
-    if (!plan) return;
-    const fresh = this.clock.now() - newest.tEnd < staleAfterS(plan);
-    for (const listener of this.listeners) await listener({ ...newest, fresh, timeZone: plan.timeZone });
+    const newest = await this.newestEnds(judged);
+    const plans = await this.plans.all();
+    for (const found of evaluations.map((own) => own.at(-1))) {
+      const plan = found && plans.get(found.districtId);
+      if (!found || !plan || found.tEnd !== newest.get(found.districtId)) continue;
+      const fresh = this.clock.now() - found.tEnd < staleAfterS(plan);
+      for (const listener of this.listeners) await listener({ ...found, fresh, timeZone: plan.timeZone });
+    }
   }
 
-  private async newestEnd(districtId: number): Promise<number | undefined> {
-    const row = await this.sql.get<{ tEnd: number }>(
-      'SELECT max(t_end) tEnd FROM district_block WHERE district_id = $1',
-      [districtId],
-    );
-    return row?.tEnd;
+  private async newestEnds(districtIds: readonly number[]): Promise<Map<number, number>> {
+    const rows = await this.sql.all<{ districtId: number; tEnd: number }>(NEWEST, [
+      JSON.stringify(districtIds),
+    ]);
+    return new Map(rows.map(({ districtId, tEnd }) => [districtId, tEnd]));
   }
+}
+
+/** Every measure that some rules ask about. */
+function measuresOf(rules: readonly RuleInForce[]): Set<MeasureName> {
+  const names = (condition: Condition): MeasureName[] =>
+    'measure' in condition ? [condition.measure] : partsOf(condition).flatMap(names);
+  const parts = rules.flatMap(({ body }) => NOTICE_KINDS.flatMap((kind) => body[kind] ?? []));
+  return new Set(parts.flatMap(({ begin, end }) => [...names(begin), ...names(end)]));
 }
 
 /** What a rule says of some of a district's blocks, oldest first. */

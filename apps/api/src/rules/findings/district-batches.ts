@@ -1,19 +1,34 @@
 import { isFresh, notKnown } from '@lidwatch/atmosphere';
 import { Injectable } from '@nestjs/common';
+import { groupBy } from '../../common/group-by';
 import type { DirtyRow } from '../../database/dirty';
 import { graceS } from '../../profiles/profiles.stage';
 import { blockAt, newestValidEnd } from './answering';
-import { districtBlock, REACH_S, type DistrictBlock } from './district-block';
+import { districtBlock, REACH_S, type DistrictBlock, type DistrictSources } from './district-block';
 import { towerIdsOf, type DistrictPlan } from './district-plan';
 import { DistrictRows } from './district-rows';
 import { EPISODE_REACH_S, type StrengthAt } from './episode-minutes';
 import { SMOKE_REACH_S } from './smoke';
-import { TowerBlockRows, type TowerBlocks } from './tower-blocks';
+import { TowerBlockRows, type MonitorHours, type TowerBlocks } from './tower-blocks';
 
-/** A district's blocks that some marks touch, and the marks that are dealt with by them. */
+/** District blocks that some marks touch, and the marks that are dealt with by them. */
 export interface DistrictBatch {
   readonly blocks: readonly DistrictBlock[];
   readonly settled: readonly DirtyRow[];
+}
+
+/** One district's part of a batch: its marks, and the ends of the blocks they touch, in order of time. */
+interface Part {
+  readonly plan: DistrictPlan;
+  readonly marks: readonly DirtyRow[];
+  readonly ends: readonly number[];
+}
+
+/** What is kept of the stretch of time a batch is about. */
+interface Kept {
+  readonly blocks: TowerBlocks;
+  readonly hours: MonitorHours;
+  readonly strengths: ReadonlyMap<number, Map<number, StrengthAt>>;
 }
 
 /** A tower counts as fresh for at least so many of its intervals. */
@@ -40,7 +55,7 @@ function isAwaited(plan: DistrictPlan, blocks: TowerBlocks, t: number, now: numb
   });
 }
 
-/** Works out districts' blocks from what is kept. */
+/** Works out district blocks from what is kept. */
 @Injectable()
 export class DistrictBatches {
   constructor(
@@ -49,35 +64,71 @@ export class DistrictBatches {
   ) {}
 
   /**
-   * The blocks of a district that the marks touch: those that hold a marked time, and later ones already there whose
-   * values look back on it. A block for which a tower is still awaited is left for later, with its marks.
+   * The blocks that the marks touch: those that hold a marked time, and later ones already there whose values look
+   * back on it. A block for which a tower is still awaited is left for later, with its marks; so are marks of blocks
+   * that have not ended.
    */
-  async of(plan: DistrictPlan, marks: readonly DirtyRow[], now: number): Promise<DistrictBatch> {
-    const due = marks.filter(({ t }) => districtEnd(t, plan) <= now);
+  async of(
+    plans: ReadonlyMap<number, DistrictPlan>,
+    marks: readonly DirtyRow[],
+    now: number,
+  ): Promise<DistrictBatch> {
+    const due = marks.filter(({ subject, t }) => districtEnd(t, plans.get(subject)!) <= now);
     if (due.length === 0) return { blocks: [], settled: [] };
-    const marked = new Set(due.map(({ t }) => districtEnd(t, plan)));
-    const first = Math.min(...marked);
-    const last = Math.max(...marked);
-    const later = await this.rows.ends(plan.districtId, first, last + REACH_S);
-    const ends = [...new Set([...marked, ...later])].sort((a, b) => a - b);
-    const until = ends.at(-1)!;
-    const blocks = await this.towers.between(towerIdsOf(plan), first - layersReachS(plan), until);
-    const hours = plan.pm25 && (await this.towers.hours([plan.pm25.id], first - SMOKE_REACH_S, until));
-    const strengths = await this.rows.strengths(plan.districtId, first - EPISODE_REACH_S, until);
-    const sources = {
-      ...{ plan, blocks },
-      hours: plan.pm25 && (hours?.get(plan.pm25.id) ?? []),
-      earlier: (t: number) => strengths.get(t) ?? NO_BLOCK,
-    };
-    const awaited = new Set(ends.filter((t) => isAwaited(plan, blocks, t, now)));
-    const made = ends
-      .filter((t) => !awaited.has(t))
-      .map((t) => {
-        const block = districtBlock(sources, t);
-        const { spoke, values } = block;
-        strengths.set(t, { spoke, strengthC: values.inversionStrengthC ?? NO_BLOCK.strengthC });
-        return block;
-      });
-    return { blocks: made, settled: due.filter(({ t }) => !awaited.has(districtEnd(t, plan))) };
+    const parts = await this.partsOf(plans, due);
+    const kept = await this.read(parts);
+    const done = parts.map((part) => workOut(part, kept, now));
+    return { blocks: done.flatMap(({ blocks }) => blocks), settled: done.flatMap(({ settled }) => settled) };
   }
+
+  private async partsOf(plans: ReadonlyMap<number, DistrictPlan>, due: readonly DirtyRow[]): Promise<Part[]> {
+    const first = Math.min(...due.map(({ t }) => t));
+    const last = Math.max(...due.map(({ t }) => t));
+    const later = await this.rows.ends(
+      [...new Set(due.map(({ subject }) => subject))],
+      first,
+      last + REACH_S,
+    );
+    return [...groupBy(due, ({ subject }) => subject)].map(([districtId, marks]) => {
+      const plan = plans.get(districtId)!;
+      const marked = marks.map(({ t }) => districtEnd(t, plan));
+      const [own, newest] = [Math.min(...marked), Math.max(...marked) + REACH_S];
+      const after = (later.get(districtId) ?? []).filter((t) => t > own && t <= newest);
+      return { plan, marks, ends: [...new Set([...marked, ...after])].sort((a, b) => a - b) };
+    });
+  }
+
+  private async read(parts: readonly Part[]): Promise<Kept> {
+    const first = Math.min(...parts.map(({ ends }) => ends[0]!));
+    const until = Math.max(...parts.map(({ ends }) => ends.at(-1)!));
+    const towerIds = [...new Set(parts.flatMap(({ plan }) => towerIdsOf(plan)))];
+    const monitors = [...new Set(parts.flatMap(({ plan }) => (plan.pm25 ? [plan.pm25.id] : [])))];
+    const reachS = Math.max(...parts.map(({ plan }) => layersReachS(plan)));
+    const districtIds = parts.map(({ plan }) => plan.districtId);
+    return {
+      blocks: await this.towers.between(towerIds, first - reachS, until),
+      hours: await this.towers.hours(monitors, first - SMOKE_REACH_S, until),
+      strengths: await this.rows.strengths(districtIds, first - EPISODE_REACH_S, until),
+    };
+  }
+}
+
+/** One district's blocks, oldest first, so that each finds those before it as they are now. */
+function workOut({ plan, marks, ends }: Part, kept: Kept, now: number): DistrictBatch {
+  const strengths = kept.strengths.get(plan.districtId) ?? new Map<number, StrengthAt>();
+  const sources: DistrictSources = {
+    ...{ plan, blocks: kept.blocks },
+    hours: plan.pm25 && (kept.hours.get(plan.pm25.id) ?? []),
+    earlier: (t) => strengths.get(t) ?? NO_BLOCK,
+  };
+  const awaited = new Set(ends.filter((t) => isAwaited(plan, kept.blocks, t, now)));
+  const blocks = ends
+    .filter((t) => !awaited.has(t))
+    .map((t) => {
+      const block = districtBlock(sources, t);
+      const { spoke, values } = block;
+      strengths.set(t, { spoke, strengthC: values.inversionStrengthC ?? NO_BLOCK.strengthC });
+      return block;
+    });
+  return { blocks, settled: marks.filter(({ t }) => !awaited.has(districtEnd(t, plan))) };
 }

@@ -1,5 +1,5 @@
 import { isKnown, type Quantity } from '@lidwatch/atmosphere';
-import type { MeasuredBlock, Purpose } from '@lidwatch/rules';
+import type { MeasuredBlock, MeasureName, Purpose } from '@lidwatch/rules';
 import { Injectable } from '@nestjs/common';
 import { Sql } from '../../database/sql';
 import type { DistrictBlock } from './district-block';
@@ -33,11 +33,12 @@ const WRITE = `WITH j AS (SELECT value FROM json_each($1)) INSERT INTO district_
   SELECT ${given}, 1 FROM j WHERE true
   ON CONFLICT DO UPDATE SET ${CONTENT.map((name) => `${name} = excluded.${name}`).join(', ')}, rev = b.rev + 1
   WHERE (${of('b')}) IS NOT (${of('excluded')}) RETURNING district_id districtId, t_end tEnd`;
-const ENDS = `SELECT t_end tEnd FROM district_block WHERE district_id = $1 AND t_end > $2 AND t_end <= $3`;
-const STRENGTHS = `SELECT t_end tEnd, spoke, strength_lo lo, strength_hi hi, reason FROM district_block
-  WHERE district_id = $1 AND t_end > $2 AND t_end <= $3`;
-const SERIES = `SELECT t_end tEnd, rev, block_s blockS, spoke, measures, end_spoke endSpoke, end_measures endMeasures
-  FROM district_block WHERE district_id = $1 AND t_end > $2 AND t_end <= $3 ORDER BY t_end`;
+const WHERE = `FROM district_block
+  WHERE district_id IN (SELECT value FROM json_each($1)) AND t_end > $2 AND t_end <= $3 ORDER BY t_end`;
+const ENDS = `SELECT district_id districtId, t_end tEnd ${WHERE}`;
+const STRENGTHS = `SELECT district_id districtId, t_end tEnd, spoke, strength_lo lo, strength_hi hi, reason ${WHERE}`;
+const SERIES = `SELECT district_id districtId, t_end tEnd, rev, block_s blockS, spoke, measures, end_spoke endSpoke,
+  end_measures endMeasures ${WHERE}`;
 
 const end = (value: number | undefined): number | null => (Number.isFinite(value) ? value! : null);
 const one = (quantity: Quantity | undefined): number | null =>
@@ -69,8 +70,19 @@ export interface EvaluatedInput extends Readonly<Record<Purpose, MeasuredBlock>>
   readonly rev: number;
 }
 
-interface SeriesRow {
+interface OfDistrict {
+  districtId: number;
   tEnd: number;
+}
+
+interface StrengthRow extends OfDistrict {
+  spoke: string | null;
+  lo: number | null;
+  hi: number | null;
+  reason: string | null;
+}
+
+interface SeriesRow extends OfDistrict {
   rev: number;
   blockS: number;
   spoke: string | null;
@@ -90,45 +102,56 @@ export class DistrictRows {
     return this.sql.returning(WRITE, [JSON.stringify(blocks.map(rowOf))]);
   }
 
-  /** Ends of a district's blocks in (after, until]. */
-  async ends(districtId: number, after: number, until: number): Promise<number[]> {
-    const rows = await this.sql.all<{ tEnd: number }>(ENDS, [districtId, after, until]);
-    return rows.map(({ tEnd }) => tEnd);
+  /** Ends of some districts' blocks in (after, until]. */
+  async ends(districtIds: readonly number[], after: number, until: number): Promise<Map<number, number[]>> {
+    const rows = await this.sql.all<OfDistrict>(ENDS, [JSON.stringify(districtIds), after, until]);
+    return byDistrict(rows, ({ tEnd }) => tEnd);
   }
 
-  /** Who spoke and how strong the inversion was in a district's blocks that end in (after, until]. */
-  async strengths(districtId: number, after: number, until: number): Promise<Map<number, StrengthAt>> {
-    const rows = await this.sql.all<{
-      tEnd: number;
-      spoke: string | null;
-      lo: number | null;
-      hi: number | null;
-      reason: string | null;
-    }>(STRENGTHS, [districtId, after, until]);
-    return new Map(
-      rows.map(({ tEnd, spoke, lo, hi, reason }) => [
-        tEnd,
-        { spoke, strengthC: quantityOf(lo, hi, reason ?? undefined) },
-      ]),
-    );
+  /** Who spoke and how strong the inversion was in some districts' blocks that end in (after, until], by their end. */
+  async strengths(
+    districtIds: readonly number[],
+    after: number,
+    until: number,
+  ): Promise<Map<number, Map<number, StrengthAt>>> {
+    const rows = await this.sql.all<StrengthRow>(STRENGTHS, [JSON.stringify(districtIds), after, until]);
+    const found = byDistrict(rows, ({ tEnd, spoke, lo, hi, reason }): [number, StrengthAt] => [
+      tEnd,
+      { spoke, strengthC: quantityOf(lo, hi, reason ?? undefined) },
+    ]);
+    return new Map([...found].map(([districtId, strengths]) => [districtId, new Map(strengths)]));
   }
 
-  /** A district's blocks that end in (after, until], for evaluation, oldest first. */
-  async series(districtId: number, after: number, until: number): Promise<EvaluatedInput[]> {
-    const rows = await this.sql.all<SeriesRow>(SERIES, [districtId, after, until]);
-    return rows.map(inputOf);
+  /** Some districts' blocks that end in (after, until], oldest first, with the values of these measures only. */
+  async series(
+    districtIds: readonly number[],
+    after: number,
+    until: number,
+    measures: ReadonlySet<MeasureName>,
+  ): Promise<Map<number, EvaluatedInput[]>> {
+    const rows = await this.sql.all<SeriesRow>(SERIES, [JSON.stringify(districtIds), after, until]);
+    return byDistrict(rows, (row) => inputOf(row, measures));
   }
 }
 
-function inputOf(row: SeriesRow): EvaluatedInput {
+function byDistrict<Row extends OfDistrict, Found>(
+  rows: readonly Row[],
+  find: (row: Row) => Found,
+): Map<number, Found[]> {
+  const found = new Map<number, Found[]>();
+  for (const row of rows) {
+    const own = found.get(row.districtId);
+    if (own) own.push(find(row));
+    else found.set(row.districtId, [find(row)]);
+  }
+  return found;
+}
+
+function inputOf(row: SeriesRow, measures: ReadonlySet<MeasureName>): EvaluatedInput {
   const { tEnd, rev } = row;
   const common = { tEnd, blockSeconds: row.blockS };
-  const begin = { ...common, speaker: row.spoke, values: measuresFromJson(row.measures) };
+  const begin = { ...common, speaker: row.spoke, values: measuresFromJson(row.measures, measures) };
   if (row.endMeasures === null) return { tEnd, rev, begin, end: begin };
-  return {
-    tEnd,
-    rev,
-    begin,
-    end: { ...common, speaker: row.endSpoke, values: measuresFromJson(row.endMeasures) },
-  };
+  const values = measuresFromJson(row.endMeasures, measures);
+  return { tEnd, rev, begin, end: { ...common, speaker: row.endSpoke, values } };
 }

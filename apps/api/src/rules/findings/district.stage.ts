@@ -1,11 +1,9 @@
 import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { Clock } from '../../common/clock';
-import { groupBy } from '../../common/group-by';
-import { DirtyStages, type DirtyRow } from '../../database/dirty';
+import { DirtyStages } from '../../database/dirty';
 import { UnitOfWork } from '../../database/unit-of-work';
 import { LiveEvaluation } from '../evaluation/live-evaluation';
 import { DistrictBatches } from './district-batches';
-import type { DistrictBlock } from './district-block';
 import { DistrictPlans } from './district-plan';
 import { DistrictRows } from './district-rows';
 
@@ -39,19 +37,14 @@ export class DistrictStage implements OnModuleInit {
     const marks = newest.filter(({ t }) => t > newest[0]!.t - BATCH_SPAN_S);
     if (marks.length === 0) return 0;
     const plans = await this.plans.all();
-    const settled: DirtyRow[] = marks.filter(({ subject }) => !plans.has(subject));
-    const made: DistrictBlock[] = [];
-    for (const [districtId, own] of groupBy(marks, ({ subject }) => subject)) {
-      const plan = plans.get(districtId);
-      if (!plan) continue;
-      const batch = await this.batches.of(plan, own, now);
-      settled.push(...batch.settled);
-      made.push(...batch.blocks);
-    }
+    const known = marks.filter(({ subject }) => plans.has(subject));
+    const strangers = marks.filter(({ subject }) => !plans.has(subject));
+    const batch = await this.batches.of(plans, known, now);
+    const settled = [...strangers, ...batch.settled];
     if (settled.length === 0) return 0;
     await this.work.run(async () => {
-      await this.rows.write(made);
-      await this.evaluation.evaluate(made);
+      await this.rows.write(batch.blocks);
+      await this.evaluation.evaluate(batch.blocks);
       await this.dirty.settle(3, settled);
     }, 'bulk');
     return settled.length;

@@ -1,9 +1,10 @@
 import { between, notKnown, type Quantity } from '@lidwatch/atmosphere';
-import { isMeasureName, type MeasuredValues, type MeasureName } from '@lidwatch/rules';
+import { MEASURE_NAMES, type MeasuredValues, type MeasureName } from '@lidwatch/rules';
 
 /** Bounds as they are kept: null for an open end, both null for not known, with the reason where there is one. */
 type StoredQuantity = [number | null, number | null, string?];
 
+const ALL: ReadonlySet<MeasureName> = new Set(MEASURE_NAMES);
 const NO_REASON = 'nothing was measured';
 const end = (value: number): number | null => (Number.isFinite(value) ? value : null);
 
@@ -22,12 +23,13 @@ export function measuresToJson(values: MeasuredValues): string {
   return JSON.stringify(stored);
 }
 
-/** The measured values that `measuresToJson` wrote; a name that is no measure any more is left out. */
-export function measuresFromJson(text: string): MeasuredValues {
-  const stored = JSON.parse(text) as Record<string, StoredQuantity>;
+/** The measured values that `measuresToJson` wrote, of all measures or of those wanted; others are left out. */
+export function measuresFromJson(text: string, wanted: ReadonlySet<MeasureName> = ALL): MeasuredValues {
+  const stored = JSON.parse(text) as Partial<Record<MeasureName, StoredQuantity>>;
   const values: { [Name in MeasureName]?: Quantity } = {};
-  for (const [name, [lo, hi, reason]] of Object.entries(stored)) {
-    if (isMeasureName(name)) values[name] = quantityOf(lo, hi, reason);
+  for (const name of wanted) {
+    const kept = stored[name];
+    if (kept) values[name] = quantityOf(...kept);
   }
   return values;
 }
