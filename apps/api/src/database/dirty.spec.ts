@@ -48,4 +48,19 @@ describe('what is marked to be worked out', () => {
     await Promise.all([pipeline.dirty.drain(3), pipeline.dirty.drain(3), pipeline.dirty.drainAll()]);
     expect({ most, batches, left: await waiting() }).toEqual({ most: 1, batches: 3, left: [] });
   });
+
+  it('is worked out to the end by a stage that settles only part of what it reads', async () => {
+    const parts: number[] = [];
+    pipeline.dirty.registerStage(3, async () => {
+      const rows = await pipeline.dirty.newest(3, 100, 2_000_000);
+      const part = rows.slice(0, 2);
+      parts.push(part.length);
+      await work.run(() => pipeline.dirty.settle(3, part));
+      return part.length;
+    });
+    await mark([1, 900], [1, 1800], [1, 2700], [1, 3600], [1, 4500]);
+    await pipeline.dirty.drainAll();
+    expect(parts).toEqual([2, 2, 1]);
+    expect(await waiting()).toEqual([]);
+  });
 });

@@ -53,7 +53,8 @@ export class DirtyStages implements OnModuleDestroy {
   private readonly handlers = new Map<Stage, StageHandler>();
   private readonly running = new Map<Stage, Promise<void>>();
   private readonly again = new Set<Stage>();
-  private readonly exhausted = new Set<Stage>();
+  /** How many blocks were read last, where they were all that waited. */
+  private readonly readAll = new Map<Stage, number>();
   private readonly timers = new Map<Stage, NodeJS.Timeout>();
   private closing = false;
 
@@ -99,9 +100,8 @@ export class DirtyStages implements OnModuleDestroy {
       'SELECT subject, t, gen FROM dirty WHERE stage = $1 AND t <= $2 ORDER BY t DESC LIMIT $3',
       [stage, untilT, limit],
     );
-    // Fewer than asked were all there were: what comes meanwhile asks for another turn itself.
-    if (rows.length < limit) this.exhausted.add(stage);
-    else this.exhausted.delete(stage);
+    if (rows.length < limit) this.readAll.set(stage, rows.length);
+    else this.readAll.delete(stage);
     return rows;
   }
 
@@ -151,8 +151,14 @@ export class DirtyStages implements OnModuleDestroy {
     const handler = this.handlers.get(stage);
     do {
       this.again.delete(stage);
-      while (handler && !this.closing && (await handler()) > 0 && !this.exhausted.has(stage));
+      while (handler && !this.closing && (await this.workOutBatch(stage, handler)));
     } while (this.again.has(stage) && !this.closing);
+  }
+
+  /** Whether another batch may be worth a look: not when all that waited was read and settled. */
+  private async workOutBatch(stage: Stage, handler: StageHandler): Promise<boolean> {
+    const settled = await handler();
+    return settled > 0 && settled !== this.readAll.get(stage);
   }
 
   private soon(stage: Stage): void {
