@@ -109,7 +109,7 @@ export const up: readonly string[] = [
   `CREATE TABLE district_block (
      district_id INTEGER NOT NULL, t_end INTEGER NOT NULL, rev INTEGER NOT NULL, block_s INTEGER NOT NULL, speaker_id INTEGER, spoke TEXT, silent TEXT NOT NULL DEFAULT '[]',
      measures TEXT NOT NULL, end_spoke TEXT, end_measures TEXT, strength_lo REAL, strength_hi REAL, within_c REAL, sure INTEGER, reason TEXT,
-     PRIMARY KEY (district_id, t_end)) STRICT, WITHOUT ROWID`,
+     PRIMARY KEY (district_id, t_end)) STRICT`,
 
   // --- rules and proposals --------------------------------------------------------------------------------------
   `CREATE TABLE rule (

@@ -5,6 +5,7 @@ import type { DistrictPlan, PlanTower } from './district-plan';
 import { episodeMinutes, EPISODE_REACH_S, type StrengthAt } from './episode-minutes';
 import { floorToBenchC } from './floor-and-bench';
 import { localMoment } from './local-time';
+import { WITHOUT_FORECAST } from './measures-json';
 import { SMOKE_REACH_S, smokeValues } from './smoke';
 import type { TowerBlocks } from './tower-blocks';
 
@@ -37,15 +38,6 @@ export interface DistrictSources {
 /** How far back a block's values look, s; a change of a tower's block reaches as far ahead. */
 export const REACH_S = Math.max(SMOKE_REACH_S, EPISODE_REACH_S + 3600);
 
-const NO_FORECAST = notKnown('no forecast has been entered');
-const FORECAST: MeasuredValues = {
-  forecastLowC: NO_FORECAST,
-  forecastHighC: NO_FORECAST,
-  forecastWindMPerS: NO_FORECAST,
-  forecastMixingHeightM: NO_FORECAST,
-  mixingHeightM: NO_FORECAST,
-  ventilationIndexM2PerS: NO_FORECAST,
-};
 const GAVE_NOTHING = notKnown('the tower gave nothing for this block');
 
 /** The district's block that ends at t. */
@@ -62,7 +54,7 @@ export function districtBlock(sources: DistrictSources, t: number): DistrictBloc
     episodeMinutes: episodeMinutes({ spoke: begin.spoke, strengthC }, earlier, t, plan.blockS),
     floorToBenchC: floorToBenchC(plan, blocks, t),
     ...smokeValues(hours, t, plan.timeZone),
-    ...FORECAST,
+    ...WITHOUT_FORECAST,
     hourOfDay: exactly(hour),
     month: exactly(month),
   };

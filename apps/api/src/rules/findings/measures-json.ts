@@ -6,7 +6,10 @@ type StoredQuantity = [number | null, number | null, string?];
 
 const ALL: ReadonlySet<MeasureName> = new Set(MEASURE_NAMES);
 const NO_REASON = 'nothing was measured';
-const end = (value: number): number | null => (Number.isFinite(value) ? value : null);
+/** Nine significant digits: far finer than any sensor, and without the tails that arithmetic leaves. */
+const DIGITS = 9;
+const end = (value: number): number | null =>
+  Number.isFinite(value) ? Number(value.toPrecision(DIGITS)) : null;
 
 /** A quantity from two stored ends. Both null is not known, for `reason`. */
 export function quantityOf(lo: number | null, hi: number | null, reason = NO_REASON): Quantity {
@@ -14,10 +17,23 @@ export function quantityOf(lo: number | null, hi: number | null, reason = NO_REA
   return lo === hi ? { lo: lo!, hi: hi! } : between(lo ?? -Infinity, hi ?? Infinity, reason);
 }
 
+const NO_FORECAST = notKnown('no forecast has been entered');
+
+/** What needs a day's forecast, where none was entered. It is left out of what is kept, for it is the usual case. */
+export const WITHOUT_FORECAST: MeasuredValues = {
+  forecastLowC: NO_FORECAST,
+  forecastHighC: NO_FORECAST,
+  forecastWindMPerS: NO_FORECAST,
+  forecastMixingHeightM: NO_FORECAST,
+  mixingHeightM: NO_FORECAST,
+  ventilationIndexM2PerS: NO_FORECAST,
+};
+
 /** Measured values as the JSON text that keeps them. A measure of which nothing is known is kept with its reason. */
 export function measuresToJson(values: MeasuredValues): string {
   const stored: Record<string, StoredQuantity> = {};
   for (const [name, { lo, hi, reason }] of Object.entries(values)) {
+    if (reason === NO_FORECAST.reason) continue;
     stored[name] = reason === undefined ? [end(lo), end(hi)] : [end(lo), end(hi), reason];
   }
   return JSON.stringify(stored);
@@ -30,6 +46,7 @@ export function measuresFromJson(text: string, wanted: ReadonlySet<MeasureName> 
   for (const name of wanted) {
     const kept = stored[name];
     if (kept) values[name] = quantityOf(...kept);
+    else if (name in WITHOUT_FORECAST) values[name] = NO_FORECAST;
   }
   return values;
 }
