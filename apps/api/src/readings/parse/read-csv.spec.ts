@@ -30,10 +30,10 @@ describe('a CSV text of readings', () => {
 
   it('in the long form has a row per reading', async () => {
     const text = 'when;what;worth\n2026-01-10 05:00;low;-9,5\n2026-01-10 05:00;elsewhere;1\n';
-    const mapping = {
-      ...{ format: 'long', separator: ';', decimal: ',', columns: { low: 't2' } },
+    const mapping: Partial<Mapping> = {
+      ...({ format: 'long', separator: ';', decimal: ',', columns: { low: 't2' } } as const),
       ...{ timeColumn: 'when', sensorColumn: 'what', valueColumn: 'worth' },
-    } as const;
+    };
     const { rows, refused } = await readCsv(text, context(mapping));
     expect(rows).toEqual([row(1, -9.5, 2)]);
     expect(refused).toMatchObject([{ rowNo: 3, column: 'what', code: 'sensor-not-known' }]);
