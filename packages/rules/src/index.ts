@@ -17,3 +17,12 @@ export { describeClause, describeCondition, describeGroup } from './explanation/
 export { explain, sentencesOf } from './explanation/explain';
 export type { Explanation } from './explanation/explain';
 export { measuredInWords, minutesInWords, valueInWords } from './explanation/numbers';
+export * from './definition/when-allowed';
+export * from './replay/columns';
+export { FALSE, NOT_KNOWN, TRUE, truthColumn } from './replay/truth-column';
+export * from './replay/replay-rule';
+export * from './replay/day-cases';
+export * from './replay/sweep';
+export * from './scores/contingency';
+export * from './scores/lead-times';
+export * from './scores/scores';

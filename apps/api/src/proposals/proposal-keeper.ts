@@ -1,5 +1,5 @@
 import { openProposalStates } from '@lidwatch/contracts';
-import { NOTICE_KINDS, type NoticeKind } from '@lidwatch/rules';
+import { mayBeginAt, NOTICE_KINDS, type NoticeKind } from '@lidwatch/rules';
 import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
 import { Op } from 'sequelize';
@@ -8,9 +8,9 @@ import { Clock } from '../common/clock';
 import { NoticesService } from '../notices/notices.service';
 import { EvidenceService } from '../rules/evaluation/evidence.service';
 import { LiveEvaluation, type DistrictEvaluation } from '../rules/evaluation/live-evaluation';
+import { localMoment } from '../rules/findings/local-time';
 import { Proposal } from './models/proposal.model';
 import { ProposalNews } from './proposal-news';
-import { mayProposeAt } from './proposal-window';
 
 type Act = 'begin' | 'end';
 
@@ -78,7 +78,7 @@ export class ProposalKeeper implements OnModuleInit {
     const rule = evaluation.rule.body[kind];
     const found = evaluation.kinds.get(kind);
     if (!rule || found?.[act].truth !== 'true' || idleBecause(act, kind, inForce) !== undefined) return false;
-    if (act === 'begin' && !mayProposeAt(rule, evaluation.timeZone, evaluation.tEnd)) return false;
+    if (act === 'begin' && !mayBeginAt(rule, localMoment(evaluation.timeZone, evaluation.tEnd))) return false;
     return !(await this.isTooSoon(evaluation.districtId, kind, act, rule.earliestReproposalMinutes));
   }
 

@@ -1,14 +1,8 @@
 import { tzOffset } from '@date-fns/tz';
+import type { LocalMoment } from '@lidwatch/rules';
 
 const MINUTE_S = 60;
 const DAY_S = 86_400;
-
-/** The calendar and clock of a zone at one instant. */
-export interface LocalMoment {
-  readonly month: number;
-  readonly day: number;
-  readonly hour: number;
-}
 
 const offsetS = (timeZone: string, t: number): number => tzOffset(timeZone, new Date(t * 1000)) * MINUTE_S;
 
