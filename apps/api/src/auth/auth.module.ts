@@ -10,6 +10,7 @@ import { LinksService } from './accounts/links.service';
 import { UsersController } from './accounts/users.controller';
 import { AuthController } from './auth.controller';
 import { AuthService } from './auth.service';
+import { LocalStrategy } from './local.strategy';
 import { LinkTokens } from './links/link-tokens';
 import { ActivityController } from './record/activity.controller';
 import { SessionRow } from './models/session.model';
@@ -27,6 +28,7 @@ import { StaleSessions } from './sessions/stale-sessions';
     { provide: APP_GUARD, useClass: AccessGuard },
     Attempts,
     AuthService,
+    LocalStrategy,
     FirstAdministratorLink,
     InvitationsService,
     LinksService,

@@ -9,6 +9,7 @@ import type { SignIn } from './dto/sign-in.dto';
 import { again, Attempts, fromAddress, onAccount } from './passwords/attempts';
 import { PasswordHasher } from './passwords/password-hasher';
 import { SessionService } from './sessions/session.service';
+import { SignedInPeople } from './sessions/signed-in-people';
 import type { SignedIn } from './signed-in';
 
 /** Signing in and out, and asking for the password again. */
@@ -20,10 +21,9 @@ export class AuthService {
     private readonly sessions: SessionService,
     private readonly hasher: PasswordHasher,
     private readonly attempts: Attempts,
+    private readonly people: SignedInPeople,
     private readonly activity: ActivityService,
-  ) {
-    this.sessions.signInWith((email, password, address) => this.check({ email, password }, address));
-  }
+  ) {}
 
   /**
    * Signs somebody in under a new session. Throws 401 `sign-in-failed`, the same for an unknown e-mail and a wrong
@@ -66,13 +66,14 @@ export class AuthService {
     return right;
   }
 
-  private async check({ email, password }: SignIn, address: string): Promise<{ id: number } | undefined> {
+  /** Who an e-mail and a password sent from an address belong to; undefined when they do not belong together. */
+  async check({ email, password }: SignIn, address: string): Promise<SignedIn | undefined> {
     await this.attempts.begin(onAccount(email), fromAddress(address));
     const user = await this.users.findByEmail(email.trim());
     const right = await this.hasher.matches(user?.retiredAt === null ? user.passwordHash : null, password);
     if (!user || !right) return undefined;
     await this.attempts.forget(onAccount(email));
     await this.attempts.takeBack(fromAddress(address));
-    return user;
+    return this.people.find(await this.people.owner(user.id));
   }
 }

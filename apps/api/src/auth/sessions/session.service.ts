@@ -2,8 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import type { NextFunction, Request, RequestHandler, Response } from 'express';
 import session from 'express-session';
-import { Authenticator } from 'passport';
-import { Strategy } from 'passport-local';
+import { Authenticator, type Strategy } from 'passport';
 import type { Sequelize } from 'sequelize';
 import { Clock } from '../../common/clock';
 import { Settings } from '../../config/settings';
@@ -12,13 +11,6 @@ import { refuseCrossSite } from './same-site';
 import type { SessionOwner } from './session-data';
 import { sessionStore } from './session-store';
 import { SignedInPeople } from './signed-in-people';
-
-/** Checks an e-mail and a password sent from an address. */
-export type PasswordCheck = (
-  email: string,
-  password: string,
-  address: string,
-) => Promise<{ id: number } | undefined>;
 
 const touchAfterS = 60;
 /** Addresses that know no session: residents', the loggers' and the providers'. */
@@ -43,16 +35,9 @@ export class SessionService {
     );
   }
 
-  /** Sets how an e-mail and a password are checked; passport's local strategy asks it. */
-  signInWith(check: PasswordCheck): void {
-    const options = { usernameField: 'email', passReqToCallback: true as const, session: false };
-    this.passport.use(
-      new Strategy(options, (request, email, password, done) => {
-        check(email, password, request.ip ?? '')
-          .then(async (found) => found && this.people.find(await this.people.owner(found.id)))
-          .then((user) => done(null, user ?? false), done);
-      }),
-    );
+  /** Takes the way people show who they are into use. */
+  use(strategy: Strategy): void {
+    this.passport.use(strategy);
   }
 
   /** Who the request's e-mail and password belong to; undefined when they do not belong together. */
