@@ -78,6 +78,7 @@ function airOf(finding: DistrictFinding, profile: ProfileDto | undefined) {
       strengthC: showRange(strength),
       sure: compare(measured('inversionSure'), '=', 1),
       forMinutes: shown('episodeMinutes'),
+      ...(finding.fresh && profile?.inversion && { topM: profile.inversion.topM }),
       open:
         profile?.inversion?.open ?? (!isNotKnown(strength) && strength.hi === Infinity ? 'at the top' : 'no'),
     },

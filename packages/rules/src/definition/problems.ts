@@ -22,7 +22,7 @@ export type ProblemCode =
 
 /** One thing wrong with a rule. */
 export interface Problem {
-  /** Where, as a JSON path (RFC 9535): `$.advisory.begin.all[0].value`. */
+  /** Where, as a JSON path ([RFC9535]): `$.advisory.begin.all[0].value`. */
   readonly path: string;
   readonly code: ProblemCode;
   /** What is wrong and what to do, in a sentence for people. */
@@ -45,7 +45,7 @@ export class ProblemList {
 /**
  * The JSON path of a member of what stands at `path`.
  *
- * Units: none. Valid: any key; one that is no plain name is quoted. Source: RFC 9535 §2.7 (normalized paths, with
+ * Units: none. Valid: any key; one that is no plain name is quoted. Source: [RFC9535] §2.7 (normalized paths, with
  * the dot form for plain names).
  */
 export function memberPath(path: string, key: string): string {

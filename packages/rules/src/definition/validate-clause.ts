@@ -22,7 +22,11 @@ export function validateClause(clause: Fields, path: string, list: ProblemList):
   checkValue(measure, clause['value'], memberPath(path, 'value'), list);
 }
 
-/** The comparisons that make sense for a measure: only a whole number or a yes or no can be equal to something. */
+/**
+ * The comparisons that make sense for a measure: only a whole number or a yes or no can be equal to something.
+ *
+ * Units: none. Valid: any measure. Source: none (the project's own rule language).
+ */
 export function comparisonsFor(measure: MeasureName): readonly string[] {
   const { kind, whole } = MEASURES[measure];
   if (kind === 'yes-no') return ['='];

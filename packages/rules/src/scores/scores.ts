@@ -27,8 +27,7 @@ const ratio = (part: number, whole: number): number | null => (whole === 0 ? nul
 /**
  * The usual scores of a 2 × 2 table of warnings.
  *
- * Units: none. Valid: counts of 0 and above. Source: [Wilks2011] §8.2; WMO/WWRP Joint Working Group on Forecast
- * Verification Research.
+ * Units: none. Valid: counts of 0 and above. Source: [Wilks2011] §8.2; [WWRP] verification pages.
  */
 export function scoresOf({ hits: a, falseAlarms: b, misses: c, correctNegatives: d }: Contingency): Scores {
   const n = a + b + c + d;
