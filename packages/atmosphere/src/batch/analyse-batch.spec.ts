@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { findInversions } from '../inversions';
 import { heatDeficitJPerM2 } from '../mixing';
 import { layersOf, makeProfile, STABILITY_CLASSES } from '../profile';
-import { analyseBatch, batchResult, NO_CLASS, OPEN_CODES, smallExp, SURFACE_CODES } from '.';
+import { analyseBatch, batchResult, NO_CLASS, OPEN_CODES, SURFACE_CODES } from '.';
 
 const tower = fc
   .uniqueArray(fc.integer({ min: 1, max: 400 }), { minLength: 2, maxLength: 7 })
@@ -87,15 +87,5 @@ describe('analyseBatch', () => {
     expect(
       analyseBatch({ ...good, temperatureC: new Float64Array(0), pressureHPa: new Float64Array(0) }).surface,
     ).toHaveLength(0);
-  });
-});
-
-describe('smallExp', () => {
-  it('is the exponential', () => {
-    fc.assert(
-      fc.property(fc.double({ min: -0.1, max: 0.1, noNaN: true }), (x) => {
-        expect(Math.abs(smallExp(x) / Math.exp(x) - 1)).toBeLessThan(1e-15);
-      }),
-    );
   });
 });

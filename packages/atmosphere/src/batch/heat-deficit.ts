@@ -3,13 +3,24 @@ import {
   DRY_AIR_SPECIFIC_HEAT_J_PER_KG_K,
   GRAVITY_M_PER_S2,
   KAPPA,
+  REFERENCE_PRESSURE_HPA,
   ZERO_CELSIUS_K,
 } from '../constants';
-import { exner } from '../temperature';
-import { smallExp } from './small-exp';
 
+/** Constants held in this file: reading an imported one again and again costs more than the arithmetic. */
+const KELVIN = ZERO_CELSIUS_K;
+const MINUS_KAPPA = -KAPPA;
+const REFERENCE_HPA = REFERENCE_PRESSURE_HPA;
 const G_OVER_R = GRAVITY_M_PER_S2 / DRY_AIR_GAS_CONSTANT_J_PER_KG_K;
-const CP_OVER_R = (100 * DRY_AIR_SPECIFIC_HEAT_J_PER_KG_K) / DRY_AIR_GAS_CONSTANT_J_PER_KG_K;
+const CP_OVER_6_R = (100 * DRY_AIR_SPECIFIC_HEAT_J_PER_KG_K) / (6 * DRY_AIR_GAS_CONSTANT_J_PER_KG_K);
+/** Up to this |ln(p/p₀)| (some 350 m of cold air) the series below are exact to 1e-12. */
+const SERIES_UP_TO = 0.06;
+
+/** e to the power of x for |x| ≤ 0.06: its series to the sixth power, else the library's. */
+const exp = (x: number): number =>
+  x > -SERIES_UP_TO && x < SERIES_UP_TO
+    ? 1 + x * (1 + x * (1 / 2 + x * (1 / 6 + x * (1 / 24 + x * (1 / 120 + x / 720)))))
+    : Math.exp(x);
 
 /**
  * Heat deficit of one row of a batch from its lowest level to its level `last`, in one pass: with x = ln(p/p₀),
@@ -26,30 +37,32 @@ export function batchHeatDeficit(
   pressureHPa: number,
 ): number {
   let x = 0;
-  let temperatureK = temperatureC[offset]! + ZERO_CELSIUS_K;
+  let temperatureK = temperatureC[offset]! + KELVIN;
   let density = 1 / temperatureK;
   let densityTheta = 1;
   let sumDensity = 0;
   let sumDensityTheta = 0;
+  let thetaFactor = 1;
   for (let j = 0; j < last; j += 1) {
     const dz = thicknessM[j]!;
-    const topK = temperatureC[offset + j + 1]! + ZERO_CELSIUS_K;
+    const topK = temperatureC[offset + j + 1]! + KELVIN;
     const middleK = 0.5 * (temperatureK + topK);
-    const half = G_OVER_R * dz;
+    const half = 2 * (G_OVER_R * (0.5 * dz));
     const xMiddle = x - half / (temperatureK + middleK);
-    const xTop = xMiddle - half / (middleK + topK);
-    const densityMiddle = smallExp(xMiddle) / middleK;
-    const thetaMiddle = smallExp((1 - KAPPA) * xMiddle);
-    const densityTop = smallExp(xTop) / topK;
-    const thetaTop = smallExp((1 - KAPPA) * xTop);
-    sumDensity += dz * (density + 4 * densityMiddle + densityTop);
-    sumDensityTheta += dz * (densityTheta + 4 * thetaMiddle + thetaTop);
-    x = xTop;
+    x = xMiddle - half / (middleK + topK);
+    const pressureMiddle = exp(xMiddle);
+    const pressureTop = exp(x);
+    thetaFactor = exp(MINUS_KAPPA * x);
+    const densityTop = pressureTop / topK;
+    const densityThetaTop = pressureTop * thetaFactor;
+    sumDensity += dz * (density + (4 * pressureMiddle) / middleK + densityTop);
+    sumDensityTheta +=
+      dz * (densityTheta + 4 * pressureMiddle * exp(MINUS_KAPPA * xMiddle) + densityThetaTop);
     temperatureK = topK;
     density = densityTop;
-    densityTheta = thetaTop;
+    densityTheta = densityThetaTop;
   }
-  const thetaLast = temperatureK * smallExp(-KAPPA * x);
-  const atBase = (CP_OVER_R * pressureHPa) / exner(pressureHPa);
-  return (atBase * (thetaLast * sumDensity - sumDensityTheta)) / 6;
+  const excess = temperatureK * thetaFactor * sumDensity - sumDensityTheta;
+  const log = Math.log(pressureHPa / REFERENCE_HPA);
+  return CP_OVER_6_R * REFERENCE_HPA * Math.exp((1 + MINUS_KAPPA) * log) * excess;
 }

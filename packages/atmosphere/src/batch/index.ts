@@ -1,3 +1,3 @@
-export * from './profiles';
-export { smallExp } from './small-exp';
-export * from './analyse-batch';
+export { batchResult, NO_CLASS, OPEN_CODES, SURFACE_CODES } from './profiles';
+export type { BatchResult, ProfileBatch } from './profiles';
+export { analyseBatch } from './analyse-batch';

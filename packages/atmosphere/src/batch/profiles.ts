@@ -1,3 +1,5 @@
+import { ACCEPTED_PRESSURE_HPA, ACCEPTED_TEMPERATURE_C } from '../profile';
+
 /** Stability classes as numbers, in the order of `STABILITY_CLASSES`; 255 where a layer has none. */
 export const NO_CLASS = 255;
 /** How a surface finding is coded: absent, present, not known. */
@@ -10,7 +12,7 @@ export const OPEN_CODES = { no: 0, 'at the top': 1, 'cut by a missing level': 2 
  * where the level gave nothing.
  */
 export interface ProfileBatch {
-  /** Heights above ground, m, strictly ascending; at least 2, at most 64. */
+  /** Heights above ground, m, strictly ascending, at least 2. */
   readonly heightsM: readonly number[];
   readonly temperatureC: Float64Array;
   /** Pressure at the lowest level of each profile, hPa; NaN takes `assumedPressureHPa`. */
@@ -55,3 +57,24 @@ export function batchResult(profiles: number, levels: number): BatchResult {
     heatAtLeast: new Uint8Array(profiles),
   };
 }
+
+const { lowest: COLDEST_C, highest: WARMEST_C } = ACCEPTED_TEMPERATURE_C;
+const { lowest: LOWEST_HPA, highest: HIGHEST_HPA } = ACCEPTED_PRESSURE_HPA;
+
+/**
+ * Whether a temperature counts as given: neither NaN nor beyond what a profile accepts.
+ *
+ * Units: °C. Valid: any number. Source: [WMOExtremes] bounds of `ACCEPTED_TEMPERATURE_C`.
+ */
+export const isGiven = (temperatureC: number): boolean =>
+  temperatureC >= COLDEST_C && temperatureC <= WARMEST_C;
+
+/**
+ * Pressure of a row: measured where it is acceptable, else the assumed one.
+ *
+ * Units: hPa. Valid: any row of the batch. Source: [ICAO7488] by way of the caller's assumed pressure.
+ */
+export const pressureOf = (batch: ProfileBatch, row: number): number => {
+  const measured = batch.pressureHPa[row]!;
+  return measured >= LOWEST_HPA && measured <= HIGHEST_HPA ? measured : batch.assumedPressureHPa;
+};

@@ -4,7 +4,7 @@ import {
   EPSILON,
   GRAVITY_M_PER_S2,
   ZERO_CELSIUS_K,
-} from '../constants';
+} from '../constants/constants';
 import { saturationVapourPressureBoltonHPa } from './saturation';
 
 /**
