@@ -1,4 +1,3 @@
-import { explain, fromEvidence, sentencesOf } from '@lidwatch/rules';
 import type { NoticeKind, NoticeState } from '@lidwatch/contracts';
 import { Injectable } from '@nestjs/common';
 import { requireOwnDistrict } from '../auth/own-district';
@@ -9,10 +8,11 @@ import { Problem } from '../common/problem';
 import { Sql } from '../database/sql';
 import type { OutboxRow } from '../outbox/dto/outbox-row.dto';
 import { OutboxService } from '../outbox/outbox.service';
+import { showEvidence } from '../rules/dto/evidence.dto';
 import { EvidenceService } from '../rules/evaluation/evidence.service';
 import type { DeliveryQuery, NoticeQuery } from './dto/notice-input.dto';
 import type { NoticeTexts } from './dto/notice-text.dto';
-import type { NoticeBrief, NoticeDetail, NoticeEvidence } from './dto/notice.dto';
+import type { NoticeBrief, NoticeDetail } from './dto/notice.dto';
 import { NoticeEvents } from './notice-events';
 import { topicOf } from './notice-recipients';
 
@@ -97,7 +97,7 @@ export class NoticeLogService {
     return {
       ...brief(row),
       ...{ origin: row.origin, reason: row.reason, texts: JSON.parse(row.texts) as NoticeTexts },
-      ...(row.evidenceId !== null && { evidence: await this.sentences(row.evidenceId) }),
+      ...(row.evidenceId !== null && { evidence: showEvidence(await this.evidence.read(row.evidenceId)) }),
       events: await this.events.list(id),
       delivery: await this.outbox.counts(topicOf(id)),
     };
@@ -108,12 +108,6 @@ export class NoticeLogService {
     const { districtId } = await this.detail(id);
     requireOwnDistrict(by, districtId);
     return this.outbox.page(topicOf(id), query);
-  }
-
-  private async sentences(evidenceId: number): Promise<NoticeEvidence> {
-    const { sha256, body } = await this.evidence.read(evidenceId);
-    const tree = fromEvidence(body.tree);
-    return { sha256, en: sentencesOf(explain(tree, 'en')), es: sentencesOf(explain(tree, 'es')) };
   }
 }
 

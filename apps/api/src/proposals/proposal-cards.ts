@@ -7,7 +7,7 @@ import { offsetOf } from '../common/paging';
 import { Sql } from '../database/sql';
 import type { EvidenceBody } from '../rules/evaluation/evidence.service';
 import type { ProposalQuery } from './dto/decisions.dto';
-import { summaryOf } from './dto/evidence.dto';
+import { summaryOf } from '../rules/dto/evidence.dto';
 import type { ProposalCard, ProposalPage } from './dto/proposal.dto';
 
 interface Row {

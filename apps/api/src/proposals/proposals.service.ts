@@ -9,7 +9,7 @@ import type { ProfileDto } from '../profiles/dto/profile.dto';
 import { EvidenceService, type EvidenceBody } from '../rules/evaluation/evidence.service';
 import { RulesService } from '../rules/rules.service';
 import type { IssueProposal, ProposalQuery } from './dto/decisions.dto';
-import { showEvidence } from './dto/evidence.dto';
+import { showEvidence } from '../rules/dto/evidence.dto';
 import type { ProposalCard, ProposalDetail, ProposalPage } from './dto/proposal.dto';
 import type { Proposal } from './models/proposal.model';
 import { ProposalCards } from './proposal-cards';

@@ -1,6 +1,7 @@
 import { noticeKinds, type NoticeKind, type NoticeState } from '@lidwatch/contracts';
 import { ApiProperty, ApiPropertyOptional, ApiSchema } from '@nestjs/swagger';
 import { pageOf } from '../../common/paging';
+import { EvidenceDto } from '../../rules/dto/evidence.dto';
 import { NoticeTexts } from './notice-text.dto';
 
 export const noticeStates = ['in force', 'ended', 'replaced'] as const satisfies readonly NoticeState[];
@@ -57,21 +58,13 @@ export class DeliveryCount {
   @ApiProperty() count!: number;
 }
 
-/** What was measured when it was decided, in sentences. */
-@ApiSchema({ name: 'NoticeEvidence' })
-export class NoticeEvidence {
-  @ApiProperty() sha256!: string;
-  @ApiProperty({ type: [String] }) en!: string[];
-  @ApiProperty({ type: [String] }) es!: string[];
-}
-
 /** A notice with everything that is known of it. */
 @ApiSchema({ name: 'NoticeDetail' })
 export class NoticeDetail extends NoticeBrief {
   @ApiProperty({ enum: ['proposal', 'by hand'] }) origin!: 'proposal' | 'by hand';
   @ApiProperty() reason!: string;
   @ApiProperty({ type: NoticeTexts }) texts!: NoticeTexts;
-  @ApiPropertyOptional({ type: NoticeEvidence }) evidence?: NoticeEvidence;
+  @ApiPropertyOptional({ type: EvidenceDto }) evidence?: EvidenceDto;
   @ApiProperty({ type: [NoticeEventDto] }) events!: NoticeEventDto[];
   @ApiProperty({ type: [DeliveryCount] }) delivery!: DeliveryCount[];
 }

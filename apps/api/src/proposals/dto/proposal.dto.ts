@@ -3,7 +3,7 @@ import { NOTICE_KINDS, type NoticeKind } from '@lidwatch/rules';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { pageOf } from '../../common/paging';
 import { ProfileDto } from '../../profiles/dto/profile.dto';
-import { EvidenceDto } from './evidence.dto';
+import { EvidenceDto } from '../../rules/dto/evidence.dto';
 
 /** States of a proposal. */
 export const proposalStates = ['open', 'confirmed', 'declined', 'returned', 'issued', 'lapsed'] as const;

@@ -287,7 +287,11 @@ export interface ProposalDetail extends ProposalCard {
   history: HistoryEntry[];
 }
 
-export type DeliveryCounts = Record<Channel, Record<DeliveryState, number>>;
+export interface DeliveryCount {
+  channel: Channel;
+  state: DeliveryState;
+  count: number;
+}
 
 export interface NoticeDetail extends NoticeRow {
   origin: string;
@@ -295,7 +299,7 @@ export interface NoticeDetail extends NoticeRow {
   texts: { en: NoticeText; es: NoticeText };
   evidence?: EvidenceView;
   events: { seq: number; kind: string; at: string; by: string; text: string }[];
-  delivery: DeliveryCounts;
+  delivery: DeliveryCount[];
 }
 
 export interface Delivery {

@@ -16,7 +16,11 @@ export function DeliveryPart({ notice, zone }: { notice: NoticeDetail; zone: str
       <chakra.table width="100%" borderCollapse="collapse">
         <tbody>
           {(['sms', 'email'] as const).map((channel) => (
-            <ChannelRows key={channel} channel={channel} counts={notice.delivery[channel]} />
+            <ChannelRows
+              key={channel}
+              channel={channel}
+              counts={notice.delivery.filter((each) => each.channel === channel)}
+            />
           ))}
         </tbody>
       </chakra.table>
@@ -29,14 +33,10 @@ export function DeliveryPart({ notice, zone }: { notice: NoticeDetail; zone: str
 
 const TITLES: Record<Channel, string> = { sms: 'Texts', email: 'Mail' };
 
-function ChannelRows({
-  channel,
-  counts,
-}: {
-  channel: Channel;
-  counts: NoticeDetail['delivery'][Channel] | undefined;
-}) {
-  const shown = DELIVERY_STATES.filter((state) => (counts?.[state] ?? 0) > 0);
+function ChannelRows({ channel, counts }: { channel: Channel; counts: NoticeDetail['delivery'] }) {
+  const shown = counts.toSorted(
+    (a, b) => DELIVERY_STATES.indexOf(a.state) - DELIVERY_STATES.indexOf(b.state),
+  );
   return (
     <>
       <tr>
@@ -51,10 +51,10 @@ function ChannelRows({
           </chakra.td>
         </tr>
       )}
-      {shown.map((state) => (
+      {shown.map(({ state, count: messages }) => (
         <chakra.tr key={state} borderTopWidth="1px" borderColor="line">
           <td>{deliveryWords(channel, state)}</td>
-          <Cell>{count(counts?.[state] ?? 0)}</Cell>
+          <Cell>{count(messages)}</Cell>
         </chakra.tr>
       ))}
     </>

@@ -3,13 +3,15 @@ import {
   explain,
   fromEvidence,
   MEASURES,
+  measuredInWords,
   sentencesOf,
+  type EvaluatedClause,
   type EvaluatedNode,
   type HeldFacts,
 } from '@lidwatch/rules';
 import { ApiProperty, ApiPropertyOptional, ApiSchema } from '@nestjs/swagger';
 import { RangeValue, showRange } from '../../profiles/dto/range-value.dto';
-import type { EvidenceBody, KeptEvidence } from '../../rules/evaluation/evidence.service';
+import type { EvidenceBody, KeptEvidence } from '../evaluation/evidence.service';
 
 const truths = ['true', 'false', 'not known'];
 
@@ -71,15 +73,16 @@ export function showEvidence({ body, sha256 }: KeptEvidence): EvidenceDto {
   return { tree: showNode(tree), sentences, sha256 };
 }
 
-/** The clauses that decided, in one line: at most three, the ones that are met first. */
+/** What was measured where it decided, in one line: at most three clauses, those that are met. */
 export function summaryOf({ tree }: EvidenceBody): string {
   const clauses = clausesOf(fromEvidence(tree));
   const met = clauses.filter(({ truth }) => truth === 'true');
-  return (met.length > 0 ? met : clauses)
-    .slice(0, 3)
-    .map((clause) => explain(clause, 'en').text)
-    .join('; ');
+  const said = (met.length > 0 ? met : clauses).slice(0, 3).map(({ measure, measured }) => {
+    const { label, kind } = MEASURES[measure];
+    return `${label.en}${kind === 'yes-no' ? ':' : ''} ${measuredInWords(measure, measured, 'en')}`;
+  });
+  return `${said.join('; ')}.`;
 }
 
-const clausesOf = (node: EvaluatedNode): EvaluatedNode[] =>
+const clausesOf = (node: EvaluatedNode): EvaluatedClause[] =>
   node.kind === 'clause' ? [node] : node.parts.flatMap(clausesOf);
