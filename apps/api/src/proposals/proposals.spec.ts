@@ -164,7 +164,7 @@ describe('a proposal', () => {
       state: 'in force',
       reason: 'Calm and clear until morning.',
     });
-    expect(first.body.evidence.en[0]).toBe('All of these: met.');
+    expect(first.body.evidence.sentences.en[0]).toBe('All of these: met.');
     const again = await officer.http
       .post(`/api/proposals/${id}/issue`)
       .send({ previewHash: 'x'.repeat(20), version: 2, requestKey: `key-of-proposal-${id}` });

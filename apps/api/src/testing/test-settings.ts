@@ -9,6 +9,9 @@ export function testSettings(dataDir: string, changes: Partial<Settings> = {}): 
     DEMO: 'off',
     LOG_LEVEL: 'silent',
     PUBLIC_URL: 'http://127.0.0.1',
+    // Nobody listens there: a test that sends nothing on purpose reaches no stand-in that happens to run.
+    SMTP_PORT: '1',
+    SMS_BASE_URL: 'http://127.0.0.1:1',
   };
   return Object.assign(
     readSettings((name) => environment[name]),
