@@ -24,7 +24,7 @@ const exp = (x: number): number =>
 
 /**
  * Heat deficit of one row of a batch from its lowest level to its level `last`, in one pass: with x = ln(p/p₀),
- * ρ ∝ eˣ/T and θ ∝ T e^(−κx), so that Σ w ρ (θ(h) − θ) = θ(h) Σ w ρ − Σ w ρθ needs no second pass.
+ * ρ ∝ eˣ/T and θ ∝ T e^(−κx), so that Σ w ρ (θ(h) − θ) = θ(h) Σ w ρ − Σ w ρθ needs no second pass; and one division stands for the four of a layer.
  *
  * Units: °C, m, hPa in; J/m² out. Valid: levels from `offset` up to `last` all finite. Equal to the single-profile
  * path within rounding. Source: [Whiteman2014] heat deficit, by Simpson's rule.
@@ -47,15 +47,20 @@ export function batchHeatDeficit(
     const dz = thicknessM[j]!;
     const topK = temperatureC[offset + j + 1]! + KELVIN;
     const middleK = 0.5 * (temperatureK + topK);
-    const half = 2 * (G_OVER_R * (0.5 * dz));
-    const xMiddle = x - half / (temperatureK + middleK);
-    x = xMiddle - half / (middleK + topK);
+    const lowerTwo = temperatureK + middleK;
+    const upperTwo = middleK + topK;
+    const one = 1 / (lowerTwo * upperTwo * middleK * topK);
+    const perTwo = one * middleK * topK;
+    const perPoint = one * lowerTwo * upperTwo;
+    const half = G_OVER_R * dz;
+    const xMiddle = x - half * perTwo * upperTwo;
+    x = xMiddle - half * perTwo * lowerTwo;
     const pressureMiddle = exp(xMiddle);
     const pressureTop = exp(x);
     thetaFactor = exp(MINUS_KAPPA * x);
-    const densityTop = pressureTop / topK;
+    const densityTop = pressureTop * perPoint * middleK;
     const densityThetaTop = pressureTop * thetaFactor;
-    sumDensity += dz * (density + (4 * pressureMiddle) / middleK + densityTop);
+    sumDensity += dz * (density + 4 * pressureMiddle * perPoint * topK + densityTop);
     sumDensityTheta +=
       dz * (densityTheta + 4 * pressureMiddle * exp(MINUS_KAPPA * xMiddle) + densityThetaTop);
     temperatureK = topK;
