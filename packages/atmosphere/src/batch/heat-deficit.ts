@@ -6,6 +6,7 @@ import {
   REFERENCE_PRESSURE_HPA,
   ZERO_CELSIUS_K,
 } from '../constants';
+import { shortExp as exp } from './short-exp';
 
 /** Constants held in this file: reading an imported one again and again costs more than the arithmetic. */
 const KELVIN = ZERO_CELSIUS_K;
@@ -13,15 +14,6 @@ const MINUS_KAPPA = -KAPPA;
 const REFERENCE_HPA = REFERENCE_PRESSURE_HPA;
 const G_OVER_R = GRAVITY_M_PER_S2 / DRY_AIR_GAS_CONSTANT_J_PER_KG_K;
 const CP_OVER_6_R = (100 * DRY_AIR_SPECIFIC_HEAT_J_PER_KG_K) / (6 * DRY_AIR_GAS_CONSTANT_J_PER_KG_K);
-/** Up to this |ln(p/p₀)| (some 350 m of cold air) the series below are exact to 1e-12. */
-const SERIES_UP_TO = 0.06;
-
-/** e to the power of x for |x| ≤ 0.06: its series to the sixth power, else the library's. */
-const exp = (x: number): number =>
-  x > -SERIES_UP_TO && x < SERIES_UP_TO
-    ? 1 + x * (1 + x * (1 / 2 + x * (1 / 6 + x * (1 / 24 + x * (1 / 120 + x / 720)))))
-    : Math.exp(x);
-
 /**
  * Heat deficit of one row of a batch from its lowest level to its level `last`, in one pass: with x = ln(p/p₀),
  * ρ ∝ eˣ/T and θ ∝ T e^(−κx), so that Σ w ρ (θ(h) − θ) = θ(h) Σ w ρ − Σ w ρθ needs no second pass; and one division stands for the four of a layer.

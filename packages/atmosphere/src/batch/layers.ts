@@ -7,6 +7,7 @@ import {
 import { SAME_LAPSE_RATE_K_PER_KM } from '../profile';
 import { moistLapseRateKPerKm } from '../temperature';
 import { isGiven, NO_CLASS, pressureOf, type BatchResult, type ProfileBatch } from './profiles';
+import { shortExp } from './short-exp';
 
 /** Constants held in this file: reading an imported one again and again costs more than the arithmetic. */
 const KELVIN = ZERO_CELSIUS_K;
@@ -33,7 +34,7 @@ const meanPressureHPa = (batch: ProfileBatch, row: number, j: number): number =>
     belowC = levelC;
     if (k === j) xLower = x;
   }
-  return 0.5 * pressureOf(batch, row) * (Math.exp(xLower) + Math.exp(x));
+  return 0.5 * pressureOf(batch, row) * (shortExp(xLower) + shortExp(x));
 };
 
 /** The class of a rate above the isothermal band, where Γm may decide. */
