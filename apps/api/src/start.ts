@@ -5,6 +5,7 @@ import { AppModule } from './app.module';
 import { configureApp } from './app.setup';
 import { StartFault } from './common/start-fault';
 import { Settings } from './config/settings';
+import { feedDemo, wakeDemoLoggers } from './demo/feed-demo';
 
 /**
  * Starts the service and listens. What can be cured from outside (a port in use, a folder that cannot be written, a
@@ -24,6 +25,7 @@ export async function start(): Promise<NestExpressApplication | undefined> {
 }
 
 async function listen(): Promise<NestExpressApplication> {
+  await feedDemo();
   const app = await NestFactory.create<NestExpressApplication>(AppModule, {
     bodyParser: false,
     bufferLogs: true,
@@ -40,6 +42,7 @@ async function listen(): Promise<NestExpressApplication> {
   } catch (error) {
     throw (error as NodeJS.ErrnoException).code === 'EADDRINUSE' ? portInUse(settings.port) : error;
   }
+  await wakeDemoLoggers(settings);
   app.get(Logger).log(`Listening at ${await app.getUrl()} for ${settings.publicUrl}`, 'Start');
   return app;
 }

@@ -41,7 +41,7 @@ it('writes the same files in one piece, in pieces of any size, and after being s
   for (let t = from; t <= FIRST_START; t += 7_777) await new LiveLoggers(pieces, () => t).write(t);
   await new LiveLoggers(pieces, () => 0).write(FIRST_START);
   const files = await contents(whole);
-  expect(Object.keys(files).length).toBeGreaterThan(15);
+  expect(Object.keys(files).length).toBeGreaterThan(5);
   expect(await contents(pieces)).toEqual(files);
 });
 
@@ -62,7 +62,7 @@ it('writes wide rows with a name a column and the logger’s own clock', async (
   const at = await folders();
   await (await begun(at, FIRST_START - 7200)).write(FIRST_START);
   const files = await contents(at);
-  const mill = files[path.join('mill-mast', 'mill-mast_2026-11-30.csv')] as string;
+  const mill = files[path.join('mill-mast', 'mill-mast_2026-11.csv')] as string;
   expect(mill.split('\n')[0]).toBe('time,T 2 m,T 10 m,T 30 m,T 60 m,RH 2 m,Wind 10 m,Pressure 2 m');
   expect(mill.trimEnd().split('\n').at(-1)).toMatch(
     /^2026-11-30 22:00:00,(-?\d+\.\d\d,){4}\d+\.\d,\d+\.\d,\d+\.\d$/,

@@ -11,13 +11,14 @@ const SEED = 20_251;
 
 /** Where the loggers write and what they remember. */
 export interface LoggerFolders {
-  /** One folder a tower, one file a day. */
+  /** One folder a tower, one file a month. */
   readonly loggerDir: string;
   readonly stateFile: string;
 }
 
-/** The file of a tower and date, within the loggers' folder. */
-const fileOf = (tower: DemoTower, date: string): string => path.join(tower.slug, `${tower.slug}_${date}.csv`);
+/** The file of a tower and month, within the loggers' folder. */
+const fileOf = (tower: DemoTower, month: string): string =>
+  path.join(tower.slug, `${tower.slug}_${month}.csv`);
 
 /** Writes the demo towers' files, each instant once, in pieces of any size. */
 export class LoggerFiles {
@@ -96,7 +97,7 @@ export class LoggerFiles {
     for (let t = (Math.floor(before.until / stepS) + 1) * stepS; t <= until; t += stepS) {
       const row = loggerRow(this.story, tower, t);
       if (!row) continue;
-      const file = fileOf(tower, row.date);
+      const file = fileOf(tower, row.month);
       if (!linesByFile.has(file)) linesByFile.set(file, []);
       linesByFile.get(file)?.push(row.line);
       rows += 1;

@@ -56,9 +56,9 @@ export function headerLine(tower: DemoTower): string {
   return `time,${tower.sensors.map(({ name }) => name).join(',')}\n`;
 }
 
-/** A row of a tower's file: the date it is filed under and the line itself. */
+/** A row of a tower's file: the month it is filed under and the line itself. */
 export interface LoggerRow {
-  readonly date: string;
+  readonly month: string;
   readonly line: string;
 }
 
@@ -73,5 +73,5 @@ export function loggerRow(story: Story, tower: DemoTower, tEnd: number): LoggerR
     (tower.stamp === 'start' ? tEnd - tower.intervalMinutes * 60 : tEnd) + clockErrorS(story, tower, tEnd);
   const time = loggerTime(stampedAt, tower.clock);
   const values = tower.sensors.map((sensor) => shownValue(story, tower, sensor, tEnd));
-  return { date: loggerTime(tEnd, tower.clock).slice(0, 10), line: `${time},${values.join(',')}\n` };
+  return { month: loggerTime(tEnd, tower.clock).slice(0, 7), line: `${time},${values.join(',')}\n` };
 }

@@ -42,7 +42,10 @@ interface Winters {
 /** Where the demo's data lies, seen from the built code as from the source. */
 export const DEMO_FOLDER = path.resolve(__dirname, '../../../../fixtures/demo');
 
-/** Days before and after the first start, as they always are: a cold pool that is three days old, and its end. */
+/**
+ * Days before and after the first start, as they always are: a cold pool of four days whose last night
+ * was clear again, and its end.
+ */
 const AROUND_THE_START: Readonly<Record<number, Weather>> = {
   [-7]: 'W',
   [-6]: 'K',
@@ -50,12 +53,13 @@ const AROUND_THE_START: Readonly<Record<number, Weather>> = {
   [-4]: '1',
   [-3]: '2',
   [-2]: '3',
-  [-1]: '4',
-  0: '5',
-  1: '6',
-  2: 'E',
-  3: 'W',
-  4: 'P',
+  [-1]: '2',
+  0: '3',
+  1: '4',
+  2: '5',
+  3: '6',
+  4: 'E',
+  5: 'W',
 };
 
 /** The story of the basin's weather around the day on which the demo was first started. */
