@@ -16,7 +16,7 @@ const END_WITH_PARENT = pathToFileURL(inRoot('scripts/house/end-with-parent.mjs'
  * @param {(line: string) => void} onLine every line it prints
  */
 export function startChild(name, file, env, onLine) {
-  const child = spawn(process.execPath, ['--enable-source-maps', '--import', END_WITH_PARENT, inRoot(file)], {
+  const child = spawn(process.execPath, ['--import', END_WITH_PARENT, inRoot(file)], {
     env: { ...process.env, ...env },
     stdio: ['ignore', 'pipe', 'pipe', 'ipc'],
     detached: true,

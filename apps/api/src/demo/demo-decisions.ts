@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import type { SignedIn } from '../auth/signed-in';
 import { Clock } from '../common/clock';
 import { DistrictsService } from '../districts/districts.service';
+import { NoticesService } from '../notices/notices.service';
 import type { ProposalCard } from '../proposals/dto/proposal.dto';
 import { ProposalsService } from '../proposals/proposals.service';
 import type { DemoStaff } from './demo-office';
@@ -18,6 +19,7 @@ export class DemoDecisions {
   constructor(
     private readonly proposals: ProposalsService,
     private readonly districts: DistrictsService,
+    private readonly notices: NoticesService,
     private readonly clock: Clock,
   ) {}
 
@@ -43,13 +45,14 @@ export class DemoDecisions {
     await this.proposals.decline(id, staff.analyst, pick(words.holdOpen, id), version);
   }
 
-  /** The district's officer issues what they were shown or, now and then, sends it back. */
+  /** The district's officer issues what they were shown or, now and then, sends it back; a ban makes an advisory idle. */
   async byTheOfficer(
     card: ProposalCard,
     staff: DemoStaff,
     { words, password }: DemoScenario,
-  ): Promise<'issued' | 'returned'> {
+  ): Promise<'issued' | 'returned' | 'nothing'> {
     const { id, act, version } = card;
+    if (await this.banCovers(card)) return 'nothing';
     const by = await this.officerOf(card, staff);
     if (act === 'begin' && draw('return', id, version) < RETURNED_SHARE) {
       await this.proposals.return(id, by, pick(words.returnBegin, 'reason', id), version);
@@ -63,6 +66,11 @@ export class DemoDecisions {
       requestKey: `demo-proposal-${id}`,
     });
     return 'issued';
+  }
+
+  private async banCovers({ act, kind, districtId }: ProposalCard): Promise<boolean> {
+    if (act !== 'begin' || kind !== 'advisory') return false;
+    return (await this.notices.inForce(districtId)).some((notice) => notice.kind === 'burnBan');
   }
 
   private async officerOf({ districtId }: ProposalCard, staff: DemoStaff): Promise<SignedIn> {

@@ -13,6 +13,7 @@ import type { NoticePreview } from './dto/notice-preview.dto';
 import { Notice } from './models/notice.model';
 import { NoticeComposer, type NoticeSubject } from './notice-composer';
 import { NoticeEvents } from './notice-events';
+import { NoticeExpiry } from './notice-expiry';
 import { NoticeRecipients } from './notice-recipients';
 import { refuseEnd, writtenEnd } from './written-end';
 import { smsSize } from './texts/sms-segments';
@@ -52,6 +53,7 @@ export class NoticesService {
     private readonly composer: NoticeComposer,
     private readonly events: NoticeEvents,
     private readonly recipients: NoticeRecipients,
+    private readonly expiry: NoticeExpiry,
     private readonly auth: AuthService,
     private readonly activity: ActivityService,
     private readonly work: UnitOfWork,
@@ -112,6 +114,7 @@ export class NoticesService {
       if (before !== undefined) return this.find(before);
       const now = this.clock.now();
       const expiresAt = writtenEnd(order.expiresAt, now);
+      await this.expiry.closeDue();
       await this.makeRoom(order, now);
       const composed = await this.composer.compose({ ...order, act: 'begin', expiresAt });
       refuseOther(composed.hash, order.previewHash);
@@ -178,7 +181,12 @@ export class NoticesService {
   /** A burn ban takes an advisory's place; nothing takes a burn ban's, and one of a kind is enough. */
   private async makeRoom({ districtId, kind, by }: IssueOrder, now: number): Promise<void> {
     for (const other of await this.notices.findAll({ where: { districtId, state: 'in force' } })) {
-      if (other.kind === kind || other.kind === 'burnBan') throw await this.events.alreadyDone(other);
+      if (other.kind === kind) throw await this.events.alreadyDone(other);
+      if (other.kind === 'burnBan')
+        throw new Problem(
+          'not-possible-now',
+          `The burn ban ${other.ref} is in force here; an advisory would say less than it does.`,
+        );
       await other.update({ state: 'replaced', endedAt: now, endedBy: by.id, version: other.version + 1 });
       await this.events.add(other, 'replaced', by, 'A burn ban took its place.');
       await this.events.silence(other);
