@@ -36,7 +36,7 @@ const STEPS = [
           '--log-level',
           'warn',
           '--check',
-          'apps/*/src',
+          'apps',
           'packages',
           'scripts',
           'fixtures',

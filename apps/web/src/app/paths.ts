@@ -15,7 +15,11 @@ export const paths = {
   history: '/history',
   notices: '/notices',
   notice: (id: number | ':id' = ':id') => `/notices/${id}`,
+  rules: '/rules',
   admin: '/admin',
+  adminTowers: '/admin/towers',
+  adminTower: (id: number | ':id' = ':id') => `/admin/towers/${id}`,
+  adminDistricts: '/admin/districts',
 } as const;
 
 /** Where each role's work begins after signing in. */

@@ -1750,10 +1750,77 @@ export interface components {
       password?: string;
       requestKey: string;
     };
-    NoticeEvidence: {
-      sha256: string;
+    HeldFacts: {
+      neededMinutes: number;
+      toleratedMinutes: number;
+      recordMinutes: number;
+      trueMinutes: number;
+      falseMinutes: number;
+      notKnownMinutes: number;
+      /** @enum {string} */
+      recordStartsAfter?: 'change of tower' | 'start of record' | 'nothing on record';
+    };
+    EvaluatedNode: {
+      /** @enum {string} */
+      kind: 'clause' | 'all' | 'any' | 'not';
+      /**
+       * @description What counts, held-for included
+       * @enum {string}
+       */
+      truth: 'true' | 'false' | 'not known';
+      /**
+       * @description What holds at this block
+       * @enum {string}
+       */
+      now: 'true' | 'false' | 'not known';
+      /** @description The condition and what was found, in one sentence */
+      sentence: string;
+      held?: components['schemas']['HeldFacts'];
+      /** @enum {string} */
+      measure?:
+        | 'inversionStrengthC'
+        | 'strengthWithinTowerC'
+        | 'gradientCPer100m'
+        | 'depthM'
+        | 'inversionSure'
+        | 'episodeMinutes'
+        | 'stableDepthM'
+        | 'elevatedLid'
+        | 'elevatedLidBaseM'
+        | 'elevatedLidStrengthC'
+        | 'floorToBenchC'
+        | 'deltaTClass'
+        | 'heatDeficitMJPerM2'
+        | 'mixingHeightM'
+        | 'ventilationIndexM2PerS'
+        | 'surfaceTemperatureC'
+        | 'relativeHumidityPct'
+        | 'windSpeedMPerS'
+        | 'pm25Hour'
+        | 'pm25NowCast'
+        | 'pm25Day'
+        | 'pm25Running24h'
+        | 'forecastLowC'
+        | 'forecastHighC'
+        | 'forecastWindMPerS'
+        | 'forecastMixingHeightM'
+        | 'hourOfDay'
+        | 'month';
+      /** @enum {string} */
+      op?: '>=' | '>' | '<=' | '<' | '=';
+      value?: number | boolean;
+      measured?: components['schemas']['RangeValue'];
+      parts?: components['schemas']['EvaluatedNode'][];
+    };
+    EvidenceSentences: {
       en: string[];
       es: string[];
+    };
+    Evidence: {
+      tree: components['schemas']['EvaluatedNode'];
+      sentences: components['schemas']['EvidenceSentences'];
+      /** @description SHA-256 of the evidence as it is kept */
+      sha256: string;
     };
     NoticeEvent: {
       seq: number;
@@ -1803,7 +1870,7 @@ export interface components {
       origin: 'proposal' | 'by hand';
       reason: string;
       texts: components['schemas']['NoticeTexts'];
-      evidence?: components['schemas']['NoticeEvidence'];
+      evidence?: components['schemas']['Evidence'];
       events: components['schemas']['NoticeEvent'][];
       delivery: components['schemas']['DeliveryCount'][];
     };
@@ -1876,78 +1943,6 @@ export interface components {
     ProposalRule: {
       id: number;
       version: number;
-    };
-    HeldFacts: {
-      neededMinutes: number;
-      toleratedMinutes: number;
-      recordMinutes: number;
-      trueMinutes: number;
-      falseMinutes: number;
-      notKnownMinutes: number;
-      /** @enum {string} */
-      recordStartsAfter?: 'change of tower' | 'start of record' | 'nothing on record';
-    };
-    EvaluatedNode: {
-      /** @enum {string} */
-      kind: 'clause' | 'all' | 'any' | 'not';
-      /**
-       * @description What counts, held-for included
-       * @enum {string}
-       */
-      truth: 'true' | 'false' | 'not known';
-      /**
-       * @description What holds at this block
-       * @enum {string}
-       */
-      now: 'true' | 'false' | 'not known';
-      /** @description The condition and what was found, in one sentence */
-      sentence: string;
-      held?: components['schemas']['HeldFacts'];
-      /** @enum {string} */
-      measure?:
-        | 'inversionStrengthC'
-        | 'strengthWithinTowerC'
-        | 'gradientCPer100m'
-        | 'depthM'
-        | 'inversionSure'
-        | 'episodeMinutes'
-        | 'stableDepthM'
-        | 'elevatedLid'
-        | 'elevatedLidBaseM'
-        | 'elevatedLidStrengthC'
-        | 'floorToBenchC'
-        | 'deltaTClass'
-        | 'heatDeficitMJPerM2'
-        | 'mixingHeightM'
-        | 'ventilationIndexM2PerS'
-        | 'surfaceTemperatureC'
-        | 'relativeHumidityPct'
-        | 'windSpeedMPerS'
-        | 'pm25Hour'
-        | 'pm25NowCast'
-        | 'pm25Day'
-        | 'pm25Running24h'
-        | 'forecastLowC'
-        | 'forecastHighC'
-        | 'forecastWindMPerS'
-        | 'forecastMixingHeightM'
-        | 'hourOfDay'
-        | 'month';
-      /** @enum {string} */
-      op?: '>=' | '>' | '<=' | '<' | '=';
-      value?: number | boolean;
-      measured?: components['schemas']['RangeValue'];
-      parts?: components['schemas']['EvaluatedNode'][];
-    };
-    EvidenceSentences: {
-      en: string[];
-      es: string[];
-    };
-    Evidence: {
-      tree: components['schemas']['EvaluatedNode'];
-      sentences: components['schemas']['EvidenceSentences'];
-      /** @description SHA-256 of the evidence as it is kept */
-      sha256: string;
     };
     HistoryEntry: {
       /** Format: date-time */

@@ -1,0 +1,51 @@
+import { api, withQuery } from '../../lib/api/client';
+import type { Page, Role } from '../../lib/api/types';
+import { useApi } from '../../lib/api/use-api';
+import type { District, IngestKey, Measure, Office, Rule, Source, Tower, User } from './types';
+
+export const useUsers = () => useApi<Page<User>>(withQuery('/api/users', { pageSize: 200 }));
+export const useTowers = () => useApi<Tower[]>('/api/towers');
+export const useTower = (id: number) => useApi<Tower>(`/api/towers/${id}`);
+export const useSources = (towerId: number) => useApi<Source[]>(`/api/towers/${towerId}/sources`);
+export const useKeys = (towerId: number) => useApi<IngestKey[]>(`/api/towers/${towerId}/keys`);
+export const useDistrictSettings = () => useApi<District[]>('/api/districts');
+export const useRules = (districtId: number | undefined) =>
+  useApi<Rule[]>(districtId === undefined ? null : `/api/districts/${districtId}/rules`);
+export const useMeasures = () => useApi<Measure[]>('/api/rules/measures');
+export const useOffice = () => useApi<Office>('/api/office');
+
+/** Whom to invite. */
+export interface Invitation {
+  email: string;
+  name: string;
+  role: Role;
+  districtIds: number[];
+}
+
+export const invite = (invitation: Invitation) =>
+  api.post<{ user: User; invitationUrl: string }>('/api/users', invitation);
+export const changeUser = (id: number, change: { role: Role; districtIds: number[] }) =>
+  api.patch<User>(`/api/users/${id}`, change);
+export const retireUser = (id: number) => api.post<User>(`/api/users/${id}/retire`);
+export const newPasswordLink = (id: number) => api.post<{ url: string }>(`/api/users/${id}/password-link`);
+
+export const addTower = (tower: object) => api.post<Tower>('/api/towers', tower);
+export const changeTower = (id: number, change: object) => api.patch<Tower>(`/api/towers/${id}`, change);
+export const addSensor = (towerId: number, sensor: object) =>
+  api.post<object>(`/api/towers/${towerId}/sensors`, sensor);
+export const retireSensor = (id: number) => api.patch<object>(`/api/sensors/${id}`, { retired: true });
+export const addSource = (towerId: number, source: object) =>
+  api.post<Source>(`/api/towers/${towerId}/sources`, source);
+export const makeKey = (towerId: number, name: string) =>
+  api.post<{ id: number; key: string }>(`/api/towers/${towerId}/keys`, { name });
+export const revokeKey = (id: number) => api.remove<object>(`/api/keys/${id}`);
+
+export const addDistrict = (district: object) => api.post<District>('/api/districts', district);
+export const changeDistrict = (id: number, change: object) =>
+  api.patch<District>(`/api/districts/${id}`, change);
+
+export const draftRule = (districtId: number, draft: { body: unknown; note: string }) =>
+  api.post<Rule>(`/api/districts/${districtId}/rules`, draft);
+export const putInForce = (ruleId: number) => api.post<Rule>(`/api/rules/${ruleId}/put-in-force`);
+
+export const setOffice = (office: Office) => api.put<Office>('/api/office', office);

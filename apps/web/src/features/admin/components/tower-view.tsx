@@ -1,0 +1,30 @@
+import { Stack } from '@chakra-ui/react';
+import { Card } from '../../../components/ui/card';
+import { PartTitle } from '../../../components/ui/heading';
+import type { Tower } from '../types';
+import { KeysPart } from './keys-part';
+import { SensorsPart } from './sensors-part';
+import { SourcesPart } from './sources-part';
+import { TowerForm } from './tower-form';
+
+interface TowerViewProps {
+  tower: Tower;
+  /** Keys are the administrator's alone. */
+  mayMakeKeys: boolean;
+  onChanged: () => void;
+}
+
+/** One tower: its sensors, where its readings come from, its keys, and its settings. */
+export function TowerView({ tower, mayMakeKeys, onChanged }: TowerViewProps) {
+  return (
+    <Stack gap="5">
+      <SensorsPart tower={tower} onChanged={onChanged} />
+      <SourcesPart towerId={tower.id} />
+      <KeysPart towerId={tower.id} sensor={tower.sensors[0]?.name} mayMakeKeys={mayMakeKeys} />
+      <Card padded>
+        <PartTitle mb="3">Settings</PartTitle>
+        <TowerForm key={tower.version} tower={tower} onSaved={onChanged} />
+      </Card>
+    </Stack>
+  );
+}
