@@ -9,6 +9,7 @@
     }
   }
   const dark =
-    (chosen() ?? (globalThis.matchMedia('(prefers-color-scheme: dark)').matches ? 'dark' : 'light')) === 'dark';
+    (chosen() ?? (globalThis.matchMedia('(prefers-color-scheme: dark)').matches ? 'dark' : 'light')) ===
+    'dark';
   globalThis.document.documentElement.classList.toggle('dark', dark);
 })();

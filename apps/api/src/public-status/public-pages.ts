@@ -107,7 +107,7 @@ export class PublicPages implements OnModuleInit {
     const page = this.pages.get(`${lang} ${slug ?? '/'}`);
     if (!page) return next();
     response.setHeader('Content-Type', 'text/html; charset=utf-8');
-    response.setHeader('Cache-Control', 'public, max-age=15');
+    response.setHeader('Cache-Control', 'public, no-cache');
     response.setHeader('ETag', page.etag);
     if (request.headers['if-none-match'] === page.etag) response.status(304).end();
     else response.end(request.method === 'HEAD' ? undefined : page.html);

@@ -13,7 +13,7 @@ export class PublicStatusController {
 
   /** Tells what holds in every district. */
   @Get('status')
-  @Header('Cache-Control', 'public, max-age=15')
+  @Header('Cache-Control', 'public, no-cache')
   @ApiOkResponse({ type: [PublicStatusDto] })
   list(): Promise<PublicStatusDto[]> {
     return this.status.list();
@@ -21,7 +21,7 @@ export class PublicStatusController {
 
   /** Tells what holds in one district. */
   @Get('districts/:slug')
-  @Header('Cache-Control', 'public, max-age=15')
+  @Header('Cache-Control', 'public, no-cache')
   @ApiOkResponse({ type: PublicStatusDto })
   get(@Param('slug') slug: string): Promise<PublicStatusDto> {
     return this.status.get(slug);

@@ -129,13 +129,14 @@ describe('smoke in Mill Flats', () => {
 });
 
 describe('the story', () => {
-  it('tells of a cold pool in its fifth day at whatever date the demo is first started', () => {
+  it('tells of a cold pool whose last night was clear again, at whatever date the demo is first started', () => {
     for (const start of [Date.UTC(2026, 6, 14, 3), Date.UTC(2027, 0, 31, 12), Date.UTC(2028, 1, 29, 23)]) {
       const told = new Story(1, start / 1000);
       const { day } = localTime(start / 1000);
-      expect([-4, -3, -2, -1, 0, 1, 2].map((i) => told.weather(day + i)).join('')).toBe('123456E');
+      const days = [-4, -3, -2, -1, 0, 1, 2, 3, 4];
+      expect(days.map((i) => told.weather(day + i)).join('')).toBe('12323456E');
       const noon = instantOf(day, 12);
-      expect(hourlySmoke(told, 1, noon)).toBeGreaterThan(30);
+      expect(hourlySmoke(told, 1, noon)).toBeGreaterThan(20);
     }
   });
 });

@@ -23,7 +23,11 @@ export function NoticeFilterBar({ districts, field, onChange }: NoticeFilterBarP
       role="search"
       aria-label="Narrow the notices"
       gap="3"
-      templateColumns={{ base: '1fr 1fr', md: 'repeat(3, 1fr)', xl: 'repeat(5, 1fr) 1.6fr' }}
+      templateColumns={{
+        base: 'repeat(auto-fit, minmax(9.5rem, 1fr))',
+        md: 'repeat(3, 1fr)',
+        xl: 'repeat(5, 1fr) 1.6fr',
+      }}
       data-screen-only
       onSubmit={(event) => event.preventDefault()}
     >

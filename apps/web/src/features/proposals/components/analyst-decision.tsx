@@ -15,15 +15,21 @@ interface AnalystDecisionProps {
   proposal: ProposalDetail;
   /** Called after each answer of the service, so that the page shows what holds now. */
   onAnswer: () => void;
+  /** Called once the decision was taken here. */
+  onDone: () => void;
 }
 
 /** The analyst's decision: confirm with a sentence for the officer, or decline with a reason. */
-export function AnalystDecision({ proposal, onAnswer }: AnalystDecisionProps) {
+export function AnalystDecision({ proposal, onAnswer, onDone }: AnalystDecisionProps) {
   const { id, version } = proposal;
   const [declining, setDeclining] = useState(false);
   const form = useForm({ defaultValues: { note: '' } });
-  const confirm = useAct((note: string) => confirmProposal(id, { note, version }).finally(onAnswer));
-  const decline = useAct((reason: string) => declineProposal(id, { reason, version }).finally(onAnswer));
+  const confirm = useAct((note: string) =>
+    confirmProposal(id, { note, version }).then(onDone).finally(onAnswer),
+  );
+  const decline = useAct((reason: string) =>
+    declineProposal(id, { reason, version }).then(onDone).finally(onAnswer),
+  );
   const { errors } = form.formState;
   return (
     <form

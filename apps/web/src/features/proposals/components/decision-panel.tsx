@@ -15,24 +15,24 @@ interface DecisionPanelProps {
 
 /**
  * What the reader may do with the proposal now. A form once shown stays, with what was typed, when somebody else
- * decides meanwhile: the sentence above it says what they did.
+ * decides meanwhile: the sentence above it says what they did. After one's own decision only the sentence stays.
  */
 export function DecisionPanel({ proposal, me, zone, onAnswer }: DecisionPanelProps) {
   const mine = me.role === 'officer' && me.districts.some(({ id }) => id === proposal.districtId);
   const analystsTurn = me.role === 'analyst' && (proposal.state === 'open' || proposal.state === 'returned');
   const officersTurn = mine && proposal.state === 'confirmed';
   const [began] = useState({ analyst: analystsTurn, officer: officersTurn });
+  const [acted, setActed] = useState(false);
+  const overtaken = !acted && ((began.analyst && !analystsTurn) || (began.officer && !officersTurn));
   const sentence = stateSentence(proposal, zone);
   return (
     <Stack gap="3">
       {sentence && !(officersTurn && proposal.state === 'confirmed') && (
-        <Message
-          tone={(began.analyst && !analystsTurn) || (began.officer && !officersTurn) ? 'warn' : 'info'}
-        >
-          {sentence}
-        </Message>
+        <Message tone={overtaken ? 'warn' : 'info'}>{sentence}</Message>
       )}
-      {(analystsTurn || began.analyst) && <AnalystDecision proposal={proposal} onAnswer={onAnswer} />}
+      {(analystsTurn || (began.analyst && !acted)) && (
+        <AnalystDecision proposal={proposal} onAnswer={onAnswer} onDone={() => setActed(true)} />
+      )}
       {officersTurn && <OfficerDecision proposal={proposal} zone={zone} onAnswer={onAnswer} />}
       {me.role === 'officer' && !mine && (
         <Message>This is not one of your districts: you can read it.</Message>
