@@ -112,7 +112,10 @@ export async function journey({ step, product, window }) {
     await look(analyst, '07-proposal');
     await second.goto(new URL(analyst.url()).pathname);
     await analyst.getByRole('button', { name: 'Confirm for the officer' }).click();
-    await analyst.getByText(/Confirmed by Tomas Reyle at/).first().waitFor();
+    await analyst
+      .getByText(/Confirmed by Tomas Reyle at/)
+      .first()
+      .waitFor();
   });
 
   await step(

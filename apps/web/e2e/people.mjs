@@ -81,7 +81,9 @@ export async function look(page, name) {
 async function atRest(page) {
   await page.evaluate(async () => {
     await document.fonts.ready;
-    await new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(resolve)));
+    await new Promise((resolve) =>
+      globalThis.requestAnimationFrame(() => globalThis.requestAnimationFrame(resolve)),
+    );
     const finite = document
       .getAnimations()
       .filter((each) => Number.isFinite(each.effect?.getComputedTiming().endTime));
