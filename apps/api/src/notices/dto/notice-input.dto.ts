@@ -3,7 +3,8 @@ import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
 import { IsIn, IsInt, IsISO8601, IsOptional, IsString, Length, MaxLength } from 'class-validator';
 import { PageQuery } from '../../common/paging';
-import { deliveryStates, noticeStates, type DeliveryState } from './notice.dto';
+import { outboxStates, type OutboxState } from '../../outbox/dto/outbox-row.dto';
+import { noticeStates } from './notice.dto';
 
 const instant = { strict: true, strictSeparator: true };
 
@@ -71,7 +72,7 @@ export class NoticeQuery extends PageQuery {
 
 /** Which messages of a notice are wanted. */
 export class DeliveryQuery extends PageQuery {
-  @ApiPropertyOptional({ enum: deliveryStates }) @IsOptional() @IsIn(deliveryStates) state?: DeliveryState;
+  @ApiPropertyOptional({ enum: outboxStates }) @IsOptional() @IsIn(outboxStates) state?: OutboxState;
   @ApiPropertyOptional({ enum: ['email', 'sms'] }) @IsOptional() @IsIn(['email', 'sms']) channel?:
     'email' | 'sms';
 }

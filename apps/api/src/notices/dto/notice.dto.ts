@@ -1,20 +1,11 @@
 import { noticeKinds, type NoticeKind, type NoticeState } from '@lidwatch/contracts';
 import { ApiProperty, ApiPropertyOptional, ApiSchema } from '@nestjs/swagger';
 import { pageOf } from '../../common/paging';
+import { outboxStates, type OutboxState } from '../../outbox/dto/outbox-row.dto';
 import { EvidenceDto } from '../../rules/dto/evidence.dto';
 import { NoticeTexts } from './notice-text.dto';
 
 export const noticeStates = ['in force', 'ended', 'replaced'] as const satisfies readonly NoticeState[];
-export const deliveryStates = [
-  'queued',
-  'sending',
-  'accepted',
-  'delivered',
-  'failed',
-  'suppressed',
-  'expired',
-] as const;
-export type DeliveryState = (typeof deliveryStates)[number];
 
 /** A notice in one line. */
 @ApiSchema({ name: 'NoticeBrief' })
@@ -54,7 +45,7 @@ export class NoticeEventDto {
 @ApiSchema({ name: 'DeliveryCount' })
 export class DeliveryCount {
   @ApiProperty({ enum: ['email', 'sms'] }) channel!: 'email' | 'sms';
-  @ApiProperty({ enum: deliveryStates }) state!: DeliveryState;
+  @ApiProperty({ enum: outboxStates }) state!: OutboxState;
   @ApiProperty() count!: number;
 }
 

@@ -7,7 +7,7 @@ import {
 } from '@lidwatch/rules';
 import type { EvaluatedClause, EvaluatedNode } from '../../lib/api/types';
 import { duration } from '../../lib/format/time';
-import { asRange, measuredText } from './measured';
+import { measuredText } from './measured';
 import { TruthMark } from './truth-mark';
 
 /** Truth, words, what was measured: in one line where there is room, the words below on a phone. */
@@ -64,7 +64,7 @@ function Node({ node }: { node: EvaluatedNode }) {
 }
 
 function Clause({ clause }: { clause: EvaluatedClause }) {
-  const { notKnown } = asRange(clause.measured);
+  const { notKnown } = clause.measured;
   return (
     <Row>
       <Box gridArea="truth">

@@ -1,4 +1,4 @@
-import type { EvaluatedNode, Measured, Profile, Truth } from '../../lib/api/types';
+import type { EvaluatedNode, Profile, RangeValue, Truth } from '../../lib/api/types';
 import { clausesOf, measuredText } from './measured';
 
 /** A number a decision rests on, with what it is. */
@@ -21,7 +21,7 @@ const sure = (truth: Truth | undefined) =>
 /** The two or three numbers an officer reads first: the inversion, then smoke or what else the rule asked about. */
 export function headlineNumbers(tree: EvaluatedNode, profile: Profile | null): HeadlineNumber[] {
   const clauses = clausesOf(tree);
-  const found = (measure: string): Measured | undefined =>
+  const found = (measure: string): RangeValue | undefined =>
     clauses.find((clause) => clause.measure === measure)?.measured;
   const strength = found('inversionStrengthC') ?? profile?.inversion?.strengthC;
   const certain = profile?.inversion ? (profile.inversion.sure ? 'true' : 'false') : undefined;

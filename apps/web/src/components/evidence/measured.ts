@@ -1,18 +1,11 @@
 import { MEASURES, isMeasureName } from '@lidwatch/rules';
-import type { EvaluatedClause, EvaluatedNode, Measured, RangeValue } from '../../lib/api/types';
+import type { EvaluatedClause, EvaluatedNode, RangeValue } from '../../lib/api/types';
 import { rangeText, type BoundStyle } from '../../lib/format/range';
 import { decimal } from '../../lib/format/number';
 import { duration } from '../../lib/format/time';
 
-/** What was measured in the one form the screens write. */
-export function asRange(measured: Measured): RangeValue {
-  if (typeof measured === 'number') return { exactly: measured };
-  return 'from' in measured ? { between: [measured.from, measured.to] } : measured;
-}
-
 /** What was measured for a clause, in its measure's own unit and decimals: "at least 5.1 °C", "yes", "9 h". */
-export function measuredText(measure: string, measured: Measured, style: BoundStyle = 'words'): string {
-  const value = asRange(measured);
+export function measuredText(measure: string, value: RangeValue, style: BoundStyle = 'words'): string {
   if (!isMeasureName(measure)) return rangeText(value, { style });
   const { kind, unit, decimals } = MEASURES[measure];
   if (kind === 'yes-no')

@@ -35,7 +35,7 @@ export function TextAsSent({ text, segments }: { text: NoticeText; segments?: nu
       <details>
         <Summary>Public page: {page.headline}</Summary>
         <Sheet>
-          <strong>{page.headline}</strong> {page.until}
+          <strong>{page.headline}</strong> {page.untilText}
           <Box as="ul" ps="5" my="1.5">
             {page.whatToDo.map((line) => (
               <li key={line}>{line}</li>

@@ -1,20 +1,10 @@
-import type { Language } from '../../components/public/language';
-import type { Channel, Kind } from '../../lib/api/types';
+import type { components } from '../../lib/api/schema';
 
-/** Which notices somebody wants, for which districts, in which language. */
-export interface Wishes {
-  lang: Language;
-  districtSlugs: string[];
-  kinds: Kind[];
-}
-
-/** What a resident gives to be told next time: an e-mail address, a telephone number, or both. */
-export interface SubscriptionRequest extends Wishes {
-  email?: string;
-  phone?: string;
-}
+type Shapes = components['schemas'];
 
 /** A subscriber's own view of their subscription; addresses are masked. */
-export interface SubscriptionView extends Wishes {
-  contacts: { channel: Channel; address: string; confirmed: boolean }[];
-}
+export type SubscriptionView = Shapes['SubscriptionView'];
+/** Which notices somebody wants, for which districts, in which language. */
+export type Wishes = Pick<SubscriptionView, 'lang' | 'districtSlugs' | 'kinds'>;
+/** What a resident gives to be told next time: an e-mail address, a telephone number, or both. */
+export type SubscriptionRequest = Shapes['SubscriptionRequest'];

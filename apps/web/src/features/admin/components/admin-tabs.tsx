@@ -1,18 +1,15 @@
-import { chakra, Flex } from '@chakra-ui/react';
+import { Flex } from '@chakra-ui/react';
+import styled from '@emotion/styled';
 import { NavLink } from 'react-router-dom';
 import { paths } from '../../../app/paths';
 
-const Tab = chakra(NavLink, {
-  base: {
-    px: '3',
-    py: '2',
-    fontWeight: '600',
-    color: 'mute',
-    borderBottomWidth: '3px',
-    borderColor: 'transparent',
-    textDecoration: 'none',
-    '&.active': { color: 'ink', borderColor: 'air' },
-  },
+const Tab = styled(NavLink)({
+  padding: '8px 12px',
+  borderBottom: '3px solid transparent',
+  color: 'var(--chakra-colors-mute)',
+  fontWeight: 600,
+  textDecoration: 'none',
+  '&.active': { borderColor: 'var(--chakra-colors-air)', color: 'var(--chakra-colors-ink)' },
 });
 
 const TABS = [

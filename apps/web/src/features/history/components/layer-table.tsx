@@ -32,7 +32,7 @@ export function LayerTable({ profile: { layers } }: { profile: Profile }) {
               {lowerM} to {upperM}
             </Td>
             <Td>{lapseRateKPerKm === null ? 'not known' : decimal(lapseRateKPerKm)}</Td>
-            <Td color="mute">{lapseRateKPerKm === null ? '' : decimal(sigmaKPerKm)}</Td>
+            <Td color="mute">{sigmaKPerKm === null ? '' : decimal(sigmaKPerKm)}</Td>
             <Td textAlign="start">{textbookClass ?? 'not known'}</Td>
           </tr>
         ))}
