@@ -18,7 +18,7 @@ interface StrengthHistoryProps {
 /** The history of strength as chart, in words, as a table and as a file. */
 export function StrengthHistory({ history, name, height = 260 }: StrengthHistoryProps) {
   const [asTable, setAsTable] = useState(false);
-  const words = strengthWords(history, name);
+  const words = strengthWords(history, name, Date.now());
   const save = () =>
     downloadText(`strength-${name.toLowerCase().replace(/\W+/g, '-')}.csv`, strengthCsv(history));
   return (

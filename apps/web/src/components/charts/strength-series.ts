@@ -18,27 +18,34 @@ export interface Gap {
 export const strengthPoints = ({ points }: DistrictHistory): StrengthPoint[] =>
   points.map((point) => ({ x: new Date(point.t).getTime(), y: point.within, from: point }));
 
+/** A newest block this old is not yet a gap: it takes its time to be closed and worked out. */
+const NEWEST_MS = 45 * 60_000;
+
 /**
- * The stretches in which nothing is known: runs of unknown points, and steps that are missing altogether. They are
- * framed in the chart and never joined.
+ * The stretches in which nothing is known: runs of unknown points, steps that are missing altogether, and what lies
+ * before the first point or after the last. They are framed in the chart and never joined.
+ *
+ * @param now epoch ms; what lies ahead is no gap
  */
-export function gapsOf(points: readonly StrengthPoint[], stepMinutes: number): Gap[] {
-  const stepMs = stepMinutes * 60_000;
+export function gapsOf(history: DistrictHistory, now: number): Gap[] {
+  const stepMs = history.stepMinutes * 60_000;
+  const end = Math.min(new Date(history.to).getTime(), now);
   const gaps: Gap[] = [];
-  let known: number | undefined = points[0] && points[0].x - stepMs;
+  let known = new Date(history.from).getTime();
   let open: Gap | undefined;
-  for (const { x, y, from } of points) {
+  for (const { x, y, from } of strengthPoints(history)) {
     if (y === null) {
-      open ??= { from: known ?? x - stepMs, to: x, reason: from.reason };
+      open ??= { from: known, to: x, reason: from.reason };
       open.to = x;
       continue;
     }
     if (open) gaps.push({ ...open, to: x });
-    else if (known !== undefined && x - known > 1.5 * stepMs) gaps.push({ from: known, to: x });
+    else if (x - known > 1.5 * stepMs) gaps.push({ from: known, to: x - stepMs });
     open = undefined;
     known = x;
   }
-  if (open) gaps.push(open);
+  if (open) gaps.push({ ...open, to: Math.max(open.to, end) });
+  else if (end - known > Math.max(NEWEST_MS, 1.5 * stepMs)) gaps.push({ from: known, to: end });
   return gaps;
 }
 

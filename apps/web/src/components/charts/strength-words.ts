@@ -6,15 +6,12 @@ import { limitLines } from './limit-lines';
 import { gapsOf, strengthPoints } from './strength-series';
 
 /** The history in a few sentences: the strongest, how long above each limit, the notices, what is not known. */
-export function strengthWords(history: DistrictHistory, name: string): string {
+export function strengthWords(history: DistrictHistory, name: string, now: number): string {
   const points = strengthPoints(history);
   const known = points.filter((point): point is typeof point & { y: number } => point.y !== null);
   if (known.length === 0) return `${name}: nothing is known of this time.`;
   const strongest = known.reduce((best, point) => (point.y > best.y ? point : best));
-  const unknownMinutes = gapsOf(points, history.stepMinutes).reduce(
-    (sum, { from, to }) => sum + (to - from) / 60_000,
-    0,
-  );
+  const unknownMinutes = gapsOf(history, now).reduce((sum, { from, to }) => sum + (to - from) / 60_000, 0);
   const above = limitLines(history.limits).map(({ y, label }) => {
     const minutes = known.filter((point) => point.y >= y).length * history.stepMinutes;
     return `At or above ${decimal(y)} °C (${label}) for ${duration(minutes)} in all.`;

@@ -3,7 +3,7 @@ import type { DistrictHistory } from '../../lib/api/types';
 import type { ColorName } from '../../theme/palette';
 import { limitLines } from './limit-lines';
 import type { Backdrop } from './strength-backdrop';
-import { gapsOf, strengthPoints } from './strength-series';
+import { gapsOf } from './strength-series';
 
 const ms = (instant: string) => new Date(instant).getTime();
 
@@ -16,7 +16,7 @@ export function useBackdrop(
   return useMemo(
     () => ({
       colors,
-      gaps: gapsOf(strengthPoints(history), history.stepMinutes),
+      gaps: gapsOf(history, Date.now()),
       limits: limitLines(history.limits),
       nights: withNights ? history.nights.map(({ from, to }) => ({ from: ms(from), to: ms(to) })) : [],
       notices: history.notices.map((notice) => ({
