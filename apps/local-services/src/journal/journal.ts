@@ -59,12 +59,15 @@ export class Journal<T> {
   }
 
   private async flush(): Promise<void> {
-    while (this.waiting.length > 0) {
-      const text = this.waiting.join('');
-      this.waiting = [];
-      await this.file.appendFile(text);
+    try {
+      while (this.waiting.length > 0) {
+        const text = this.waiting.join('');
+        this.waiting = [];
+        await this.file.appendFile(text);
+      }
+    } finally {
+      this.flushing = undefined;
     }
-    this.flushing = undefined;
   }
 
   private note(bytes: number): number {
