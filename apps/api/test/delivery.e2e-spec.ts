@@ -132,6 +132,62 @@ describe('sending a notice', () => {
     await local.order('/control/mail', { mode: 'ok' });
   });
 
+  it('sends no text again that the provider took before the connection broke', async () => {
+    await local.order('/control/sms', { mode: 'drop', times: 1 });
+    const phone = nextPhone();
+    const id = await issueTo([{ phone }]);
+    await until(
+      () => rowsOf(id),
+      ([row]) => row?.state === 'delivered',
+    );
+    await later();
+    expect((await local.get<{ total: number }>(`/api/sms?to=${encodeURIComponent(phone)}`)).total).toBe(1);
+  });
+
+  it('asks the provider before it sends a text again whose report has not come', async () => {
+    await local.order('/control/sms', { mode: 'drop', times: 1, statusDelayMs: 600_000 });
+    const phone = nextPhone();
+    const id = await issueTo([{ phone }]);
+    await until(
+      () => rowsOf(id),
+      ([row]) => row?.state === 'queued' && row.attempts === 1,
+    );
+    await later();
+    await settled(id, 'accepted');
+    expect((await local.get<{ total: number }>(`/api/sms?to=${encodeURIComponent(phone)}`)).total).toBe(1);
+    await local.order('/control/sms', { statusDelayMs: 1 });
+  });
+
+  it('keeps trying where the fault is ours and not the recipient’s', async () => {
+    const phone = nextPhone();
+    await local.order('/control/sms', { mode: 'tooMany', times: 1 });
+    await local.order('/control/sms', { numbers: { [phone]: { refuseCode: 21606 } } });
+    const id = await issueTo([{ phone }]);
+    const tried = (attempts: number) =>
+      until(
+        () => rowsOf(id),
+        ([row]) => row?.state === 'queued' && row.attempts === attempts,
+      );
+    await tried(1);
+    await later();
+    await tried(2);
+    await local.order('/control/sms', { numbers: {} });
+    await later();
+    await settled(id, 'delivered');
+  });
+
+  it.each([
+    [21610, 'the recipient texted STOP'],
+    [21211, 'the number does not exist'],
+  ])('writes to no number again that the provider refuses with %i', async (refuseCode, reason) => {
+    const phone = nextPhone();
+    await local.order('/control/sms', { numbers: { [phone]: { refuseCode } } });
+    await settled(await issueTo([{ phone }]), 'failed');
+    await local.order('/control/sms', { numbers: {} });
+    const contact = await test.sql.get('SELECT stop_reason FROM contact WHERE address = $1', [phone]);
+    expect(contact).toEqual({ stop_reason: reason });
+  });
+
   it('does not send what waits once its notice has ended', async () => {
     await local.order('/control/mail', { mode: 'error' });
     const email = 'ended@pellworth.example';

@@ -9,9 +9,13 @@ const CONNECTIONS = 8;
 const MESSAGES_PER_CONNECTION = 500;
 const NO_SUCH_MAILBOX = /\b5\.1\.[1-3]\b/;
 
+const ABOUT_THE_MAIL = new Set(['RCPT TO', 'DATA']);
+
 /** What nodemailer adds to an error. */
 interface MailError extends Error {
   code?: string;
+  /** The SMTP command that was answered. */
+  command?: string;
   responseCode?: number;
   response?: string;
 }
@@ -64,11 +68,15 @@ export class MailChannel implements SendingChannel, OnModuleInit, OnApplicationS
   }
 }
 
-/** A 5xx answer is final, anything else may pass; an address that does not exist is not written to again. */
-function outcomeOf({ code, responseCode, response, message }: MailError): Outcome {
+/**
+ * A 5xx answer to the recipient or the message is final; one to the sign-in or the sender is about us, and a wrong
+ * setting must not lose everybody's mail. An address that does not exist is not written to again.
+ */
+function outcomeOf({ code, command, responseCode, response, message }: MailError): Outcome {
   const said = response ?? message;
   const shown = String(responseCode ?? code ?? 'unknown');
-  if (!responseCode || responseCode < 500) return { kind: 'retry', code: shown, detail: said };
+  if (!responseCode || responseCode < 500 || !ABOUT_THE_MAIL.has(command ?? ''))
+    return { kind: 'retry', code: shown, detail: said };
   const stop = NO_SUCH_MAILBOX.test(said) && { stopContact: 'the mailbox does not exist' };
   return { kind: 'failed', code: shown, detail: said, ...stop };
 }

@@ -11,8 +11,13 @@ const STOPS: Readonly<Record<number, string>> = {
   21211: 'the number does not exist',
   21614: 'the number takes no text messages',
 };
+const ABOUT_US = new Set([401, 403, 404, 408, 429]);
+/** The provider's error codes for a sender it does not know or take: 21212, 21603, 21606, 21659. */
+const ABOUT_OUR_NUMBER = new Set([21212, 21603, 21606, 21659]);
 /** How many earlier texts to a number are looked through for one that was under way. */
 const LOOK_BACK = 100;
+/** How much older than our own row a text may be, so that clocks may differ, seconds. */
+const CLOCKS_DIFFER_S = 24 * 3600;
 
 /** What the SDK throws for an answer that is no success; without a status the provider was not reached. */
 interface ProviderError extends Error {
@@ -38,34 +43,46 @@ export class SmsChannel implements SendingChannel, OnModuleInit {
     this.dispatcher.registerChannel('sms', this);
   }
 
-  /** Hands one text to the provider. */
-  async send({ address, text, messageId }: OutboundMessage): Promise<Outcome> {
+  /**
+   * Hands one text to the provider. A text cannot be told from its double as a mail can, so before a further attempt
+   * the provider is asked whether the one before arrived after all.
+   */
+  async send(message: OutboundMessage): Promise<Outcome> {
     try {
-      const { sid } = await this.provider.messages.create({
-        ...{ to: address, from: this.settings.sms.from, body: text },
-        statusCallback: `${this.settings.publicUrl}/api/hooks/sms/status?message=${messageId}`,
-      });
-      return { kind: 'accepted', providerId: sid };
+      const earlier = message.attempts > 1 ? await this.arrived(message) : undefined;
+      return { kind: 'accepted', providerId: earlier ?? (await this.create(message)) };
     } catch (error) {
       return outcomeOf(error as ProviderError);
     }
   }
 
+  private async create({ address, text, messageId }: OutboundMessage): Promise<string> {
+    const { sid } = await this.provider.messages.create({
+      ...{ to: address, from: this.settings.sms.from, body: text },
+      statusCallback: `${this.settings.publicUrl}/api/hooks/sms/status?message=${messageId}`,
+    });
+    return sid;
+  }
+
   /**
-   * A text that was under way when the service stopped: the provider has it when it lists one to the same number with
-   * the same words (each carries its notice's reference or a link of its own).
+   * The provider's id of a text to the same number with the same words, made since this message was queued; each
+   * carries its notice's reference or a link of its own, so it is this one.
    */
-  async recall({ address, text }: OutboundMessage): Promise<Outcome | undefined> {
+  private async arrived({ address, text, createdAt }: OutboundMessage): Promise<string | undefined> {
     const listed = await this.provider.messages.list({ to: address, limit: LOOK_BACK });
-    const found = listed.find(({ body }) => body === text);
-    return found && { kind: 'accepted', providerId: found.sid };
+    const since = (createdAt - CLOCKS_DIFFER_S) * 1000;
+    return listed.find(({ body, dateCreated }) => body === text && dateCreated.getTime() >= since)?.sid;
   }
 }
 
-/** A 4xx answer is final except "too many requests"; no answer or a 5xx may pass. */
+/**
+ * A 4xx answer is final for the recipient, except where it is about us (sign-in, account, sender, pace): a wrong
+ * setting must not lose everybody's message. No answer or a 5xx may pass.
+ */
 function outcomeOf({ status, code, message }: ProviderError): Outcome {
   const shown = String(code ?? status ?? 'unknown');
-  if (!status || status >= 500 || status === 429) return { kind: 'retry', code: shown, detail: message };
+  if (!status || status >= 500 || ABOUT_US.has(status) || ABOUT_OUR_NUMBER.has(Number(code)))
+    return { kind: 'retry', code: shown, detail: message };
   const stopContact = STOPS[Number(code)];
   return { kind: 'failed', code: shown, detail: message, ...(stopContact !== undefined && { stopContact }) };
 }

@@ -13,7 +13,10 @@ export interface StatusReport {
 
 const FAILED = new Set(['failed', 'undelivered']);
 
-/** Writes what the provider reports of texts. Reports may come twice, late, or before our own row says *accepted*. */
+/**
+ * Writes what the provider reports of texts. Reports may come twice, late, or before our own row says
+ * *accepted*, also while it waits for another attempt because the provider's answer never came.
+ */
 @Injectable()
 export class SmsReceiptsService {
   constructor(
@@ -26,9 +29,8 @@ export class SmsReceiptsService {
     const delivered = status === 'delivered';
     if (!delivered && !FAILED.has(status)) return;
     await this.sql.run(
-      `UPDATE outbox SET state = $3, provider_id = coalesce(provider_id, $2), settled_at = $4, detail = $5,
-         lease_by = NULL, lease_until = NULL
-       WHERE message_id = $1 AND state IN ('sending', 'accepted') AND channel = 'sms'`,
+      `UPDATE outbox SET state = $3, provider_id = coalesce(provider_id, $2), settled_at = $4, detail = $5
+       WHERE message_id = $1 AND state IN ('queued', 'sending', 'accepted') AND attempts > 0 AND channel = 'sms'`,
       [
         ...[messageId, providerId, delivered ? 'delivered' : 'failed', this.clock.now()],
         delivered ? null : `the provider reports "${status}"${errorCode ? `, error ${errorCode}` : ''}`,

@@ -17,6 +17,7 @@ export interface OutboundMessage {
   readonly html: string | null;
   /** When it was queued, UTC epoch seconds. */
   readonly createdAt: number;
+  /** Which attempt this is, from 1. */
   readonly attempts: number;
 }
 
@@ -38,11 +39,9 @@ export type Outcome =
 export interface SendingChannel {
   /** How many messages may be under way at once. */
   readonly atOnce: number;
-  /** Makes one attempt. Never throws for what the other side says; a thrown error counts as `retry`. */
-  send(message: OutboundMessage): Promise<Outcome>;
   /**
-   * For a message that was under way when the process died: how it went after all, or undefined when the other side
-   * knows nothing of it. Without this, it is simply sent again under the same message id.
+   * Makes one attempt. Never throws for what the other side says; a thrown error counts as `retry`. From the second
+   * attempt on (`attempts` > 1) the one before may have arrived unheard: its connection broke, or the process died.
    */
-  recall?(message: OutboundMessage): Promise<Outcome | undefined>;
+  send(message: OutboundMessage): Promise<Outcome>;
 }

@@ -1,32 +1,27 @@
-import { randomUUID } from 'node:crypto';
 import { Injectable, Logger, type BeforeApplicationShutdown, type OnModuleInit } from '@nestjs/common';
 import { OnEvent } from '@nestjs/event-emitter';
-import { Clock } from '../common/clock';
 import { JobsService } from '../scheduler/jobs.service';
 import type { Channel, OutboundMessage, Outcome, SendingChannel } from './channel';
-import { OutboxQueue, type Result } from './outbox-queue';
+import { OutboxQueue } from './outbox-queue';
+import { ResultWriter } from './result-writer';
+import { Supply } from './supply';
 
 const SWEEP_S = 5;
-const BATCH = 400;
-/** Results are written down this often while a batch is under way, so that a crash leaves few in doubt. */
-const WRITE_EVERY_MS = 150;
+const BATCH = 250;
 
 /**
- * Sends what is due: each channel one batch after the other, so many messages at once. Woken when something is
- * queued, and every few seconds for later attempts.
+ * Sends what is due: one run per channel at a time, so many messages at once. Woken when something is queued, and
+ * every few seconds for later attempts.
  */
 @Injectable()
 export class OutboxDispatcher implements OnModuleInit, BeforeApplicationShutdown {
   private readonly logger = new Logger(OutboxDispatcher.name);
-  private readonly owner = randomUUID();
   private readonly channels = new Map<Channel, SendingChannel>();
   private readonly running = new Map<Channel, Promise<void>>();
-  private readonly recalled = new Set<Channel>();
   private closing = false;
 
   constructor(
     private readonly queue: OutboxQueue,
-    private readonly clock: Clock,
     private readonly jobs: JobsService,
   ) {}
 
@@ -70,62 +65,24 @@ export class OutboxDispatcher implements OnModuleInit, BeforeApplicationShutdown
   }
 
   private async drain(channel: Channel): Promise<void> {
+    if (this.closing) return;
+    const interrupted = await this.queue.putBackInterrupted(channel);
+    if (interrupted > 0)
+      this.logger.warn(`${interrupted} ${channel} messages were interrupted and are looked into again`);
     const sending = this.channels.get(channel)!;
-    if (!this.recalled.has(channel)) await this.recallOrphans(channel, sending);
-    while (!this.closing) {
-      const messages = await this.queue.take(channel, this.owner, BATCH);
-      if (messages.length === 0) return;
-      await this.sendAll(sending, messages);
-    }
-  }
-
-  /** After a crash: asks the other side what became of each message that was under way before sending it again. */
-  private async recallOrphans(channel: Channel, sending: SendingChannel): Promise<void> {
-    const orphans = await this.queue.orphans(channel, this.owner);
-    if (orphans.length > 0)
-      this.logger.warn(`${orphans.length} ${channel} messages were under way when the service last stopped`);
-    const lost: OutboundMessage[] = [];
-    const known: Result[] = [];
-    for (const message of orphans) {
-      const outcome = await sending.recall?.(message);
-      if (outcome) known.push({ message, outcome });
-      else lost.push(message);
-    }
-    await this.queue.settle(known);
-    await this.queue.putBack(lost);
-    this.recalled.add(channel);
-  }
-
-  private async sendAll(sending: SendingChannel, messages: readonly OutboundMessage[]): Promise<void> {
-    const waiting = [...messages];
-    let results: Result[] = [];
-    const write = async (): Promise<void> => {
-      const batch = results;
-      results = [];
-      try {
-        await this.queue.settle(batch);
-      } catch (error) {
-        results = [...batch, ...results];
-        throw error;
-      }
-    };
-    const writeNow = (): Promise<void> =>
-      write().catch((error: unknown) => this.logger.error(error, 'Results are written again shortly'));
+    const supply = new Supply(() => this.queue.take(channel, BATCH), sending.atOnce);
+    const results = new ResultWriter((batch) => this.queue.settle(batch));
     const one = async (): Promise<void> => {
-      for (let message = waiting.shift(); message; message = waiting.shift()) {
-        const outcome = await this.attempt(sending, message);
-        results.push({ message, outcome });
+      while (!this.closing) {
+        const message = await supply.next();
+        if (!message) return;
+        results.add({ message, outcome: await this.attempt(sending, message) });
       }
     };
-    let writing = Promise.resolve();
-    const timer = setInterval(() => (writing = writing.then(writeNow)), WRITE_EVERY_MS);
-    try {
-      await Promise.all(Array.from({ length: sending.atOnce }, one));
-    } finally {
-      clearInterval(timer);
-    }
-    await writing;
-    await write();
+    const takers = await Promise.allSettled(Array.from({ length: sending.atOnce }, one));
+    await results.close();
+    await this.queue.release(await supply.close());
+    for (const taker of takers) if (taker.status === 'rejected') throw taker.reason;
   }
 
   private async attempt(sending: SendingChannel, message: OutboundMessage): Promise<Outcome> {

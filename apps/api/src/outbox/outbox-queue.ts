@@ -11,32 +11,40 @@ export interface Result {
   readonly outcome: Outcome;
 }
 
-/** A lease is only looked at after a crash: one process owns the store, so nobody else sends meanwhile. */
-const LEASE_S = 600;
-
 const MESSAGE = `SELECT o.id, o.message_id messageId, o.channel, o.topic, o.contact_id contactId, c.person_id personId,
-  c.address, p.lang, p.subject, p.text, p.html, o.created_at createdAt, o.attempts
-  FROM outbox o JOIN contact c ON c.id = o.contact_id JOIN payload p ON p.id = o.payload_id`;
+  c.address, o.payload_id payloadId, o.created_at createdAt, o.attempts
+  FROM json_each($1) j CROSS JOIN outbox o ON o.id = j.value CROSS JOIN contact c ON c.id = o.contact_id
+  ORDER BY o.priority DESC, o.next_at, o.id`;
 
-/** Closes what is due but must not go out any more: too late, silenced, or to somebody who left. $1 now, $2 channel. */
-const CLOSE_DUE = `WITH due AS (
+const PAYLOAD = `SELECT id payloadId, lang, subject, text, html FROM payload WHERE id IN (SELECT value FROM json_each($1))`;
+
+const CLAIM = `UPDATE outbox SET state = 'sending', attempts = attempts + 1
+  WHERE id IN (SELECT id FROM outbox WHERE state = 'queued' AND channel = $2 AND next_at <= $1
+    ORDER BY priority DESC, next_at, id LIMIT $3)
+  RETURNING id`;
+
+/** Of what was claimed, closes what must not go out any more: too late, silenced, or to somebody who left. */
+const CLOSE = `WITH claimed AS (
     SELECT o.id, o.not_after < $1 late, c.stopped_at IS NOT NULL OR c.address IS NULL gone,
       o.revision < coalesce(t.silent_before, 0) silent
-    FROM outbox o JOIN contact c ON c.id = o.contact_id LEFT JOIN outbox_topic t ON t.topic = o.topic
-    WHERE o.state = 'queued' AND o.channel = $2 AND o.next_at <= $1)
-  UPDATE outbox SET settled_at = $1, state = CASE WHEN due.late THEN 'expired' ELSE 'suppressed' END,
-    detail = CASE WHEN due.late THEN 'it was too late to send it' WHEN due.gone THEN 'the recipient left or stopped'
+    FROM json_each($2) j CROSS JOIN outbox o ON o.id = j.value CROSS JOIN contact c ON c.id = o.contact_id
+      LEFT JOIN outbox_topic t ON t.topic = o.topic)
+  UPDATE outbox SET settled_at = $1, attempts = attempts - 1,
+    state = CASE WHEN claimed.late THEN 'expired' ELSE 'suppressed' END,
+    detail = CASE WHEN claimed.late THEN 'it was too late to send it' WHEN claimed.gone THEN 'the recipient left or stopped'
       ELSE 'the notice is no longer in force' END
-  FROM due WHERE outbox.id = due.id AND (due.late OR due.gone OR due.silent)`;
+  FROM claimed WHERE outbox.id = claimed.id AND (claimed.late OR claimed.gone OR claimed.silent)
+  RETURNING outbox.id`;
 
-const CLAIM = `UPDATE outbox SET state = 'sending', attempts = attempts + 1, lease_by = $3, lease_until = $1 + ${LEASE_S}
-  WHERE id IN (SELECT id FROM outbox WHERE state = 'queued' AND channel = $2 AND next_at <= $1
-    ORDER BY priority DESC, next_at, id LIMIT $4)
-  RETURNING id`;
+const INTERRUPTED = `SELECT 1 FROM outbox WHERE state = 'sending' AND channel = $1 LIMIT 1`;
+const KEEP_INTERRUPTED = `INSERT INTO attempt (outbox_id, n, at, outcome, detail)
+  SELECT id, attempts, $1, 'interrupted', 'the service stopped while it was under way'
+  FROM outbox WHERE state = 'sending' AND channel = $2 ON CONFLICT DO NOTHING`;
 
 /** Writes results: [id, state, next_at|null, provider_id|null, detail|null]. A receipt that came first stays. */
 const SETTLE = `UPDATE outbox SET state = j.value->>1, next_at = coalesce(j.value->>2, next_at),
-    provider_id = coalesce(provider_id, j.value->>3), detail = j.value->>4, lease_by = NULL, lease_until = NULL,
+    provider_id = coalesce(provider_id, (SELECT j.value->>3 WHERE NOT EXISTS (
+      SELECT 1 FROM outbox other WHERE other.provider_id = j.value->>3))), detail = j.value->>4,
     settled_at = CASE WHEN j.value->>1 = 'queued' THEN NULL ELSE $1 END
   FROM json_each($2) j WHERE outbox.id = j.value->>0 AND outbox.state = 'sending'`;
 
@@ -53,28 +61,35 @@ export class OutboxQueue {
     private readonly clock: Clock,
   ) {}
 
-  /** Takes up to `limit` due messages of a channel, the most urgent first. */
-  async take(channel: Channel, owner: string, limit: number): Promise<OutboundMessage[]> {
-    const now = this.clock.now();
-    const ids = await this.work.run(async () => {
-      await this.sql.run(CLOSE_DUE, [now, channel]);
-      return this.sql.returning<{ id: number }>(CLAIM, [now, channel, owner, limit]);
+  /** Takes up to `limit` due messages of a channel, the most urgent first; an empty list means that none is due. */
+  async take(channel: Channel, limit: number): Promise<OutboundMessage[]> {
+    for (;;) {
+      const claimed = await this.work.run(() => this.claim(channel, limit), 'bulk');
+      if (claimed.all === 0) return [];
+      if (claimed.open.length > 0) return this.messages(claimed.open);
+    }
+  }
+
+  /**
+   * Puts messages back that were under way when a process died or could not write its results; says how many. Call it
+   * only while nothing is sent by the channel: one process owns the store, so what is *sending* then is interrupted.
+   */
+  async putBackInterrupted(channel: Channel): Promise<number> {
+    const any = await this.sql.get(INTERRUPTED, [channel]);
+    if (!any) return 0;
+    return this.work.run(async () => {
+      await this.sql.run(KEEP_INTERRUPTED, [this.clock.now(), channel]);
+      return this.sql.run("UPDATE outbox SET state = 'queued' WHERE state = 'sending' AND channel = $1", [
+        channel,
+      ]);
     }, 'bulk');
-    return this.messages(ids.map(({ id }) => id));
   }
 
-  /** Messages of a channel that were under way in a process that died. */
-  async orphans(channel: Channel, owner: string): Promise<OutboundMessage[]> {
-    return this.sql.all<OutboundMessage>(
-      `${MESSAGE} WHERE o.state = 'sending' AND o.channel = $1 AND o.lease_by IS NOT $2 ORDER BY o.id`,
-      [channel, owner],
-    );
-  }
-
-  /** Puts orphans the other side knows nothing of back into the queue. */
-  async putBack(messages: readonly OutboundMessage[]): Promise<void> {
+  /** Gives messages back that were taken and not tried. */
+  async release(messages: readonly OutboundMessage[]): Promise<void> {
+    if (messages.length === 0) return;
     await this.sql.run(
-      `UPDATE outbox SET state = 'queued', lease_by = NULL, lease_until = NULL
+      `UPDATE outbox SET state = 'queued', attempts = attempts - 1
        WHERE state = 'sending' AND id IN (SELECT value FROM json_each($1))`,
       [JSON.stringify(messages.map(({ id }) => id))],
     );
@@ -99,20 +114,24 @@ export class OutboxQueue {
     }, 'bulk');
   }
 
-  /** When the next message of a channel is due, UTC epoch seconds; undefined when none waits. */
-  async nextDue(channel: Channel): Promise<number | undefined> {
-    const row = await this.sql.get<{ at: number | null }>(
-      "SELECT min(next_at) at FROM outbox WHERE state = 'queued' AND channel = $1",
-      [channel],
-    );
-    return row?.at ?? undefined;
+  private async claim(channel: Channel, limit: number): Promise<{ all: number; open: number[] }> {
+    const now = this.clock.now();
+    const rows = await this.sql.returning<{ id: number }>(CLAIM, [now, channel, limit]);
+    const ids = rows.map(({ id }) => id);
+    const closed = await this.sql.returning<{ id: number }>(CLOSE, [now, JSON.stringify(ids)]);
+    const shut = new Set(closed.map(({ id }) => id));
+    return { all: ids.length, open: ids.filter((id) => !shut.has(id)) };
   }
 
-  private messages(ids: number[]): Promise<OutboundMessage[]> {
-    return this.sql.all<OutboundMessage>(
-      `${MESSAGE} WHERE o.id IN (SELECT value FROM json_each($1)) ORDER BY o.priority DESC, o.id`,
-      [JSON.stringify(ids)],
-    );
+  /** The words are read once for the many messages that share them. */
+  private async messages(ids: number[]): Promise<OutboundMessage[]> {
+    type Words = Pick<OutboundMessage, 'lang' | 'subject' | 'text' | 'html'>;
+    type Row = Omit<OutboundMessage, keyof Words> & { payloadId: number };
+    const rows = await this.sql.all<Row>(MESSAGE, [JSON.stringify(ids)]);
+    const wanted = [...new Set(rows.map(({ payloadId }) => payloadId))];
+    const payloads = await this.sql.all<Words & { payloadId: number }>(PAYLOAD, [JSON.stringify(wanted)]);
+    const words = new Map(payloads.map(({ payloadId, ...rest }) => [payloadId, rest]));
+    return rows.map(({ payloadId, ...row }) => ({ ...row, ...words.get(payloadId)! }));
   }
 
   private async stopContacts(stopped: (string | number)[][], now: number): Promise<void> {

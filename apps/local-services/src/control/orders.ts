@@ -38,7 +38,10 @@ const record = (body: Body, name: string): Record<string, unknown> | undefined =
   return value as Record<string, unknown>;
 };
 
-/** Changes the mail server's orders: `{mode, delayMs, times, recipients: {address: SMTP code}}`; what is left out stays. */
+/**
+ * Changes the mail server's orders: `{mode, delayMs, times, recipients: {address: SMTP code}}`; what is left out stays
+ * (`times` belongs to the mode it is given with).
+ */
 export const orderMail = (behaviour: MailBehaviour, body: Body): MailBehaviour => {
   known(body, ['mode', 'delayMs', 'times', 'recipients']);
   const recipients = record(body, 'recipients');
@@ -47,7 +50,7 @@ export const orderMail = (behaviour: MailBehaviour, body: Body): MailBehaviour =
       throw new BadOrder('"recipients" gives each address an SMTP code from 400 to 599.');
   behaviour.mode = mode(body, MAIL_MODES, behaviour.mode);
   behaviour.delayMs = amount(body, 'delayMs', 600_000) ?? (behaviour.delayMs || USUAL_DELAY_MS);
-  behaviour.times = amount(body, 'times', 1e9);
+  if (body.mode !== undefined) behaviour.times = amount(body, 'times', 1e9);
   if (recipients)
     behaviour.recipients = Object.fromEntries(
       Object.entries(recipients).map(([to, code]) => [to.toLowerCase(), code as number]),
@@ -68,7 +71,7 @@ export const orderTexts = (behaviour: TextBehaviour, body: Body): TextBehaviour 
   }
   behaviour.mode = mode(body, TEXT_MODES, behaviour.mode);
   behaviour.delayMs = amount(body, 'delayMs', 600_000) ?? (behaviour.delayMs || USUAL_DELAY_MS);
-  behaviour.times = amount(body, 'times', 1e9);
+  if (body.mode !== undefined) behaviour.times = amount(body, 'times', 1e9);
   behaviour.undeliveredShare = amount(body, 'undeliveredShare', 1) ?? behaviour.undeliveredShare;
   behaviour.statusDelayMs = amount(body, 'statusDelayMs', 600_000) ?? behaviour.statusDelayMs;
   if (numbers) behaviour.numbers = numbers;

@@ -168,10 +168,10 @@ export const up: readonly string[] = [
      id INTEGER PRIMARY KEY, topic TEXT NOT NULL, revision INTEGER NOT NULL, contact_id INTEGER NOT NULL REFERENCES contact(id), payload_id INTEGER NOT NULL REFERENCES payload(id),
      channel TEXT NOT NULL CHECK (channel IN ('email','sms')), priority INTEGER NOT NULL DEFAULT 0,
      state TEXT NOT NULL CHECK (state IN ('queued','sending','accepted','delivered','failed','suppressed','expired')), attempts INTEGER NOT NULL DEFAULT 0, created_at INTEGER NOT NULL,
-     next_at INTEGER NOT NULL, not_after INTEGER NOT NULL, lease_by TEXT, lease_until INTEGER, message_id TEXT NOT NULL UNIQUE, provider_id TEXT UNIQUE, settled_at INTEGER, detail TEXT,
+     next_at INTEGER NOT NULL, not_after INTEGER NOT NULL, message_id TEXT NOT NULL UNIQUE, provider_id TEXT UNIQUE, settled_at INTEGER, detail TEXT,
      UNIQUE (topic, revision, contact_id)) STRICT`,
   `CREATE INDEX outbox_due ON outbox(channel, priority DESC, next_at, id) WHERE state = 'queued'`,
-  `CREATE INDEX outbox_sending ON outbox(lease_until) WHERE state = 'sending'`,
+  `CREATE INDEX outbox_sending ON outbox(channel) WHERE state = 'sending'`,
   `CREATE TABLE outbox_topic (topic TEXT PRIMARY KEY, silent_before INTEGER NOT NULL) STRICT, WITHOUT ROWID`,
   `CREATE INDEX outbox_topic_rows ON outbox(topic, state)`,
   `CREATE TABLE attempt (
