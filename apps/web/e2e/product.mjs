@@ -4,7 +4,7 @@ import { mkdtempSync, rmSync } from 'node:fs';
 import { createServer } from 'node:net';
 import os from 'node:os';
 import path from 'node:path';
-import { fileURLToPath } from 'node:url';
+import { fileURLToPath, pathToFileURL } from 'node:url';
 import { until } from './until.mjs';
 
 const root = path.resolve(path.dirname(fileURLToPath(import.meta.url)), '../../..');
@@ -19,18 +19,24 @@ async function freePort() {
   return port;
 }
 
+/** So that the product ends with this script, however that ends. */
+const endWithParent = pathToFileURL(path.join(root, 'scripts/house/end-with-parent.mjs')).href;
+const PATIENCE_MS = 15_000;
+const FIRST_LINK = /https?:\/\/\S*\/welcome\/[\w-]+/;
+const UP = /Ctrl-C stops it all/;
+
 /** Starts the built product as `npm start` does, empty, in a folder and on ports of its own. */
 export async function startProduct() {
   const folder = mkdtempSync(path.join(os.tmpdir(), 'lidwatch-journey-'));
   const [port, page, smtp, sms] = [await freePort(), await freePort(), await freePort(), await freePort()];
-  const child = spawn(process.execPath, [path.join(root, 'scripts/start.mjs')], {
+  const child = spawn(process.execPath, ['--import', endWithParent, path.join(root, 'scripts/start.mjs')], {
     env: {
       ...process.env,
       ...{ DEMO: 'off', PORT: String(port), DATA_DIR: path.join(folder, 'data') },
       ...{ LOCAL_PAGE_PORT: String(page), LOCAL_SMTP_PORT: String(smtp), LOCAL_SMS_PORT: String(sms) },
       SMS_UNDELIVERED_SHARE: '0',
     },
-    stdio: ['ignore', 'pipe', 'pipe'],
+    stdio: ['ignore', 'pipe', 'pipe', 'ipc'],
   });
   let said = '';
   for (const stream of [child.stdout, child.stderr])
@@ -38,23 +44,27 @@ export async function startProduct() {
   const stop = async () => {
     if (child.exitCode === null && child.signalCode === null) {
       child.kill('SIGINT');
+      const timer = setTimeout(() => child.kill('SIGKILL'), PATIENCE_MS);
       await once(child, 'close');
+      clearTimeout(timer);
     }
     rmSync(folder, { recursive: true, force: true });
   };
   try {
-    await until('the product says its first link', () => /\/welcome\/[\w-]+/.test(said), 120_000);
+    await until(
+      'the product is up and has said its first link',
+      () => FIRST_LINK.test(said) && UP.test(said),
+      120_000,
+    );
   } catch (error) {
     await stop();
     throw new Error(`${error.message}\nWhat it said:\n${said}`, { cause: error });
   }
-  const url = `http://localhost:${port}`;
-  await until('the product is ready', async () => (await fetch(`${url}/health/ready`)).ok, 60_000);
   return {
-    url,
+    url: `http://localhost:${port}`,
     inbox: `http://127.0.0.1:${page}`,
     loggerDir: path.join(folder, 'data/loggers'),
-    firstLink: /(https?:\/\/\S*\/welcome\/[\w-]+)/.exec(said)[1],
+    firstLink: FIRST_LINK.exec(said)[0],
     said: () => said,
     stop,
   };

@@ -1,5 +1,9 @@
-/** Counts named steps; after one that failed the rest, which build on it, are counted as failed too. */
-export function stepCounter() {
+/**
+ * Counts named steps; after one that failed the rest, which build on it, are counted as failed too.
+ *
+ * @param {() => Promise<void>} onFailure called at the first failure, while everything still stands
+ */
+export function stepCounter(onFailure) {
   const counts = { passed: 0, failed: 0 };
   const step = async (name, work) => {
     if (counts.failed > 0) {
@@ -15,6 +19,7 @@ export function stepCounter() {
     } catch (error) {
       counts.failed += 1;
       console.error(`FAILED  ${name}\n${error.stack}`);
+      await onFailure();
     }
   };
   return { counts, step };

@@ -3,21 +3,19 @@ import path from 'node:path';
 
 /** The password of everybody on the journey. */
 export const PASSWORD = 'a quiet winter morning';
+/** The tower's folder below the loggers' folder. */
+const FOLDER = 'mill-mast';
 const HEIGHTS_M = [2, 10, 30, 60];
 const INTERVAL_S = 600;
 
-/** A burn ban while the mast shows at least 2 °C for an hour, and its end. */
+/** A condition on the strength the mast shows, held for an hour. */
+const strength = (op, value) => ({ measure: 'strengthWithinTowerC', op, value, heldMinutes: 60 });
+const sure = { measure: 'inversionSure', op: '=', value: true };
+
+/** An advisory from 1 °C, a burn ban from 2 °C, each with its end. */
 const RULE = {
-  burnBan: {
-    begin: {
-      all: [
-        { measure: 'strengthWithinTowerC', op: '>=', value: 2, heldMinutes: 60 },
-        { measure: 'inversionSure', op: '=', value: true },
-      ],
-    },
-    end: { measure: 'strengthWithinTowerC', op: '<', value: 1, heldMinutes: 60 },
-    longestValidityHours: 48,
-  },
+  advisory: { begin: { all: [strength('>=', 1), sure] }, end: strength('<', 0.5), longestValidityHours: 24 },
+  burnBan: { begin: { all: [strength('>=', 2), sure] }, end: strength('<', 1), longestValidityHours: 48 },
 };
 
 /** The API through a signed-in window's session; anything but success is thrown with what was said. */
@@ -36,7 +34,8 @@ export function apiOf(page) {
 }
 
 /** As the administrator: office, tower with its sensors, folder source and key, and the district it speaks for. */
-export async function setUpValley(api) {
+export async function setUpValley(api, loggerDir) {
+  mkdirSync(path.join(loggerDir, FOLDER), { recursive: true });
   await api.put('/api/office', { name: 'Pellworth Clean Air Office', phone: '208 555 0140' });
   const place = { latitude: 44.05, longitude: -112.95, elevationM: 1150 };
   const logger = {
@@ -58,7 +57,7 @@ export async function setUpValley(api) {
     };
     await api.post(`/api/towers/${tower.id}/sensors`, sensor);
   }
-  const source = { kind: 'folder', path: 'mill-mast', mapping: { timeColumn: 'time' }, intervalSeconds: 10 };
+  const source = { kind: 'folder', path: FOLDER, mapping: { timeColumn: 'time' }, intervalSeconds: 10 };
   await api.post(`/api/towers/${tower.id}/sources`, source);
   const { key } = await api.post(`/api/towers/${tower.id}/keys`, { name: 'journey' });
   const district = await api.post('/api/districts', {
@@ -94,9 +93,7 @@ export function loggerLines(nowMs) {
 
 /** Drops a logger's file into the folder the service collects from. */
 export function dropFile(loggerDir, { header, lines }) {
-  const folder = path.join(loggerDir, 'mill-mast');
-  mkdirSync(folder, { recursive: true });
-  writeFileSync(path.join(folder, 'today.csv'), `${[header, ...lines].join('\n')}\n`);
+  writeFileSync(path.join(loggerDir, FOLDER, 'today.csv'), `${[header, ...lines].join('\n')}\n`);
 }
 
 /** Pushes lines with the tower's key, as a logger would. */
