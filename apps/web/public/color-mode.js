@@ -1,6 +1,8 @@
-// Sets the colour mode before the first paint, so that a dark room does not flash white. A file of its own because
-// the content security policy allows no inline script. `src/theme/color-mode.ts` does the rest.
+// Sets the colour mode before the first paint, so that a dark room does not flash white, and again when the system
+// changes. A file of its own because the content security policy allows no inline script. `src/theme/color-mode.ts`
+// does the rest.
 (function () {
+  const systemDark = globalThis.matchMedia('(prefers-color-scheme: dark)');
   function chosen() {
     try {
       return globalThis.localStorage.getItem('color-mode');
@@ -8,8 +10,10 @@
       return null; // storage can be forbidden; the system's setting is followed then
     }
   }
-  const dark =
-    (chosen() ?? (globalThis.matchMedia('(prefers-color-scheme: dark)').matches ? 'dark' : 'light')) ===
-    'dark';
-  globalThis.document.documentElement.classList.toggle('dark', dark);
+  function apply() {
+    const dark = (chosen() ?? (systemDark.matches ? 'dark' : 'light')) === 'dark';
+    globalThis.document.documentElement.classList.toggle('dark', dark);
+  }
+  apply();
+  systemDark.addEventListener('change', apply);
 })();
