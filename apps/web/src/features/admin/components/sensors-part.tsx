@@ -20,7 +20,7 @@ export function SensorsPart({ tower, onChanged }: { tower: Tower; onChanged: () 
     retired ? (
       'set aside'
     ) : (
-      <Button size="sm" onClick={() => void run(id)} aria-label={`Set ${name} aside`}>
+      <Button size="sm" onClick={() => void run(id)} aria-label={`Set aside ${name}`}>
         Set aside
       </Button>
     );
