@@ -62,12 +62,14 @@ export class SourcesService {
     return all.filter(({ nextAt }) => nextAt === null || nextAt <= now);
   }
 
-  /** Keeps how a collection went; after a failure the next try waits the longer, the more there were in a row. */
-  async collected(source: Source, result: string, failed: boolean): Promise<void> {
-    const now = this.clock.now();
+  /**
+   * Keeps how a collection went; after a failure the next try waits the longer, the more there were in a row. The wait
+   * counts from the collection's begin, or one as long as the collector's beat would miss every other turn.
+   */
+  async collected(source: Source, begunAt: number, result: string, failed: boolean): Promise<void> {
     const failures = failed ? source.failures + 1 : 0;
     const waitS = source.intervalS * 2 ** Math.min(failures, MOST_DOUBLINGS);
-    const values = { lastAt: now, lastResult: result, failures, nextAt: now + waitS };
+    const values = { lastAt: this.clock.now(), lastResult: result, failures, nextAt: begunAt + waitS };
     await this.sources.update(values, { where: { id: source.id } });
   }
 }

@@ -5,6 +5,7 @@ import { SourcesService } from '../../towers/sources.service';
 import { signInAs } from '../../testing/people';
 import { makeTower } from '../../testing/places';
 import { createTestApp, testNow, type TestApp } from '../../testing/test-app';
+import { ReadingsService } from '../readings.service';
 import { ReadingsCollector } from './readings-collector';
 
 const line = (minutesAgo: number, ...cells: (number | string)[]): string =>
@@ -98,6 +99,20 @@ describe("the collector of loggers' files", () => {
     test.clock.advance(240);
     await collect();
     expect(await source()).toMatchObject({ failures: 0, lastResult: '2 readings read, 0 rows refused.' });
+  });
+
+  it('counts the wait from the begin of a collection, so that a slow one misses no turn', async () => {
+    const service = test.app.get(ReadingsService, { strict: false });
+    const ingest = service.ingest.bind(service);
+    const slow = jest.spyOn(service, 'ingest').mockImplementation((...given) => {
+      test.clock.advance(3);
+      return ingest(...given);
+    });
+    writeFileSync(path.join(folder, 'mast.csv'), `${HEADER}${line(60, -9.5, -7.7)}\n`);
+    const begunAt = test.clock.now() + 60;
+    await collect();
+    slow.mockRestore();
+    expect(Date.parse((await source()).nextAt!) / 1000).toBe(begunAt + 60);
   });
 
   it('goes on with the other files when one cannot be read', async () => {

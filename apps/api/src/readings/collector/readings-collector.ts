@@ -1,5 +1,6 @@
 import path from 'node:path';
 import { Injectable, type OnModuleInit } from '@nestjs/common';
+import { Clock } from '../../common/clock';
 import { Problem } from '../../common/problem';
 import { Settings } from '../../config/settings';
 import { UnitOfWork } from '../../database/unit-of-work';
@@ -38,6 +39,7 @@ export class ReadingsCollector implements OnModuleInit {
     private readonly settings: Settings,
     private readonly work: UnitOfWork,
     private readonly jobs: JobsService,
+    private readonly clock: Clock,
   ) {}
 
   onModuleInit(): void {
@@ -46,11 +48,12 @@ export class ReadingsCollector implements OnModuleInit {
 
   /** Collects every source whose turn it is; says how it went. A source that fails does not hold up the others. */
   async collect(): Promise<string> {
+    const begunAt = this.clock.now();
     const due = await this.sources.dueFolders();
     const results: string[] = [];
     for (const source of due) {
       const { result, failed } = await this.collectSource(source);
-      await this.sources.collected(source, result, failed);
+      await this.sources.collected(source, begunAt, result, failed);
       results.push(`source ${source.id}: ${result}`);
     }
     return results.join('; ') || 'no source was due';
