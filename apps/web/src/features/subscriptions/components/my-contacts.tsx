@@ -8,7 +8,7 @@ export function MyContacts({ contacts, lang }: { contacts: SubscriptionView['con
   return (
     <section>
       <h2>{words.reach}</h2>
-      <ul>
+      <ul className="contact-list">
         {contacts.map(({ channel, address, confirmed }) => (
           <li key={channel + address}>
             {address}
