@@ -64,10 +64,14 @@ export const up: readonly string[] = [
      since_t INTEGER NOT NULL, seen_at INTEGER NOT NULL, text TEXT NOT NULL, told_at INTEGER, ended_at INTEGER) STRICT`,
   `CREATE UNIQUE INDEX tower_trouble_open ON tower_trouble(tower_id, kind) WHERE ended_at IS NULL`,
 
+  // --- readings that a check or a person spoke of: few of many ---------------------------------------------------
+  `CREATE INDEX reading_flagged ON reading(sensor_id, t_end, quality, checks) WHERE checks <> 0`,
+
   // --- what was worked out anew, and what it changed ------------------------------------------------------------
   `CREATE TABLE rework (
      id INTEGER PRIMARY KEY, tower_id INTEGER NOT NULL REFERENCES tower(id), cause TEXT NOT NULL, by_user INTEGER REFERENCES user(id),
-     t0 INTEGER NOT NULL, t1 INTEGER NOT NULL, begun_at INTEGER NOT NULL, blocks INTEGER NOT NULL, ended_at INTEGER, changes TEXT) STRICT`,
+     t0 INTEGER NOT NULL, t1 INTEGER NOT NULL, begun_at INTEGER NOT NULL, blocks INTEGER NOT NULL,
+     past_seq INTEGER NOT NULL, truths_before TEXT NOT NULL, ended_at INTEGER, changes TEXT) STRICT`,
   `CREATE INDEX rework_tower ON rework(tower_id, id)`,
   `CREATE INDEX rework_open ON rework(tower_id) WHERE ended_at IS NULL`,
 
