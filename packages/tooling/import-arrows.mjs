@@ -40,6 +40,7 @@ const FLOORS = [
   ['scheduler', 'activity'],
   ['outbox'],
   ['users', 'auth'],
+  ['rework'],
   ['office', 'towers', 'districts'],
   ['readings', 'screening', 'profiles'],
   ['rules'],

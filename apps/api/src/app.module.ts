@@ -19,6 +19,7 @@ import { ProfilesModule } from './profiles/profiles.module';
 import { ProposalsModule } from './proposals/proposals.module';
 import { PublicStatusModule } from './public-status/public-status.module';
 import { ReadingsModule } from './readings/readings.module';
+import { ReworkModule } from './rework/rework.module';
 import { RulesModule } from './rules/rules.module';
 import { SchedulerModule } from './scheduler/scheduler.module';
 import { ScreeningModule } from './screening/screening.module';
@@ -38,6 +39,7 @@ import { UsersModule } from './users/users.module';
     ActivityModule,
     UsersModule,
     AuthModule,
+    ReworkModule,
     TowersModule,
     DistrictsModule,
     ReadingsModule,

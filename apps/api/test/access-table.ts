@@ -58,6 +58,7 @@ export const accessTable: Record<string, Access> = {
   'GET /api/overrides': all,
   'POST /api/overrides': analyst,
   'DELETE /api/overrides/:id': analyst,
+  'GET /api/reworks': all,
   'GET /api/towers/:id/profile': all,
   'GET /api/towers/:id/profiles': all,
   'GET /api/towers/:id/pipeline': all,

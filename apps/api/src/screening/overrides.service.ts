@@ -8,6 +8,7 @@ import { invalid } from '../common/validation';
 import { DirtyStages } from '../database/dirty';
 import { Sql } from '../database/sql';
 import { UnitOfWork } from '../database/unit-of-work';
+import { ReworkService } from '../rework/rework.service';
 import { blockEndOf } from '../towers/tower-layout';
 import { TowerLayouts } from '../towers/tower-layouts';
 import type { OverrideDto, OverrideInput } from './dto/override.dto';
@@ -46,6 +47,7 @@ export class OverridesService {
     private readonly work: UnitOfWork,
     private readonly clock: Clock,
     private readonly activity: ActivityService,
+    private readonly reworks: ReworkService,
   ) {}
 
   /** A tower's set spans, the newest first, undone ones too. */
@@ -62,14 +64,15 @@ export class OverridesService {
     const [t0, t1] = [seconds(input.from), seconds(input.to)];
     if (t1 < t0) throw invalid([{ field: 'to', text: 'The span ends before it begins: exchange the two.' }]);
     return this.work.run(async () => {
-      const sensor = await this.sql.get<{ towerId: number }>(
-        'SELECT tower_id towerId FROM sensor WHERE id = $1',
+      const sensor = await this.sql.get<{ towerId: number; name: string }>(
+        'SELECT tower_id towerId, name FROM sensor WHERE id = $1',
         [input.sensorId],
       );
       if (!sensor) throw invalid([{ field: 'sensorId', text: `There is no sensor ${input.sensorId}.` }]);
       const values = [input.sensorId, t0, t1, input.quality, input.reason, by.id, this.clock.now()];
       const [made] = await this.sql.returning<{ id: number }>(INSERT, values);
-      await this.mark(sensor.towerId, t0, t1);
+      const done = input.quality === 'failed' ? 'set aside' : 'set right';
+      await this.workOutAnew(sensor.towerId, t0, t1, by, `${sensor.name} ${done}: ${input.reason}`);
       await this.record(`set readings ${input.quality}`, sensor.towerId, by, input);
       return show(await this.find(made!.id));
     });
@@ -85,7 +88,8 @@ export class OverridesService {
       await this.sql.run('UPDATE override SET undone_by = $2, undone_at = $3 WHERE id = $1', [
         ...[id, by.id, this.clock.now()],
       ]);
-      await this.mark(row.towerId, row.t0, row.t1);
+      const done = row.quality === 'failed' ? 'setting aside' : 'setting right';
+      await this.workOutAnew(row.towerId, row.t0, row.t1, by, `${row.sensorName}: ${done} undone`);
       await this.record('undid a set span', row.towerId, by, { id });
       return show(await this.find(id));
     });
@@ -97,9 +101,17 @@ export class OverridesService {
     return row;
   }
 
-  private async mark(towerId: number, t0: number, t1: number): Promise<void> {
+  private async workOutAnew(
+    towerId: number,
+    t0: number,
+    t1: number,
+    by: SignedIn,
+    cause: string,
+  ): Promise<void> {
     const { blockS } = await this.layouts.of(towerId);
-    await this.dirty.markTower(towerId, t0 - 1, blockEndOf(t1, blockS));
+    const span = { t0: t0 - 1, t1: blockEndOf(t1, blockS) };
+    await this.dirty.markTower(towerId, span.t0, span.t1);
+    await this.reworks.begin({ towerId, cause, byUser: by.id, ...span });
   }
 
   private record(act: string, towerId: number, by: SignedIn, body: object): Promise<void> {

@@ -176,6 +176,22 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/reworks': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Reworks.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/towers': {
     parameters: {
       query?: never;
@@ -1000,6 +1016,49 @@ export interface components {
     PasswordLink: {
       /** @description Works once, for a day. Hand it to this person only. */
       url: string;
+    };
+    DistrictTruthsChanged: {
+      districtId: number;
+      name: string;
+      /** @description Blocks of the last 24 h for which the rule in force now says otherwise */
+      truthsChanged: number;
+    };
+    ChangedFindings: {
+      /** @description Blocks whose profile or findings differ */
+      blocksChanged: number;
+      presentToAbsent: number;
+      absentToPresent: number;
+      toNotKnown: number;
+      fromNotKnown: number;
+      /** @description Within the tower, °C; null where none was present */
+      strongestBeforeC: number | null;
+      /** @description Within the tower, °C; null where none was present */
+      strongestAfterC: number | null;
+      inversionHoursBefore: number;
+      inversionHoursAfter: number;
+      districts: components['schemas']['DistrictTruthsChanged'][];
+    };
+    Rework: {
+      id: number;
+      towerId: number;
+      /** @description What was changed, in words */
+      cause: string;
+      /** @description null: the service itself */
+      by: string | null;
+      /** @description Begin of the first block concerned */
+      from: string;
+      /** @description End of the last block concerned */
+      to: string;
+      begunAt: string;
+      endedAt: string | null;
+      /** @description Blocks to be worked out anew */
+      blocks: number;
+      /** @description The tower's blocks that still wait */
+      pending: number;
+      /** @description The districts' blocks that still wait */
+      pendingDistricts: number;
+      /** @description null until it has ended */
+      changes: components['schemas']['ChangedFindings'] | null;
     };
     SensorVersion: {
       /** @description null: from the beginning */
@@ -2445,6 +2504,27 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['PasswordLink'];
+        };
+      };
+    };
+  };
+  'Reworks.list': {
+    parameters: {
+      query?: {
+        towerId?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Rework'][];
         };
       };
     };
