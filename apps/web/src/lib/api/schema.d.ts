@@ -416,6 +416,54 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/towers/{id}/calendar': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Screening.calendar'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/flags': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Screening.flagged'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/raw': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Screening.readings'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/towers/{id}/profile': {
     parameters: {
       query?: never;
@@ -1497,6 +1545,136 @@ export interface components {
       quality: 'valid' | 'failed';
       /** @description Why; it is kept with your name */
       reason: string;
+    };
+    SeenSensor: {
+      sensorId: number;
+      name: string;
+      /** @enum {string} */
+      quantity:
+        | 'air temperature'
+        | 'relative humidity'
+        | 'dew point'
+        | 'wet bulb'
+        | 'wind speed'
+        | 'wind direction'
+        | 'station pressure'
+        | 'pm2.5';
+      unit: string;
+      /** @description Above ground, as it is now */
+      heightM: number;
+    };
+    DayOfSensor: {
+      sensorId: number;
+      /** @description By the tower's interval, from its first reading up to now */
+      expected: number;
+      taken: number;
+      suspect: number;
+      failed: number;
+      /** @description Readings that can be used (taken and not failed) of those expected; null where none is */
+      completenessPercent: number | null;
+    };
+    CalendarDay: {
+      /** @example 2026-01-31 */
+      day: string;
+      from: string;
+      to: string;
+      /** @description In the order of the sensors */
+      sensors: components['schemas']['DayOfSensor'][];
+    };
+    TowerCalendar: {
+      towerId: number;
+      /** @description That of the tower's first district; UTC where it has none */
+      timeZone: string;
+      sensors: components['schemas']['SeenSensor'][];
+      days: components['schemas']['CalendarDay'][];
+    };
+    FlaggedSpan: {
+      sensorId: number;
+      sensorName: string;
+      /** @enum {string} */
+      check:
+        | 'range'
+        | 'spike'
+        | 'step'
+        | 'persistence'
+        | 'internal consistency'
+        | 'vertical consistency'
+        | 'neighbours'
+        | 'override'
+        | 'stuck'
+        | 'clock';
+      /** @description What the check found, in plain words with its limits */
+      says: string;
+      /**
+       * @description The worst of its readings
+       * @enum {string}
+       */
+      quality: 'valid' | 'suspect' | 'failed' | 'missing';
+      /** @description End of the first reading */
+      from: string;
+      /** @description End of the last reading */
+      to: string;
+      readings: number;
+      /** @description Whose word holds instead of the check */
+      setBy: string | null;
+    };
+    FlaggedSpanPage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['FlaggedSpan'][];
+    };
+    RawReading: {
+      /** @description End of its interval */
+      t: string;
+      /** @description As it came */
+      value: number;
+      /** @description With the correction of its time; left out where there is none */
+      corrected?: number;
+      /** @enum {string} */
+      quality: 'valid' | 'suspect' | 'failed' | 'missing';
+      /** @description What spoke of it */
+      checks?: (
+        | 'range'
+        | 'spike'
+        | 'step'
+        | 'persistence'
+        | 'internal consistency'
+        | 'vertical consistency'
+        | 'neighbours'
+        | 'override'
+        | 'stuck'
+        | 'clock'
+      )[];
+    };
+    RawSeries: {
+      sensorId: number;
+      name: string;
+      /** @enum {string} */
+      quantity:
+        | 'air temperature'
+        | 'relative humidity'
+        | 'dew point'
+        | 'wet bulb'
+        | 'wind speed'
+        | 'wind direction'
+        | 'station pressure'
+        | 'pm2.5';
+      unit: string;
+      /** @description Above ground, as it is now */
+      heightM: number;
+      /** @description How many there are */
+      readings: number;
+      /** @description Fewer are given: the extremes of each part of the time, and what is flagged */
+      thinned: boolean;
+      points: components['schemas']['RawReading'][];
+    };
+    RawReadings: {
+      towerId: number;
+      timeZone: string;
+      from: string;
+      to: string;
+      sensors: components['schemas']['RawSeries'][];
     };
     ProfileLevel: {
       heightM: number;
@@ -2993,6 +3171,93 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['Override'];
+        };
+      };
+    };
+  };
+  'Screening.calendar': {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TowerCalendar'];
+        };
+      };
+    };
+  };
+  'Screening.flagged': {
+    parameters: {
+      query: {
+        page?: number;
+        pageSize?: number;
+        from: string;
+        to: string;
+        sensorId?: number;
+        check?:
+          | 'range'
+          | 'spike'
+          | 'step'
+          | 'persistence'
+          | 'internal consistency'
+          | 'vertical consistency'
+          | 'neighbours'
+          | 'override'
+          | 'stuck'
+          | 'clock';
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FlaggedSpanPage'];
+        };
+      };
+    };
+  };
+  'Screening.readings': {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+        sensorId?: number;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['RawReadings'];
         };
       };
     };
