@@ -1,108 +1,26 @@
-import { longHeader, wideHeader, type LongHeader, type WideHeader } from './header';
-import type { Mapping } from './mapping';
-import { readNumber } from './number-cell';
+import { CsvReader, type ReadingContext } from './csv-reader';
 import { HeaderError, type ParsedReadings } from './parsed-readings';
-import { readRecords, type CsvRecord } from './records';
-import { quoted } from '../../common/quoted';
-import { refusedRow, type Refusal } from '../refusal';
-import { intervalEnd, type TimeKeeping } from '../../towers/time-keeping/interval-end';
+import { linesOf } from './records';
 
-/** What a text of readings is read against: its layout, the tower's sensors by name, its clock, and now. */
-export interface ReadingContext {
-  readonly mapping: Mapping;
-  readonly sensorIds: ReadonlyMap<string, number>;
-  readonly time: TimeKeeping;
-  readonly nowS: number;
-}
+export type { ReadingContext } from './csv-reader';
 
-const cellsDoNotMatch = (found: number, expected: number): Refusal => ({
-  code: 'cells-do-not-match-header',
-  why: `it has ${found} cells where the header has ${expected}; send the whole line again.`,
-});
-
-class Reader {
-  readonly result: ParsedReadings = { rows: [], refused: [], ignoredColumns: [] };
-  private wide?: WideHeader;
-  private long?: LongHeader;
-  private headerRaw?: string;
-  private readonly noReading: ReadonlySet<string>;
-
-  constructor(private readonly given: ReadingContext) {
-    this.noReading = new Set(['', ...given.mapping.missing.map((mark) => mark.trim())]);
-  }
-
-  get hasHeader(): boolean {
-    return this.wide !== undefined || this.long !== undefined;
-  }
-
-  readHeader({ cells, raw }: CsvRecord): void {
-    this.headerRaw = raw;
-    if (this.given.mapping.format === 'wide') {
-      this.wide = wideHeader(cells, this.given.mapping, this.given.sensorIds);
-    } else this.long = longHeader(cells, this.given.mapping);
-    this.result.ignoredColumns.push(...(this.wide ?? this.long)!.ignored);
-  }
-
-  read(record: CsvRecord): void {
-    const header = (this.wide ?? this.long)!;
-    if (record.raw === this.headerRaw) return;
-    if (record.cells.length !== header.cells) {
-      this.refuse(record, undefined, cellsDoNotMatch(record.cells.length, header.cells));
-      return;
-    }
-    const tEnd = intervalEnd(record.cells[header.time]!, this.given.time, this.given.nowS);
-    if (typeof tEnd !== 'number') this.refuse(record, this.given.mapping.timeColumn, tEnd);
-    else if (this.wide) this.readWide(record, this.wide, tEnd);
-    else this.readLong(record, this.long!, tEnd);
-  }
-
-  private readWide(record: CsvRecord, header: WideHeader, tEnd: number): void {
-    for (const { index, column, sensorId } of header.sensors) {
-      this.take(record, column, sensorId, tEnd, record.cells[index]!);
-    }
-  }
-
-  private readLong(record: CsvRecord, header: LongHeader, tEnd: number): void {
-    const { mapping, sensorIds } = this.given;
-    const named = record.cells[header.sensor]!.trim();
-    const sensorId = sensorIds.get(mapping.columns[named] ?? named);
-    if (sensorId !== undefined) {
-      this.take(record, mapping.valueColumn, sensorId, tEnd, record.cells[header.value]!);
-      return;
-    }
-    const why = `this tower has no sensor ${quoted(named)}; correct the name, map it, or add the sensor first.`;
-    this.refuse(record, mapping.sensorColumn, { code: 'sensor-not-known', why });
-  }
-
-  private take(record: CsvRecord, column: string, sensorId: number, tEnd: number, cell: string): void {
-    if (this.noReading.has(cell.trim())) return;
-    const value = readNumber(cell, this.given.mapping.decimal);
-    if (typeof value !== 'number') this.refuse(record, column, value);
-    else this.result.rows.push({ sensorId, tEnd, value, rowNo: record.rowNo });
-  }
-
-  private refuse(record: CsvRecord, column: string | undefined, refusal: Refusal): void {
-    this.result.refused.push(refusedRow(record.rowNo, column, refusal, record.raw));
-  }
-}
+/** Lines parsed at a time, so that a large file does not hold up other requests. */
+const LINES_AT_A_TIME = 2_000;
 
 const pause = (): Promise<void> => new Promise((resolve) => setImmediate(resolve));
 
 /**
  * Reads a CSV text of readings, wide or long, its header line first; `headerRowNo` is the row number the header counts
  * as. Bad cells and bad rows are refused one by one, the rest is taken; a header that cannot be used throws a
- * `HeaderError`. The header written again, as loggers do when they start anew, is passed over. Gives way to other work between batches of lines.
+ * `HeaderError`. Gives way to other work between batches of lines.
  */
 export async function readCsv(text: string, given: ReadingContext, headerRowNo = 1): Promise<ParsedReadings> {
-  const reader = new Reader(given);
-  const batches = readRecords(text, given.mapping.separator, reader.result.refused, headerRowNo);
-  for (const batch of batches) {
-    for (const record of batch) {
-      if (reader.hasHeader) reader.read(record);
-      else reader.readHeader(record);
-    }
+  const reader = new CsvReader(given);
+  const lines = linesOf(text);
+  for (let at = 0; at < lines.length; at += LINES_AT_A_TIME) {
+    reader.readLines(lines.slice(at, at + LINES_AT_A_TIME), headerRowNo + at);
     await pause();
   }
   if (!reader.hasHeader) throw new HeaderError('The file has no header line; send the column names first.');
-  return reader.result;
+  return reader.take();
 }

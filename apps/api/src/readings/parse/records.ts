@@ -10,8 +10,6 @@ export interface CsvRecord {
 
 /** Lines longer than this are refused unread: no logger writes them. */
 const LONGEST_LINE = 1_000_000;
-/** Lines parsed at a time, so that a large file does not hold up other requests. */
-const LINES_AT_A_TIME = 2_000;
 
 const options = (separator: string) => ({
   delimiter: separator === 'blank' ? [' ', '\t'] : separator,
@@ -33,9 +31,13 @@ const refusalOf = (line: string, rowNo: number, error: unknown): RefusedRow => {
   return refusedRow(rowNo, undefined, { code: 'quotes-do-not-match', why }, line);
 };
 
-/** Parses a batch of lines; where the batch fails, each line alone, so that one bad line costs only itself. */
-function parseBatch(
-  lines: string[],
+/**
+ * Lines as records. A record is a line: a logger's cell never spans two, so a stray quotation mark spoils its own line
+ * only; such lines go to `refused`. Empty lines are passed over but counted, so that row numbers are those of an
+ * editor. Where the lines fail together, each is parsed alone, so that one bad line costs only itself.
+ */
+export function recordsOf(
+  lines: readonly string[],
   firstRowNo: number,
   separator: string,
   refused: RefusedRow[],
@@ -68,19 +70,5 @@ const wholeBatch = (text: string, separator: string): string[][] | undefined => 
   }
 };
 
-/**
- * The lines of a text as records, in batches. A record is a line (LF, CRLF or CR): a logger's cell never spans two,
- * so a stray quotation mark spoils its own line only; such lines go to `refused`. Empty lines are passed over but
- * counted, so that row numbers are those of an editor.
- */
-export function* readRecords(
-  text: string,
-  separator: string,
-  refused: RefusedRow[],
-  firstRowNo = 1,
-): Generator<CsvRecord[]> {
-  const lines = text.split(/\r\n|\n|\r/);
-  for (let at = 0; at < lines.length; at += LINES_AT_A_TIME) {
-    yield parseBatch(lines.slice(at, at + LINES_AT_A_TIME), firstRowNo + at, separator, refused);
-  }
-}
+/** The lines of a text: LF, CRLF or CR ends one. */
+export const linesOf = (text: string): string[] => text.split(/\r\n|\n|\r/);
