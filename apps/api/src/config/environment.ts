@@ -3,6 +3,10 @@ import { StartFault } from '../common/start-fault';
 /** Looks up one environment variable by name. */
 export type Lookup = (name: string) => string | undefined;
 
+/** Whether a text is a host with or without a port, and nothing else (no scheme, account, path or wildcard). */
+const isHost = (text: string): boolean =>
+  /^([a-z0-9.-]+|\[[0-9a-f:.]+\])(:\d{1,5})?$/.test(text) && URL.canParse(`http://${text}`);
+
 /** Reads environment variables by kind; each fault is a sentence with the variable's name and what it should be. */
 export class Environment {
   constructor(private readonly lookup: Lookup) {}
@@ -36,6 +40,17 @@ export class Environment {
     if (text === undefined) return undefined;
     if (/^https?:\/\/[^\s/]+/.test(text) && URL.canParse(text)) return text.replace(/\/+$/, '');
     throw new StartFault(`${name} is "${text}": set it to an address such as https://air.example.org.`);
+  }
+
+  /** A comma-separated list of `host` or `host:port`, in lower case; empty when unset. */
+  hosts(name: string): string[] {
+    const entries = (this.text(name) ?? '').toLowerCase().split(',');
+    const hosts = entries.map((entry) => entry.trim()).filter((entry) => entry !== '');
+    const wrong = hosts.find((host) => !isHost(host));
+    if (wrong === undefined) return hosts;
+    throw new StartFault(
+      `${name} has "${wrong}": write each as host or host:port, such as loggers.example.org:8080, with commas between.`,
+    );
   }
 
   /** The values of variables that are only of use together: all of them, or undefined when none is set. */

@@ -22,6 +22,7 @@ describe('reading the settings', () => {
       sms: { baseUrl: 'http://127.0.0.1:3026' },
       sessionIdleMinutes: 30,
       sessionMaxHours: 12,
+      httpSourceHosts: [],
       production: false,
     });
   });
@@ -34,6 +35,7 @@ describe('reading the settings', () => {
       DEMO: 'OFF',
       PUBLIC_URL: 'https://air.example.org/',
       SMTP_PORT: '465',
+      HTTP_SOURCE_HOSTS: 'Loggers.example.org, 192.0.2.7:8080,[::1]:81',
       ...account,
     });
     expect(settings).toMatchObject({
@@ -41,6 +43,7 @@ describe('reading the settings', () => {
       demo: false,
       publicUrl: 'https://air.example.org',
       smtp: { secure: true },
+      httpSourceHosts: ['loggers.example.org', '192.0.2.7:8080', '[::1]:81'],
     });
     expect(settings.sms).toEqual({ accountSid: sid, authToken: 'token', from: '+12085550123' });
   });
@@ -65,6 +68,8 @@ describe('reading the settings', () => {
     [{ LOG_LEVEL: 'loud' }, /LOG_LEVEL is "loud"/],
     [{ SMS_FROM: '+12085550123' }, /set SMS_ACCOUNT_SID and SMS_AUTH_TOKEN too/],
     [{ SMS_ACCOUNT_SID: 'x', SMS_AUTH_TOKEN: 'y', SMS_FROM: '+12085550123' }, /32 hexadecimal digits/],
+    [{ HTTP_SOURCE_HOSTS: 'loggers.example.org, http://x' }, /HTTP_SOURCE_HOSTS has "http:\/\/x"/],
+    [{ HTTP_SOURCE_HOSTS: '*.example.org' }, /write each as host or host:port/],
     [{ SMS_BASE_URL: 'ftp://x' }, /SMS_BASE_URL is "ftp:\/\/x"/],
   ])('refuses %j', (environment, words) => {
     expect(() => read(environment as unknown as Record<string, string>)).toThrow(words);

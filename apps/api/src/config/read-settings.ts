@@ -30,6 +30,7 @@ export function readSettings(lookup: Lookup): Settings {
     publicUrl: env.webAddress('PUBLIC_URL') ?? `http://localhost:${port}`,
     production: env.text('NODE_ENV') === 'production',
     loggerDir: path.resolve(repositoryRoot, env.text('LOGGER_DIR') ?? path.join(dataDir, 'loggers')),
+    httpSourceHosts: env.hosts('HTTP_SOURCE_HOSTS'),
     webDir: path.resolve(repositoryRoot, 'apps/web/dist'),
     smtp: readSmtp(env),
     sms: readSms(env),

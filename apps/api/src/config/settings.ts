@@ -36,6 +36,8 @@ export class Settings {
   production!: boolean;
   /** The folder the loggers write into. */
   loggerDir!: string;
+  /** The hosts that sources over HTTP may be collected from, each `host` or `host:port`; none when empty. */
+  httpSourceHosts!: string[];
   /** The folder of the built web application. */
   webDir!: string;
   /** Random, made at the first start and kept in the data folder; signs cookies and links. */
