@@ -33,6 +33,8 @@ export class ReadingContexts {
         stamp: mapping.stamp ?? tower.stamp,
         form: mapping.timeForm,
         intervalS: tower.intervalS,
+        repeatedHour: mapping.repeatedHour,
+        missingHour: mapping.missingHour,
       },
       nowS: this.clock.now(),
     };

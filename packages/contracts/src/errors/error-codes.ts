@@ -28,6 +28,7 @@ export const errorCodes = {
   'too-many-attempts': { status: 429, title: 'Too many attempts' },
   unexpected: { status: 500, title: 'Something went wrong on our side' },
   'not-ready': { status: 503, title: 'The service is not ready' },
+  'no-room': { status: 507, title: 'The disk of the service is full' },
 } as const;
 
 /** A stable error code. */

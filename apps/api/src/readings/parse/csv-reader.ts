@@ -5,7 +5,10 @@ import type { ParsedReadings } from './parsed-readings';
 import { recordsOf, type CsvRecord } from './records';
 import { quoted } from '../../common/quoted';
 import { refusedRow, type Refusal } from '../refusal';
-import { intervalEnd, type TimeKeeping } from '../../towers/time-keeping/interval-end';
+import type { TimeKeeping } from '../../towers/time-keeping/interval-end';
+import { TimeReader } from '../../towers/time-keeping/time-reader';
+import { joinTime } from './join-time';
+import { inOwnUnit, type ForeignUnit } from '../../towers/units';
 
 /** What a text of readings is read against: its layout, the tower's sensors by name, its clock, and now. */
 export interface ReadingContext {
@@ -13,6 +16,12 @@ export interface ReadingContext {
   readonly sensorIds: ReadonlyMap<string, number>;
   readonly time: TimeKeeping;
   readonly nowS: number;
+}
+
+interface Place {
+  readonly sensorId: number;
+  readonly tEnd: number;
+  readonly unit: ForeignUnit | undefined;
 }
 
 const cellsDoNotMatch = (found: number, expected: number): Refusal => ({
@@ -31,8 +40,10 @@ export class CsvReader {
   private long?: LongHeader;
   private headerRaw?: string;
   private readonly noReading: ReadonlySet<string>;
+  private readonly times: TimeReader;
 
   constructor(private readonly given: ReadingContext) {
+    this.times = new TimeReader(given.time, given.nowS, given.mapping.format === 'wide');
     this.noReading = new Set(['', ...given.mapping.missing.map((mark) => mark.trim())]);
   }
 
@@ -46,7 +57,7 @@ export class CsvReader {
     const { separator } = this.given.mapping;
     for (const record of recordsOf(lines, firstRowNo, separator, this.result.refused)) {
       if (this.hasHeader) this.read(record);
-      else this.readHeader(record);
+      else this.begin(record);
     }
   }
 
@@ -57,8 +68,20 @@ export class CsvReader {
     return taken;
   }
 
-  private readHeader({ cells, raw }: CsvRecord): void {
-    this.headerRaw = raw;
+  /** The header; lines above it are passed over. A file without one has columns by number. */
+  private begin(record: CsvRecord): void {
+    const { headerRow = 1, firstDataRow = 1 } = this.given.mapping;
+    if (headerRow === 0) {
+      if (record.rowNo < firstDataRow) return;
+      this.useHeader(record.cells.map((_, i) => String(i + 1)));
+      this.read(record);
+    } else if (record.rowNo >= headerRow) {
+      this.headerRaw = record.raw;
+      this.useHeader(record.cells);
+    }
+  }
+
+  private useHeader(cells: readonly string[]): void {
     if (this.given.mapping.format === 'wide') {
       this.wide = wideHeader(cells, this.given.mapping, this.given.sensorIds);
     } else this.long = longHeader(cells, this.given.mapping);
@@ -67,20 +90,34 @@ export class CsvReader {
 
   private read(record: CsvRecord): void {
     const header = (this.wide ?? this.long)!;
-    if (record.raw === this.headerRaw) return;
+    if (record.raw === this.headerRaw || record.rowNo < (this.given.mapping.firstDataRow ?? 0)) return;
     if (record.cells.length !== header.cells) {
       this.refuse(record, undefined, cellsDoNotMatch(record.cells.length, header.cells));
       return;
     }
-    const tEnd = intervalEnd(record.cells[header.time]!, this.given.time, this.given.nowS);
-    if (typeof tEnd !== 'number') this.refuse(record, this.given.mapping.timeColumn, tEnd);
+    const tEnd = this.times.read(this.timeOf(record, header.time));
+    if (typeof tEnd !== 'number') this.refuse(record, this.timeName, tEnd);
     else if (this.wide) this.readWide(record, this.wide, tEnd);
     else this.readLong(record, this.long!, tEnd);
   }
 
+  private get timeName(): string {
+    const { timeColumn, timeColumns } = this.given.mapping;
+    return timeColumns?.map(({ column }) => column).join(' ') ?? timeColumn;
+  }
+
+  private timeOf({ cells }: CsvRecord, places: readonly number[]): string {
+    const { timeColumns } = this.given.mapping;
+    if (!timeColumns) return cells[places[0]!]!;
+    return joinTime(
+      places.map((place) => cells[place]!),
+      timeColumns,
+    );
+  }
+
   private readWide(record: CsvRecord, header: WideHeader, tEnd: number): void {
-    for (const { index, column, sensorId } of header.sensors) {
-      this.takeCell(record, column, sensorId, tEnd, record.cells[index]!);
+    for (const { index, column, sensorId, unit } of header.sensors) {
+      this.takeCell(record, column, { sensorId, tEnd, unit }, record.cells[index]!);
     }
   }
 
@@ -89,18 +126,19 @@ export class CsvReader {
     const named = record.cells[header.sensor]!.trim();
     const sensorId = sensorIds.get(mapping.columns[named] ?? named);
     if (sensorId !== undefined) {
-      this.takeCell(record, mapping.valueColumn, sensorId, tEnd, record.cells[header.value]!);
+      const place = { sensorId, tEnd, unit: mapping.units?.[named] };
+      this.takeCell(record, mapping.valueColumn, place, record.cells[header.value]!);
       return;
     }
     const why = `this tower has no sensor ${quoted(named)}; correct the name, map it, or add the sensor first.`;
     this.refuse(record, mapping.sensorColumn, { code: 'sensor-not-known', why });
   }
 
-  private takeCell(record: CsvRecord, column: string, sensorId: number, tEnd: number, cell: string): void {
+  private takeCell(record: CsvRecord, column: string, { sensorId, tEnd, unit }: Place, cell: string): void {
     if (this.noReading.has(cell.trim())) return;
     const value = readNumber(cell, this.given.mapping.decimal);
     if (typeof value !== 'number') this.refuse(record, column, value);
-    else this.result.rows.push({ sensorId, tEnd, value, rowNo: record.rowNo });
+    else this.result.rows.push({ sensorId, tEnd, value: inOwnUnit(value, unit), rowNo: record.rowNo });
   }
 
   private refuse(record: CsvRecord, column: string | undefined, refusal: Refusal): void {

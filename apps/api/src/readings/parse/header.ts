@@ -1,19 +1,29 @@
 import { HeaderError } from './parsed-readings';
 import type { Mapping } from './mapping';
+import type { ForeignUnit } from '../../towers/units';
 import { quoted } from '../../common/quoted';
 
 /** A wide file's columns: where the time stands and which sensor each other column is. */
 export interface WideHeader {
   readonly cells: number;
-  readonly time: number;
-  readonly sensors: readonly { readonly index: number; readonly column: string; readonly sensorId: number }[];
+  /** Where the time stands; several places where it stands in several columns. */
+  readonly time: readonly number[];
+  readonly sensors: readonly WideColumn[];
   readonly ignored: string[];
 }
 
-/** A long file's three columns. */
+/** A column of a wide file that is a sensor's. */
+export interface WideColumn {
+  readonly index: number;
+  readonly column: string;
+  readonly sensorId: number;
+  readonly unit?: ForeignUnit;
+}
+
+/** A long file's columns. */
 export interface LongHeader {
   readonly cells: number;
-  readonly time: number;
+  readonly time: readonly number[];
   readonly sensor: number;
   readonly value: number;
   readonly ignored: string[];
@@ -48,6 +58,9 @@ const checked = (cells: readonly string[]): string[] => {
   return cells.map((cell) => cell.trim());
 };
 
+const times = (header: readonly string[], { timeColumn, timeColumns }: Mapping): number[] =>
+  (timeColumns?.map(({ column }) => column) ?? [timeColumn]).map((column) => place(header, column));
+
 /** Finds the columns of a wide file. Columns that no sensor of the tower has are ignored, and said. */
 export function wideHeader(
   cells: readonly string[],
@@ -55,13 +68,14 @@ export function wideHeader(
   sensorIds: ReadonlyMap<string, number>,
 ): WideHeader {
   const header = checked(cells);
-  const time = place(header, mapping.timeColumn);
-  const sensors = header.flatMap((column, index) => {
+  const time = times(header, mapping);
+  const sensors = header.flatMap((column, index): WideColumn[] => {
     const sensorId = sensorIds.get(mapping.columns[column] ?? column);
-    if (index === time || sensorId === undefined) return [];
+    if (time.includes(index) || sensorId === undefined) return [];
     place(header, column);
-    return [{ index, column, sensorId }];
+    return [{ index, column, sensorId, unit: mapping.units?.[column] }];
   });
+  refuseSameSensor(sensors);
   if (sensors.length === 0) {
     const known = [...sensorIds.keys()].slice(0, LISTED).map(quoted).join(', ');
     throw new HeaderError(
@@ -69,16 +83,29 @@ export function wideHeader(
         `use the sensors' names as headers, or map the headers to them.`,
     );
   }
-  const used = new Set([time, ...sensors.map((s) => s.index)]);
+  const used = new Set([...time, ...sensors.map((s) => s.index)]);
   return { cells: header.length, time, sensors, ignored: header.filter((_, i) => !used.has(i)) };
 }
 
-/** Finds the three columns of a long file. */
+/** Finds the columns of a long file. */
 export function longHeader(cells: readonly string[], mapping: Mapping): LongHeader {
   const header = checked(cells);
-  const [time, sensor, value] = [mapping.timeColumn, mapping.sensorColumn, mapping.valueColumn].map((name) =>
-    place(header, name),
-  ) as [number, number, number];
-  const ignored = header.filter((_, i) => i !== time && i !== sensor && i !== value);
+  const time = times(header, mapping);
+  const [sensor, value] = [place(header, mapping.sensorColumn), place(header, mapping.valueColumn)];
+  const ignored = header.filter((_, i) => !time.includes(i) && i !== sensor && i !== value);
   return { cells: header.length, time, sensor, value, ignored };
+}
+
+function refuseSameSensor(sensors: readonly WideColumn[]): void {
+  const seen = new Map<number, string>();
+  for (const { column, sensorId } of sensors) {
+    const other = seen.get(sensorId);
+    if (other !== undefined) {
+      throw new HeaderError(
+        `The columns ${quoted(other)} and ${quoted(column)} are set to the same sensor; ` +
+          `give each column its own sensor, or leave one of them out.`,
+      );
+    }
+    seen.set(sensorId, column);
+  }
 }

@@ -1,5 +1,14 @@
-import type { StampForm } from '../../towers/time-keeping/stamp';
 import type { StampMeaning } from '../../towers/time-keeping/interval-end';
+import type { MissingHour, RepeatedHour } from '../../towers/time-keeping/logger-clock';
+import type { StampForm } from '../../towers/time-keeping/stamp';
+import type { TimePart } from '../../towers/time-keeping/time-parts';
+import type { ForeignUnit } from '../../towers/units';
+
+/** A column that holds a part of the time. */
+export interface TimeColumn {
+  readonly column: string;
+  readonly part: TimePart;
+}
 
 /**
  * How a source's files are laid out. *wide*: a time column and a column per sensor. *long*: a time column, a sensor
@@ -9,12 +18,20 @@ export interface Mapping {
   readonly format: 'wide' | 'long';
   readonly separator: string;
   readonly decimal: '.' | ',';
+  /** Row of the header, the first line being 1; 0: none, the columns are "1", "2", …. Left out: the first line that is not empty. */
+  readonly headerRow?: number;
+  /** Row of the first reading, where lines stand between the header and it. */
+  readonly firstDataRow?: number;
   readonly timeColumn: string;
+  /** Where the time stands in several columns; wins over `timeColumn`. */
+  readonly timeColumns?: readonly TimeColumn[];
   readonly timeForm: StampForm;
   /** Texts that stand for "no reading". The empty cell always does. */
   readonly missing: readonly string[];
   /** Header → sensor name, where they differ. */
   readonly columns: Readonly<Record<string, string>>;
+  /** Header (wide) or sensor as written (long) → its unit, where it is not the sensor's own. */
+  readonly units?: Readonly<Record<string, ForeignUnit>>;
   /** long only */
   readonly sensorColumn: string;
   /** long only */
@@ -23,6 +40,12 @@ export interface Mapping {
   readonly clock?: string;
   /** Where the source's stamps mean something else than the tower's. */
   readonly stamp?: StampMeaning;
+  /** What is meant by a civil time that happens twice; left out: it is refused. */
+  readonly repeatedHour?: RepeatedHour;
+  /** What is meant by a civil time that does not exist; left out: it is refused. */
+  readonly missingHour?: MissingHour;
+  /** Workbooks: the sheet with the readings; left out: the first that is not hidden. */
+  readonly sheet?: string;
 }
 
 /** The layout of a source that declares nothing: wide, commas, a `time` column, empty or NaN for no reading. */

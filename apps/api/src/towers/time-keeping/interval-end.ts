@@ -1,5 +1,11 @@
-import { readStamp, type StampForm } from './stamp';
-import { instantOf, type LoggerClock } from './logger-clock';
+import { readStamp, type Stamp, type StampForm } from './stamp';
+import {
+  instantOf,
+  type CivilChoice,
+  type LoggerClock,
+  type MissingHour,
+  type RepeatedHour,
+} from './logger-clock';
 import type { TimeRefusal } from './time-refusal';
 
 /** What a stamp marks: the instant of the reading, or the start, middle or end of the logger's interval. */
@@ -14,6 +20,8 @@ export interface TimeKeeping {
   readonly form: StampForm;
   /** The logger's interval, s. */
   readonly intervalS: number;
+  readonly repeatedHour?: RepeatedHour;
+  readonly missingHour?: MissingHour;
 }
 
 /** No reading of this trade is older: earlier dates are a logger that lost its clock. */
@@ -33,8 +41,26 @@ export function endOfInterval(instantS: number, stamp: StampMeaning, intervalS: 
  */
 export function intervalEnd(text: string, time: TimeKeeping, nowS: number): number | TimeRefusal {
   const stamp = readStamp(text, time.form);
-  if ('code' in stamp) return stamp;
-  const instant = instantOf(stamp, time.clock);
+  return 'code' in stamp ? stamp : endOfStamp(stamp, text, time, nowS, fixedChoice(time));
+}
+
+/** What is meant around a change of the clocks, as far as it does not hang on the order of the rows. */
+export function fixedChoice({ repeatedHour, missingHour }: TimeKeeping): CivilChoice {
+  return {
+    ...(repeatedHour === 'first' || repeatedHour === 'second' ? { repeated: repeatedHour } : {}),
+    ...(missingHour === 'later' ? { missing: missingHour } : {}),
+  };
+}
+
+/** The END of the interval that a stamp marks, or why not; as `intervalEnd`, for a stamp that is read already. */
+export function endOfStamp(
+  stamp: Stamp,
+  text: string,
+  time: TimeKeeping,
+  nowS: number,
+  choice: CivilChoice,
+): number | TimeRefusal {
+  const instant = instantOf(stamp, time.clock, choice);
   if (typeof instant !== 'number') return instant;
   if (instant >= EARLIEST_S && instant <= nowS + AHEAD_S)
     return endOfInterval(instant, time.stamp, time.intervalS);

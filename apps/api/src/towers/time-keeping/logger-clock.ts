@@ -5,6 +5,21 @@ import type { TimeRefusal } from './time-refusal';
 /** What a logger's clock shows: a fixed offset from UTC (0 is UTC itself), or civil time of a zone with its seasons. */
 export type LoggerClock = { readonly offsetS: number } | { readonly zone: string };
 
+/** What is meant by a civil time that happens twice: its first passing, its second, or as the order of the rows tells. */
+export const repeatedHours = ['refuse', 'first', 'second', 'in-order'] as const;
+/** One of the meanings of a civil time that happens twice. */
+export type RepeatedHour = (typeof repeatedHours)[number];
+/** What is meant by a civil time that does not exist: refused, or the clock was put forward later, by hand. */
+export const missingHours = ['refuse', 'later'] as const;
+/** One of the meanings of a civil time that does not exist. */
+export type MissingHour = (typeof missingHours)[number];
+
+/** What is meant by the civil times around a change of the clocks. */
+export interface CivilChoice {
+  readonly repeated?: 'first' | 'second';
+  readonly missing?: 'later';
+}
+
 const DAY_S = 86_400;
 /** Offsets of the days around a shown time, per zone: a file's rows share days, and asking for an offset is slow. */
 const daysOfZone = new Map<string, Map<number, readonly [number, number]>>();
@@ -48,11 +63,19 @@ const offsetsAround = (zone: string, shownS: number): readonly [number, number] 
   return around;
 };
 
-const fromCivil = (shownS: number, zone: string): number | TimeRefusal => {
+/** Whether a shown civil time happens twice in a zone. */
+export function happensTwice(shownS: number, zone: string): boolean {
+  const [before, after] = offsetsAround(zone, shownS);
+  return before !== after && [before, after].every((o) => offsetAt(zone, shownS - o) === o);
+}
+
+const fromCivil = (shownS: number, zone: string, choice: CivilChoice): number | TimeRefusal => {
   const [before, after] = offsetsAround(zone, shownS);
   if (before === after) return shownS - before;
   const instants = [before, after].map((o) => shownS - o).filter((t) => offsetAt(zone, t) === shownS - t);
   if (instants.length === 1) return instants[0]!;
+  if (instants.length === 2 && choice.repeated) return instants[choice.repeated === 'first' ? 0 : 1]!;
+  if (instants.length === 0 && choice.missing) return shownS - before;
   const wall = new Date(shownS * 1000).toISOString().slice(0, 16).replace('T', ' ');
   const cure =
     'write the offset in the stamp (such as -07:00), or let the logger keep UTC or standard time all year';
@@ -69,9 +92,10 @@ const fromCivil = (shownS: number, zone: string): number | TimeRefusal => {
 
 /**
  * The instant of a stamp, UTC epoch seconds. An offset written in the stamp wins over the clock. In civil time the
- * hour that happens twice and the hour that does not exist are refused: which one was meant is never guessed.
+ * hour that happens twice and the hour that does not exist are refused unless it is said what is meant: which one was
+ * meant is never guessed.
  */
-export function instantOf(stamp: Stamp, clock: LoggerClock): number | TimeRefusal {
+export function instantOf(stamp: Stamp, clock: LoggerClock, choice: CivilChoice = {}): number | TimeRefusal {
   if (stamp.offsetS !== undefined) return stamp.shownS - stamp.offsetS;
-  return 'zone' in clock ? fromCivil(stamp.shownS, clock.zone) : stamp.shownS - clock.offsetS;
+  return 'zone' in clock ? fromCivil(stamp.shownS, clock.zone, choice) : stamp.shownS - clock.offsetS;
 }
