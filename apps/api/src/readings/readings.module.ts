@@ -3,6 +3,9 @@ import { SchedulerModule } from '../scheduler/scheduler.module';
 import { TowersModule } from '../towers/towers.module';
 import { FilePositions } from './collector/file-positions';
 import { ReadingsCollector } from './collector/readings-collector';
+import { ImportRunner } from './importing/import-runner';
+import { ImportStore } from './importing/import-store';
+import { ReadingTaker } from './importing/reading-taker';
 import { ImportsController } from './imports.controller';
 import { ImportsService } from './imports.service';
 import { IngestController } from './ingest.controller';
@@ -17,6 +20,9 @@ import { ReadingsStore } from './readings-store';
   controllers: [IngestController, ImportsController],
   providers: [
     ReadingsStore,
+    ImportStore,
+    ReadingTaker,
+    ImportRunner,
     ReadingsService,
     ReadingContexts,
     PushService,
@@ -24,6 +30,6 @@ import { ReadingsStore } from './readings-store';
     FilePositions,
     ReadingsCollector,
   ],
-  exports: [ReadingsService, ReadingsCollector],
+  exports: [ImportRunner, ReadingsService, ReadingsCollector],
 })
 export class ReadingsModule {}

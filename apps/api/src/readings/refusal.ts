@@ -8,6 +8,8 @@ export const refusalCodes = [
   'cells-do-not-match-header',
   'quotes-do-not-match',
   'line-too-long',
+  'line-not-text',
+  'further-rows-not-kept',
   'sensor-not-known',
   'not-a-reading',
 ] as const;

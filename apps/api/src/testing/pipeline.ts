@@ -16,6 +16,8 @@ import { ReadingWindows } from '../screening/reading-windows';
 import { ScreeningStage } from '../screening/screening.stage';
 import { ScreeningStore } from '../screening/screening-store';
 import { TowerLayouts } from '../towers/tower-layouts';
+import { ImportStore } from '../readings/importing/import-store';
+import { ReadingTaker } from '../readings/importing/reading-taker';
 import { ReadingsService } from '../readings/readings.service';
 import { ReadingsStore } from '../readings/readings-store';
 
@@ -40,7 +42,8 @@ export interface TestTower {
 }
 
 const pieces = [
-  ...[TowerLayouts, ReadingsStore, ReadingsService, ReadingWindows, ScreeningStore, ScreeningStage],
+  ...[TowerLayouts, ReadingsStore, ImportStore, ReadingTaker, ReadingsService],
+  ...[ReadingWindows, ScreeningStore, ScreeningStage],
   ...[ProfileStore, Hours, ProfilesStage],
 ];
 
