@@ -1,4 +1,4 @@
-import { checkBits, checkNames, qualityName } from '@lidwatch/contracts';
+import { checkBits, checkNames, qualityCodes, qualityName } from '@lidwatch/contracts';
 import { Injectable } from '@nestjs/common';
 import { toIso } from '../common/instants';
 import { offsetOf } from '../common/paging';
@@ -36,7 +36,8 @@ const SPANS = `WITH flagged AS (
   numbered AS (SELECT *, sum(begins) OVER (PARTITION BY sensor_id, bit, held ORDER BY t_end) span FROM begun),
   spans AS (SELECT sensor_id, bit, held, min(t_end) t0, max(t_end) t1, count(*) readings, max(quality) quality,
       count(*) OVER () total
-    FROM numbered GROUP BY sensor_id, bit, held, span ORDER BY t1 DESC, t0 DESC, sensor_id, bit LIMIT $limit OFFSET $offset)
+    FROM numbered GROUP BY sensor_id, bit, held, span
+    HAVING $worst IS NULL OR max(quality) = $worst ORDER BY t1 DESC, t0 DESC, sensor_id, bit LIMIT $limit OFFSET $offset)
   SELECT sensor_id sensorId, bit, t0, t1, readings, quality, total,
     CASE WHEN held THEN (SELECT u.name FROM override o JOIN user u ON u.id = o.by_user
       WHERE o.sensor_id = spans.sensor_id AND o.undone_at IS NULL AND o.t0 <= spans.t0 AND o.t1 >= spans.t0
@@ -63,6 +64,7 @@ export class FlagsService {
     const rows = await this.sql.all<SpanRow>(SPANS, {
       ...{ t0, t1, gap: TOGETHER_INTERVALS * tower.intervalS, limit: pageSize, offset: offsetOf(query) },
       sensors: JSON.stringify(sensors.map(({ id }) => id)),
+      worst: query.quality ? qualityCodes[query.quality] : null,
       bits: JSON.stringify(check ? [checkBits[check]] : CHECKS),
     });
     const items = rows.map((row) => {

@@ -139,6 +139,10 @@ describe('what screening saw', () => {
       expect((await flags({ check: 'spike', sensorId: tower.sensorIds[0] })).items).toMatchObject([
         { readings: 1, says: 'A single reading more than 5 °C from those before and after it' },
       ]);
+      expect((await flags({ quality: 'failed' })).items.map(({ check }) => check)).toEqual([
+        'spike',
+        'stuck',
+      ]);
       const all = await flags({ pageSize: 1 });
       expect(all.items).toHaveLength(1);
       expect(all.total).toBeGreaterThan(1);

@@ -13,6 +13,7 @@ export const paths = {
   officer: '/officer',
   proposal: (id: number | ':id' = ':id') => `/proposals/${id}`,
   history: '/history',
+  towerReadings: (id: number | ':id' = ':id') => `/readings/towers/${id}`,
   notices: '/notices',
   notice: (id: number | ':id' = ':id') => `/notices/${id}`,
   rules: '/rules',

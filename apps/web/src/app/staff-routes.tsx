@@ -31,6 +31,12 @@ export const staffRoutes: RouteObject[] = [
         lazy: async () => ({ Component: (await import('../pages/history-page')).HistoryPage }),
       },
       {
+        path: paths.towerReadings(),
+        lazy: async () => ({
+          Component: (await import('../pages/tower-readings-page')).TowerReadingsPage,
+        }),
+      },
+      {
         path: paths.notices,
         lazy: async () => ({ Component: (await import('../pages/notices-page')).NoticesPage }),
       },

@@ -26,6 +26,14 @@ export class FlagsQuery extends PageQuery {
   @IsOptional()
   @IsIn(checks, { message: `check must be one of ${checks.join(', ')}` })
   check?: Check;
+
+  @ApiPropertyOptional({
+    enum: ['suspect', 'failed'],
+    description: 'The worst of the span; any when left out',
+  })
+  @IsOptional()
+  @IsIn(['suspect', 'failed'], { message: 'quality must be suspect or failed' })
+  quality?: 'suspect' | 'failed';
 }
 
 /** Which readings are wanted: those whose interval ends in (from, to]. */

@@ -3218,6 +3218,8 @@ export interface operations {
           | 'override'
           | 'stuck'
           | 'clock';
+        /** @description The worst of the span; any when left out */
+        quality?: 'suspect' | 'failed';
       };
       header?: never;
       path: {

@@ -1,0 +1,80 @@
+import { Stack } from '@chakra-ui/react';
+import { useState } from 'react';
+import type { Me } from '../../../lib/api/types';
+import { useNow } from '../../../lib/clock';
+import { useRefresh } from '../api';
+import { dayIn } from '../days';
+import { NOTHING, selectedEnds, selectionOf, type Selection } from '../selection';
+import type { FlaggedSpan, Said, Tower } from '../types';
+import { SPANS, useReadingsChoice } from '../use-readings-choice';
+import { CalendarCard } from './calendar-card';
+import { CorrectionsCard } from './corrections-card';
+import { FlagsCard } from './flags-card';
+import { RawCard } from './raw-card';
+import { ReadingsBar } from './readings-bar';
+import { ReworksCard } from './reworks-card';
+import { SetSpanDialog } from './set-span-dialog';
+import { SetSpansCard } from './set-spans-card';
+
+const DAY_MS = 86_400_000;
+
+interface TowerReadingsViewProps {
+  towers: readonly Tower[];
+  tower: Tower;
+  zone: string;
+  me: Pick<Me, 'role'>;
+}
+
+/** A tower's readings: how complete they are, what checks found, what people say of them, and what that changed. */
+export function TowerReadingsView({ towers, tower, zone, me }: TowerReadingsViewProps) {
+  const choice = useReadingsChoice(zone, useNow());
+  const [selection, setSelection] = useState<Selection>(NOTHING);
+  const [said, setSaid] = useState<Said>();
+  const refresh = useRefresh(tower.id);
+  const ends = selectedEnds(selection, zone);
+  const sensor = tower.sensors.find(({ id }) => id === selection.sensorId);
+  const show = (span: FlaggedSpan) => {
+    const own = tower.sensors.find(({ id }) => id === span.sensorId);
+    const days = (Date.parse(span.to) - Date.parse(span.from)) / DAY_MS;
+    setSelection(selectionOf(span.sensorId, span, zone));
+    choice.change({
+      day: dayIn(Date.parse(span.to) - 1, zone),
+      days: SPANS.find((each) => each.days > days)?.days ?? 31,
+      ...(own && { quantity: own.quantity }),
+    });
+    document.getElementById('readings')?.scrollIntoView({ block: 'start' });
+  };
+  return (
+    <Stack gap="4">
+      <ReadingsBar towers={towers} towerId={tower.id} choice={choice} />
+      <CalendarCard towerId={tower.id} choice={choice} />
+      <div id="readings">
+        <RawCard
+          {...{ tower, zone, choice, selection }}
+          onSelect={setSelection}
+          onSay={me.role === 'analyst' ? setSaid : undefined}
+        />
+      </div>
+      <FlagsCard towerId={tower.id} sensors={tower.sensors} zone={zone} choice={choice} onShow={show} />
+      <ReworksCard towerId={tower.id} zone={zone} onEnded={refresh} />
+      <SetSpansCard towerId={tower.id} zone={zone} mayUndo={me.role === 'analyst'} onUndone={refresh} />
+      <CorrectionsCard
+        sensors={tower.sensors}
+        zone={zone}
+        mayCorrect={me.role !== 'officer'}
+        onCorrected={refresh}
+      />
+      {said && ends && sensor && (
+        <SetSpanDialog
+          span={{ ...ends, said, sensorId: sensor.id, sensorName: sensor.name }}
+          zone={zone}
+          onClose={() => setSaid(undefined)}
+          onSet={() => {
+            setSelection(NOTHING);
+            refresh();
+          }}
+        />
+      )}
+    </Stack>
+  );
+}
