@@ -2,7 +2,13 @@ import { quoted } from '../../common/quoted';
 import type { TimeRefusal } from './time-refusal';
 
 /** How a source writes its time stamps. `iso` also takes a slash-separated date whose year stands first. */
-export const stampForms = ['iso', 'day/month/year', 'month/day/year', 'epoch-seconds'] as const;
+export const stampForms = [
+  'iso',
+  'day/month/year',
+  'month/day/year',
+  'epoch-seconds',
+  'epoch-milliseconds',
+] as const;
 /** One of the ways to write a time stamp. */
 export type StampForm = (typeof stampForms)[number];
 
@@ -21,12 +27,14 @@ const COMPACT =
 const THREE_PARTS =
   /^(\d{1,2})[-/.](\d{1,2})[-/.](\d{4})[T ,]\s*(\d{1,2}):(\d{2})(?::(\d{2})(?:[.,](\d+))?)?\s*(AM|PM)?$/i;
 const EPOCH = /^\d{9,10}(?:\.\d+)?$/;
+const EPOCH_MS = /^\d{12,13}$/;
 
 const cure: Record<StampForm, string> = {
   iso: 'write it as 2026-01-31 05:10:00, with Z or an offset such as -07:00 if the logger knows it',
   'day/month/year': 'write it as 31/01/2026 05:10:00, as this source declares',
   'month/day/year': 'write it as 01/31/2026 05:10:00, as this source declares',
   'epoch-seconds': 'write whole seconds since 1970, as this source declares',
+  'epoch-milliseconds': 'write whole milliseconds since 1970, as this source declares',
 };
 
 const unreadable = (text: string, form: StampForm): TimeRefusal => ({
@@ -87,6 +95,11 @@ export function readStamp(text: string, form: StampForm = 'iso'): Stamp | TimeRe
   const trimmed = text.trim();
   if (form === 'epoch-seconds') {
     return EPOCH.test(trimmed) ? { shownS: Math.round(Number(trimmed)), offsetS: 0 } : unreadable(text, form);
+  }
+  if (form === 'epoch-milliseconds') {
+    return EPOCH_MS.test(trimmed)
+      ? { shownS: Math.round(Number(trimmed) / 1000), offsetS: 0 }
+      : unreadable(text, form);
   }
   const iso = form === 'iso' ? (ISO.exec(trimmed) ?? COMPACT.exec(trimmed)) : null;
   const other = form === 'iso' ? null : THREE_PARTS.exec(trimmed);

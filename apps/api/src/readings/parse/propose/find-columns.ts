@@ -1,0 +1,137 @@
+import type { SensorQuantity } from '../../../towers/quantities';
+import { suits, type ForeignUnit } from '../../../towers/units';
+import { readNumber } from '../number-cell';
+import type { FoundHeader } from './find-header';
+import { guessSensor, quantityIn, unitIn, type KnownSensor } from './guess-sensor';
+
+/** One column of a table: what it is called, how it looks, and what it seems to be. */
+export interface FoundColumn {
+  readonly index: number;
+  readonly name: string;
+  readonly samples: readonly string[];
+  readonly sensor: string | null;
+  readonly unit: ForeignUnit | null;
+  /** Something to look at, as a sentence. */
+  readonly note: string | null;
+  /** Whether the values do not tell °C from °F. */
+  readonly unitOpen: boolean;
+}
+
+const SAMPLES = 5;
+/** Above this the warm end of a month of air temperature in °C is doubtful, below it of one in °F. */
+const DOUBTFUL_C = 42;
+const SURELY_K = 180;
+const NEVER_C = 60;
+
+const quantile = (sorted: readonly number[], q: number): number =>
+  sorted[Math.min(sorted.length - 1, Math.floor(q * sorted.length))] ?? NaN;
+
+interface Spread {
+  readonly low: number;
+  readonly middle: number;
+  readonly high: number;
+}
+
+const spreadOf = (cells: readonly string[], decimal: '.' | ',', marks: ReadonlySet<string>): Spread => {
+  const values = cells
+    .filter((cell) => cell !== '' && !marks.has(cell))
+    .map((cell) => readNumber(cell, decimal))
+    .filter((value): value is number => typeof value === 'number')
+    .sort((a, b) => a - b);
+  return { low: quantile(values, 0.02), middle: quantile(values, 0.5), high: quantile(values, 0.98) };
+};
+
+const temperatures: readonly SensorQuantity[] = ['air temperature', 'dew point', 'wet bulb'];
+
+/** The unit that the size of the values tells, where it can be no other. */
+const unitBySize = (quantity: SensorQuantity, { middle, high, low }: Spread): ForeignUnit | null => {
+  if (temperatures.includes(quantity)) return low > SURELY_K ? 'K' : null;
+  if (quantity === 'relative humidity') return high <= 1.1 && high > 0 ? '0–1' : null;
+  if (quantity !== 'station pressure') return null;
+  if (middle > 20_000) return 'Pa';
+  if (middle > 15 && middle < 35) return 'inHg';
+  return middle >= 40 && middle < 115 ? 'kPa' : null;
+};
+
+/** Looks at each column but those of the time. */
+export function findColumns(
+  header: FoundHeader,
+  used: readonly number[],
+  sensors: readonly KnownSensor[],
+  decimal: '.' | ',',
+  marks: ReadonlySet<string>,
+): FoundColumn[] {
+  const taken = new Set<string>();
+  return header.names.flatMap((name, index): FoundColumn[] => {
+    if (used.includes(index)) return [];
+    const cells = header.data.map((row) => row.cells[index] ?? '');
+    const samples = [...new Set(cells.filter((cell) => cell !== ''))].slice(0, SAMPLES);
+    const guess = guessSensor(name, sensors);
+    const isTaken = guess !== undefined && taken.has(guess.name);
+    if (guess) taken.add(guess.name);
+    const sensor = guess && !isTaken ? guess.name : null;
+    const quantity = guess?.quantity ?? quantityIn(name);
+    const said = [name, ...header.between.map((row) => row.cells[index] ?? '')].map(unitIn).find(Boolean);
+    const spread = spreadOf(cells, decimal, marks);
+    const bySize = quantity ? unitBySize(quantity, spread) : null;
+    const unit = said !== undefined && quantity !== undefined && suits(said, quantity) ? said : bySize;
+    const isTemperature = quantity !== undefined && temperatures.includes(quantity);
+    const isOdd = isTemperature && unit === null && spread.high > DOUBTFUL_C;
+    const base = { index, name, samples, sensor, unit };
+    if (isTaken) {
+      return [{ ...base, note: `Another column is proposed for "${guess.name}" already.`, unitOpen: false }];
+    }
+    if (isOdd && spread.high > NEVER_C) {
+      const note = `Values up to ${Math.round(spread.high)}: no air is that warm in °C. °F is likely; please say.`;
+      return [{ ...base, note, unitOpen: true }];
+    }
+    const note = isOdd ? `Values up to ${Math.round(spread.high)}: look whether this is °F.` : null;
+    return [{ ...base, note, unitOpen: isOdd }];
+  });
+}
+
+/** The columns of a long table: which names the sensor, which holds the value. */
+export interface LongColumns {
+  readonly sensorColumn: string;
+  readonly valueColumn: string;
+  /** The sensors as the file writes them. */
+  readonly written: readonly string[];
+}
+
+const FEW = 60;
+const MOSTLY = 0.9;
+
+/** Whether a table is long: few names in one column, numbers in just one other, the time coming again and again. */
+export function findLong(
+  header: FoundHeader,
+  used: readonly number[],
+  decimal: '.' | ',',
+): LongColumns | undefined {
+  const places = header.names.map((_, place) => place).filter((place) => !used.includes(place));
+  const cellsAt = (place: number): string[] =>
+    header.data.map((row) => row.cells[place] ?? '').filter(Boolean);
+  const isNumeric = (place: number): boolean => {
+    const cells = cellsAt(place);
+    return (
+      cells.filter((cell) => typeof readNumber(cell, decimal) === 'number').length >= MOSTLY * cells.length
+    );
+  };
+  const numeric = places.filter((place) => cellsAt(place).length > 0 && isNumeric(place));
+  const named = places.filter((place) => {
+    const distinct = new Set(cellsAt(place));
+    return !numeric.includes(place) && distinct.size >= 2 && distinct.size <= FEW;
+  });
+  const times = header.data.map((row) => used.map((place) => row.cells[place]).join(' '));
+  const comeAgain = new Set(times).size <= times.length / 2 + 1;
+  const value =
+    numeric.length === 1
+      ? numeric[0]
+      : numeric.find((place) => /value|wert|valor/i.test(header.names[place]!));
+  const sensor = named.find((place) => /sensor|channel|name|param/i.test(header.names[place]!)) ?? named[0];
+  if (value === undefined || sensor === undefined || !comeAgain) return undefined;
+  return {
+    sensorColumn: header.names[sensor]!,
+    valueColumn: header.names[value]!,
+    written: [...new Set(cellsAt(sensor))],
+  };
+}
