@@ -1,11 +1,15 @@
 import { Module } from '@nestjs/common';
 import { SchedulerModule } from '../scheduler/scheduler.module';
 import { TowersModule } from '../towers/towers.module';
-import { FilePositions } from './collector/file-positions';
+import { CollectController } from './collector/collect.controller';
+import { FileTaker } from './collector/file-taker';
+import { FolderSources } from './collector/folder-sources';
 import { ReadingsCollector } from './collector/readings-collector';
 import { ImportRunner } from './importing/import-runner';
 import { ImportStore } from './importing/import-store';
 import { ReadingTaker } from './importing/reading-taker';
+import { FetchLimits } from './fetching/fetch-limits';
+import { HttpSources } from './fetching/http-sources';
 import { ImportsController } from './imports.controller';
 import { ImportsService } from './imports.service';
 import { IngestController } from './ingest.controller';
@@ -17,7 +21,7 @@ import { ReadingsStore } from './readings-store';
 /** Every way in for readings. */
 @Module({
   imports: [TowersModule, SchedulerModule],
-  controllers: [IngestController, ImportsController],
+  controllers: [CollectController, IngestController, ImportsController],
   providers: [
     ReadingsStore,
     ImportStore,
@@ -27,7 +31,10 @@ import { ReadingsStore } from './readings-store';
     ReadingContexts,
     PushService,
     ImportsService,
-    FilePositions,
+    FetchLimits,
+    FileTaker,
+    FolderSources,
+    HttpSources,
     ReadingsCollector,
   ],
   exports: [ImportRunner, ReadingsService, ReadingsCollector],

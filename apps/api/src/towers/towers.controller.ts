@@ -3,21 +3,18 @@ import { ApiCreatedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { CurrentUser, Roles } from '../auth/decorators';
 import type { SignedIn } from '../auth/signed-in';
 import { SensorInput, SensorPatch } from './dto/sensor-input.dto';
-import { SourceDto, SourceInput } from './dto/source.dto';
 import { SensorDto, TowerDto } from './dto/tower.dto';
 import { TowerInput, TowerPatch } from './dto/tower-input.dto';
 import { SensorsService } from './sensors.service';
-import { SourcesService } from './sources.service';
 import { TowersService } from './towers.service';
 
-/** Towers, their sensors and their sources, for staff. */
+/** Towers and their sensors, for staff. */
 @ApiTags('towers')
 @Controller()
 export class TowersController {
   constructor(
     private readonly towers: TowersService,
     private readonly sensors: SensorsService,
-    private readonly sources: SourcesService,
   ) {}
 
   /** Lists every tower with its sensors. */
@@ -78,25 +75,5 @@ export class TowersController {
     @CurrentUser() by: SignedIn,
   ): Promise<SensorDto> {
     return this.sensors.change(id, patch, by);
-  }
-
-  /** Lists a tower's sources with what their last collection gave. */
-  @Get('towers/:id/sources')
-  @Roles('administrator', 'analyst')
-  @ApiOkResponse({ type: [SourceDto] })
-  listSources(@Param('id', ParseIntPipe) id: number): Promise<SourceDto[]> {
-    return this.sources.list(id);
-  }
-
-  /** Adds a source. */
-  @Post('towers/:id/sources')
-  @Roles('administrator', 'analyst')
-  @ApiCreatedResponse({ type: SourceDto })
-  addSource(
-    @Param('id', ParseIntPipe) id: number,
-    @Body() input: SourceInput,
-    @CurrentUser() by: SignedIn,
-  ): Promise<SourceDto> {
-    return this.sources.add(id, input, by);
   }
 }

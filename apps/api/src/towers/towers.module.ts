@@ -8,6 +8,9 @@ import { Sensor } from './models/sensor.model';
 import { Source } from './models/source.model';
 import { Tower } from './models/tower.model';
 import { SensorsService } from './sensors.service';
+import { SourcePositions } from './source-positions';
+import { SourceTurns } from './source-turns';
+import { SourcesController } from './sources.controller';
 import { SourcesService } from './sources.service';
 import { TowerLayouts } from './tower-layouts';
 import { TowersController } from './towers.controller';
@@ -16,8 +19,24 @@ import { TowersService } from './towers.service';
 /** Towers, their sensors, sources and keys. */
 @Module({
   imports: [SequelizeModule.forFeature([Tower, Sensor, SensorVersion, IngestKey, Source])],
-  controllers: [TowersController, KeysController],
-  providers: [TowersService, SensorsService, KeysService, SourcesService, TowerLayouts],
-  exports: [TowersService, SensorsService, KeysService, SourcesService, TowerLayouts],
+  controllers: [TowersController, KeysController, SourcesController],
+  providers: [
+    TowersService,
+    SensorsService,
+    KeysService,
+    SourcesService,
+    SourcePositions,
+    SourceTurns,
+    TowerLayouts,
+  ],
+  exports: [
+    TowersService,
+    SensorsService,
+    KeysService,
+    SourcesService,
+    SourcePositions,
+    SourceTurns,
+    TowerLayouts,
+  ],
 })
 export class TowersModule {}

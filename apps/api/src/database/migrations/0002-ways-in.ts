@@ -36,7 +36,8 @@ export const up: readonly string[] = [
      path TEXT, url TEXT, auth TEXT NOT NULL DEFAULT 'none' CHECK (auth IN ('none','basic','bearer')), secret TEXT,
      etag TEXT, last_modified TEXT, body_sha256 TEXT,
      mapping TEXT NOT NULL, interval_s INTEGER NOT NULL DEFAULT 60, last_at INTEGER, last_ok_at INTEGER, last_result TEXT,
-     failures INTEGER NOT NULL DEFAULT 0, failing_since INTEGER, next_at INTEGER, retired_at INTEGER) STRICT`,
+     failures INTEGER NOT NULL DEFAULT 0, failing_since INTEGER, next_at INTEGER, version INTEGER NOT NULL DEFAULT 1,
+     retired_at INTEGER) STRICT`,
   `INSERT INTO source (id, tower_id, kind, path, mapping, interval_s, last_at, last_result, failures, next_at, retired_at)
      SELECT id, tower_id, kind, path, mapping, interval_s, last_at, last_result, failures, next_at, retired_at FROM source_before`,
   `CREATE TABLE source_file (

@@ -1,37 +1,39 @@
 import { createHash } from 'node:crypto';
 import { open, type FileHandle } from 'node:fs/promises';
-
-/** How far a file has been read, and by what it is known again. */
-export interface FilePosition {
-  readonly inode: number;
-  /** Bytes read, up to the end of a line. */
-  readonly position: number;
-  /** Lines read. */
-  readonly rowNo: number;
-  /** The header line, without which later lines mean nothing. */
-  readonly header: string;
-  /** Of the first bytes that were read: a file that was replaced under its name begins otherwise. */
-  readonly headSha256: string;
-}
+import type { FilePosition } from '../../towers/source-positions';
+import { NotTextError } from '../parse/decode-text';
+import { HeaderError } from '../parse/parsed-readings';
 
 /** New whole lines of a file. */
 export interface NewLines {
-  /** Header line and new lines. */
-  readonly bytes: Buffer;
-  /** The row number the header line counts as, so that the new lines have theirs. */
-  readonly headerRowNo: number;
+  /** The lines up to and with the header, where the new lines come after it; empty where they hold it themselves. */
+  readonly header: string;
+  readonly lines: Buffer;
+  /** Row of the file that the first new line is. */
+  readonly firstRowNo: number;
   /** How far the file is read with them. */
   readonly after: FilePosition;
-  /** Whether the file was read from its beginning although it was known: cut off, or another one. */
-  readonly anew: boolean;
   /** Whether an unfinished line waits at the end. */
   readonly unfinished: boolean;
   /** Whether there is more to read. */
   readonly more: boolean;
 }
 
-const HEAD_BYTES = 256;
-const NEWLINE = 0x0a;
+/** How a file is read on. */
+export interface ReadingOn {
+  /** Rows up to and with the header; 0 where there is none. Left out: up to the first line that is not empty. */
+  readonly headerRow?: number | undefined;
+  /** What the file is known by; its inode where left out. */
+  readonly inode?: number;
+  /** Known again by all that was read of it, not by its first and last bytes alone: a change in the middle is seen. */
+  readonly whole?: boolean;
+  /** Whether a last line without its end is a line, too. */
+  readonly takeUnfinished?: boolean;
+}
+
+/** Known again by so many bytes at the beginning and at the end of what was read. */
+const KNOWN_BY_BYTES = 4096;
+const [NEWLINE, RETURN] = [0x0a, 0x0d];
 /** Read at a time, bytes. */
 const SLICE = 1_000_000;
 const LONGEST_LINE = 8_000_000;
@@ -41,16 +43,28 @@ const bytesOf = async (file: FileHandle, from: number, length: number): Promise<
   return buffer.subarray(0, bytesRead);
 };
 
-const headOf = async (file: FileHandle, position: number): Promise<string> => {
-  const head = await bytesOf(file, 0, Math.min(HEAD_BYTES, position));
-  return createHash('sha256').update(head).digest('hex');
+/** Of what was read up to a position: all of it, or its beginning and its end. */
+const hashUpTo = async (file: FileHandle, position: number, whole: boolean): Promise<string> => {
+  const hash = createHash('sha256');
+  if (whole) {
+    for (let at = 0; at < position; at += SLICE)
+      hash.update(await bytesOf(file, at, Math.min(SLICE, position - at)));
+  } else {
+    const length = Math.min(KNOWN_BY_BYTES, position);
+    hash.update(await bytesOf(file, 0, length)).update(await bytesOf(file, position - length, length));
+  }
+  return hash.digest('hex');
 };
 
 /** The slice from a position; longer where no line ends in it, so that a long line is not stuck for ever. */
 const sliceOf = async (file: FileHandle, from: number): Promise<Buffer> => {
   for (let length = SLICE; ; length *= 2) {
     const slice = await bytesOf(file, from, length);
-    if (slice.length < length || slice.includes(NEWLINE) || length > LONGEST_LINE) return slice;
+    if (slice.length < length || slice.includes(NEWLINE)) return slice;
+    if (length > LONGEST_LINE)
+      throw new NotTextError(
+        'A line is longer than 8 MB. Look whether this is a file of readings, and at its line ends.',
+      );
   }
 };
 
@@ -60,36 +74,64 @@ const countLines = (bytes: Buffer): number => {
   return lines;
 };
 
-const isSame = async (file: FileHandle, inode: number, size: number, known: FilePosition): Promise<boolean> =>
-  known.inode === inode &&
-  known.position <= size &&
-  known.headSha256 === (await headOf(file, known.position));
+/** Where the header ends in the first lines of a file; throws a `HeaderError` where they do not reach that far. */
+function headerEnd(lines: Buffer, headerRow: number | undefined): number {
+  if (headerRow === 0) return 0;
+  let row = 1;
+  for (let at = 0; at < lines.length; row += 1) {
+    const end = lines.indexOf(NEWLINE, at) + 1 || lines.length;
+    if (row === headerRow) return end;
+    if (headerRow === undefined && lines.subarray(at, end).toString('latin1').trim() !== '') return end;
+    at = end;
+  }
+  if (headerRow === undefined) return 0;
+  throw new HeaderError(
+    `It ends after ${row - 1} lines; its header is looked for in row ${headerRow}. Correct that row.`,
+  );
+}
+
+/** Whether what was read of a file still stands in it, and ends with a whole line. */
+async function goesOn(
+  file: FileHandle,
+  { inode, size }: { inode: number; size: number },
+  known: FilePosition,
+  whole: boolean,
+): Promise<boolean> {
+  if (known.inode !== inode || known.position > size) return false;
+  if (known.headSha256 !== (await hashUpTo(file, known.position, whole))) return false;
+  const [before, next] = await bytesOf(file, Math.max(0, known.position - 1), 2);
+  return before === NEWLINE || next === undefined || next === NEWLINE || next === RETURN;
+}
 
 /**
- * The new whole lines of a file since it was last read. What follows the last line end is left for the next time. A
- * file that is shorter than what was read, or begins otherwise, is read from its beginning.
+ * The new whole lines of a file since it was last read, perhaps none. What follows the last line end is left for the
+ * next time. A file that is shorter than what was read, or reads otherwise, is read from its beginning.
  */
-export async function newLines(path: string, known: FilePosition | undefined): Promise<NewLines | undefined> {
+export async function newLines(
+  path: string,
+  known: FilePosition | undefined,
+  on: ReadingOn = {},
+): Promise<NewLines> {
+  const { whole = false, takeUnfinished = false } = on;
   const file = await open(path, 'r');
   try {
-    const { ino: inode, size } = await file.stat();
-    const goesOn = known !== undefined && (await isSame(file, inode, size, known));
-    const from = goesOn ? known.position : 0;
+    const { ino, size } = await file.stat();
+    const inode = on.inode ?? ino;
+    const before = known && (await goesOn(file, { inode, size }, known, whole)) ? known : undefined;
+    const { position: from, rowNo } = before ?? { position: 0, rowNo: 0 };
     const slice = await sliceOf(file, from);
-    const end = slice.lastIndexOf(NEWLINE) + 1;
-    if (end === 0) return undefined;
+    const isLast = from + slice.length >= size;
+    const end = takeUnfinished && isLast ? slice.length : slice.lastIndexOf(NEWLINE) + 1;
     const lines = slice.subarray(0, end);
-    const header = goesOn ? Buffer.from(known.header) : lines.subarray(0, lines.indexOf(NEWLINE) + 1);
     const position = from + end;
-    const rowNo = (goesOn ? known.rowNo : 0) + countLines(lines);
-    const headSha256 = await headOf(file, position);
+    const header =
+      before?.header ?? (end > 0 ? lines.toString('utf8', 0, headerEnd(lines, on.headerRow)) : '');
+    const headSha256 = await hashUpTo(file, position, whole);
     return {
-      bytes: goesOn ? Buffer.concat([header, lines]) : lines,
-      headerRowNo: goesOn ? known.rowNo : 1,
-      after: { inode, position, rowNo, header: header.toString('utf8'), headSha256 },
-      anew: known !== undefined && !goesOn,
-      unfinished: position < size && slice.length < SLICE,
-      more: slice.length >= SLICE,
+      ...{ header: before ? header : '', lines, firstRowNo: rowNo + 1 },
+      after: { inode, position, rowNo: rowNo + countLines(lines), header, headSha256 },
+      unfinished: isLast && position < size,
+      more: !isLast,
     };
   } finally {
     await file.close();

@@ -44,6 +44,8 @@ describe("the collector of loggers' files", () => {
       'SELECT value FROM reading r JOIN sensor s ON s.id = r.sensor_id WHERE tower_id = $1 ORDER BY value',
       [towerId],
     );
+  const waitS = ({ nextAt, lastAt }: { nextAt: string | null; lastAt: string | null }): number =>
+    (Date.parse(nextAt!) - Date.parse(lastAt!)) / 1000;
   const source = async () => (await test.app.get(SourcesService).list(towerId))[0]!;
 
   it('reads on where it was, leaves half lines, and takes nothing twice', async () => {
@@ -51,7 +53,7 @@ describe("the collector of loggers' files", () => {
     writeFileSync(file, `${HEADER}${line(60, -9.5, -7.7)}\n${line(50, -9.6, 'NaN')}\n${line(40, -9.7)}`);
     await collect();
     expect(await readings()).toEqual([{ value: -9.6 }, { value: -9.5 }, { value: -7.7 }]);
-    expect((await source()).lastResult).toBe('3 readings read, 0 rows refused, 1 unfinished line waits.');
+    expect((await source()).lastResult).toBe('3 new readings, 1 unfinished line waits.');
     appendFileSync(file, ',-7.9\n');
     await collect();
     await collect();
@@ -82,23 +84,34 @@ describe("the collector of loggers' files", () => {
     expect(refused).toEqual([{ row_no: 3, col: 'temperature_2m', code: 'value-not-a-number' }]);
   });
 
-  it('says why a source fails, and waits longer each time', async () => {
+  it('looks for a folder that is not there yet every minute, and says so', async () => {
     rmSync(folder, { recursive: true });
-    await collect();
-    const first = await source();
-    expect(first.lastResult).toMatch(/is not there\. Look whether the logger's folder is connected/);
-    expect(first.failures).toBe(1);
-    const wait = ({ nextAt, lastAt }: { nextAt: string | null; lastAt: string | null }): number =>
-      (Date.parse(nextAt!) - Date.parse(lastAt!)) / 1000;
-    expect(wait(first)).toBe(120);
-    test.clock.advance(120);
-    await collect();
-    expect(wait(await source())).toBe(240);
+    for (let minutes = 1; minutes <= 3; minutes += 1) {
+      await collect();
+      const now = await source();
+      expect(now.lastResult).toMatch(/is not there\. Look whether the logger's folder is connected/);
+      expect([now.failures, waitS(now)]).toEqual([minutes, 60]);
+    }
     mkdirSync(folder);
-    writeFileSync(path.join(folder, 'mast.csv'), `${HEADER}${line(60, -9.5, -7.7)}\n`);
-    test.clock.advance(240);
     await collect();
-    expect(await source()).toMatchObject({ failures: 0, lastResult: '2 readings read, 0 rows refused.' });
+    expect(await source()).toMatchObject({ failures: 0, lastResult: 'No file of readings is there yet.' });
+  });
+
+  it('waits longer each time a file cannot be used, a quarter of an hour at most', async () => {
+    writeFileSync(path.join(folder, 'a.csv'), 'when,what\n1,2\n');
+    const waits: number[] = [];
+    for (let i = 0; i < 6; i += 1) {
+      await collect();
+      waits.push(waitS(await source()));
+      test.clock.advance(waits.at(-1)! - 60);
+    }
+    expect(waits).toEqual([120, 240, 480, 900, 900, 900]);
+    const { failingSince, lastOkAt, lastAt } = await source();
+    expect([lastOkAt, (Date.parse(lastAt!) - Date.parse(failingSince!)) / 1000]).toEqual([null, 2640]);
+    writeFileSync(path.join(folder, 'a.csv'), `${HEADER}${line(60, -9.5, -7.7)}\n`);
+    test.clock.advance(840);
+    await collect();
+    expect(await source()).toMatchObject({ failures: 0, failingSince: null, lastResult: '2 new readings.' });
   });
 
   it('counts the wait from the begin of a collection, so that a slow one misses no turn', async () => {

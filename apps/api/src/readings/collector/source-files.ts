@@ -1,13 +1,6 @@
 import { readdir, realpath, stat } from 'node:fs/promises';
 import path from 'node:path';
-
-/** A source whose files cannot be reached; the message says what to look at. */
-export class SourceError extends Error {
-  constructor(message: string) {
-    super(message);
-    this.name = 'SourceError';
-  }
-}
+import { SourceFault } from './source-fault';
 
 const TABLES = /\.(csv|txt|dat|tsv)$/i;
 
@@ -24,12 +17,13 @@ export async function sourceFiles(loggerDir: string, declared: string): Promise<
   } catch (error) {
     const { code } = error as NodeJS.ErrnoException;
     if (code !== 'ENOENT') throw error;
-    throw new SourceError(
+    throw new SourceFault(
       `"${declared}" is not there. Look whether the logger's folder is connected and its name right.`,
+      { notThereYet: true },
     );
   }
   if (real !== root && !real.startsWith(root + path.sep)) {
-    throw new SourceError(`"${declared}" leads out of the loggers' folder. Move the files beneath it.`);
+    throw new SourceFault(`"${declared}" leads out of the loggers' folder. Move the files beneath it.`);
   }
   if ((await stat(real)).isFile()) return [real];
   const names = (await readdir(real)).filter((name) => TABLES.test(name)).sort();

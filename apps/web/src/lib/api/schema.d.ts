@@ -256,22 +256,6 @@ export interface paths {
     patch: operations['Towers.changeSensor'];
     trace?: never;
   };
-  '/api/towers/{id}/sources': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Towers.listSources'];
-    put?: never;
-    post: operations['Towers.addSource'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
   '/api/towers/{id}/keys': {
     parameters: {
       query?: never;
@@ -299,6 +283,54 @@ export interface paths {
     put?: never;
     post?: never;
     delete: operations['Keys.revoke'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/sources': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Sources.list'];
+    put?: never;
+    post: operations['Sources.add'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/sources/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch: operations['Sources.change'];
+    trace?: never;
+  };
+  '/api/sources/{id}/retire': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Sources.retire'];
+    delete?: never;
     options?: never;
     head?: never;
     patch?: never;
@@ -334,6 +366,22 @@ export interface paths {
     options?: never;
     head?: never;
     patch: operations['Districts.change'];
+    trace?: never;
+  };
+  '/api/sources/{id}/collect': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Collect.collect'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
     trace?: never;
   };
   '/api/ingest/readings': {
@@ -1303,6 +1351,37 @@ export interface components {
       /** @description true sets the sensor aside: its readings stay, new ones are not taken */
       retired?: boolean;
     };
+    IngestKey: {
+      id: number;
+      name: string;
+      createdAt: string;
+      lastUsedAt: string | null;
+      revokedAt: string | null;
+    };
+    KeyInput: {
+      /** @example mast logger */
+      name: string;
+    };
+    KeyMade: {
+      id: number;
+      /** @description Keep it now: it is never shown again */
+      key: string;
+    };
+    TimeColumn: {
+      column: string;
+      /** @enum {string} */
+      part:
+        | 'date'
+        | 'time'
+        | 'year'
+        | 'two-digit year'
+        | 'month'
+        | 'day'
+        | 'day of year'
+        | 'hour'
+        | 'minute'
+        | 'hhmm';
+    };
     Mapping: {
       /**
        * @default wide
@@ -1319,17 +1398,25 @@ export interface components {
        * @enum {string}
        */
       decimal: '.' | ',';
+      /** @description 0: no header, columns are "1", "2", …; left out: the first line */
+      headerRow?: number;
+      /** @description Where lines stand between the header and the first reading */
+      firstDataRow?: number;
       /** @default time */
       timeColumn: string;
+      /** @description Where the time stands in several columns; wins over timeColumn */
+      timeColumns?: components['schemas']['TimeColumn'][];
       /**
        * @default iso
        * @enum {string}
        */
-      timeForm: 'iso' | 'day/month/year' | 'month/day/year' | 'epoch-seconds';
+      timeForm: 'iso' | 'day/month/year' | 'month/day/year' | 'epoch-seconds' | 'epoch-milliseconds';
       /** @description Marks for "no reading"; the empty cell always is one */
       missing?: string[];
       /** @description Header → sensor name, where they differ */
       columns?: Record<string, never>;
+      /** @description Column (wide) or sensor as written (long) → its unit, where it is not the sensor's own: °F, K, 0–1, mph, km/h, kn, Pa, kPa, mmHg, inHg, mg/m³ */
+      units?: Record<string, never>;
       /** @default sensor */
       sensorColumn: string;
       /** @default value */
@@ -1341,46 +1428,98 @@ export interface components {
        * @enum {string}
        */
       stamp?: 'instant' | 'start' | 'middle' | 'end';
+      /**
+       * @description A civil time that happens twice
+       * @default refuse
+       * @enum {string}
+       */
+      repeatedHour: 'refuse' | 'first' | 'second' | 'in-order';
+      /**
+       * @description A civil time that does not exist
+       * @default refuse
+       * @enum {string}
+       */
+      missingHour: 'refuse' | 'later';
+      /** @description Spreadsheets: the sheet; left out: the first that is not hidden */
+      sheet?: string;
     };
     Source: {
       id: number;
       towerId: number;
       /** @enum {string} */
-      kind: 'folder' | 'push';
+      kind: 'folder' | 'http' | 'push';
       path: string | null;
+      url: string | null;
+      /** @enum {string} */
+      auth: 'none' | 'basic' | 'bearer';
+      /** @description Whether credentials are kept */
+      hasSecret: boolean;
       mapping: components['schemas']['Mapping'];
       intervalSeconds: number;
+      /** @description Whether it is being collected right now */
+      collecting: boolean;
       lastAt: string | null;
+      /** @description The last time it could be collected */
+      lastOkAt: string | null;
       /** @description What the last collection gave, or why it failed */
       lastResult: string | null;
       /** @description Failures in a row */
       failures: number;
+      /** @description When the present row of failures began */
+      failingSince: string | null;
       nextAt: string | null;
+      /** @description Counts changes; a change names the one it began from */
+      version: number;
     };
     SourceInput: {
       /** @enum {string} */
-      kind: 'folder' | 'push';
-      /** @description A file or folder beneath the loggers' folder */
+      kind: 'folder' | 'http' | 'push';
+      /** @description folder: a file or folder beneath the loggers' folder */
       path?: string;
+      /** @description http: the address of the file, at a host of HTTP_SOURCE_HOSTS */
+      url?: string;
+      /**
+       * @default none
+       * @enum {string}
+       */
+      auth: 'none' | 'basic' | 'bearer';
+      /** @description basic: kept sealed and never shown again */
+      username?: string;
+      /** @description basic: kept sealed and never shown again */
+      password?: string;
+      /** @description bearer: kept sealed and never shown again */
+      token?: string;
       mapping?: components['schemas']['Mapping'];
-      /** @default 60 */
+      /**
+       * @description At least 10 for a folder, 60 over HTTP
+       * @default 60
+       */
       intervalSeconds: number;
     };
-    IngestKey: {
-      id: number;
-      name: string;
-      createdAt: string;
-      lastUsedAt: string | null;
-      revokedAt: string | null;
-    };
-    KeyInput: {
-      /** @example mast logger */
-      name: string;
-    };
-    KeyMade: {
-      id: number;
-      /** @description Keep it now: it is never shown again */
-      key: string;
+    SourcePatch: {
+      /** @description folder: a file or folder beneath the loggers' folder */
+      path?: string;
+      /** @description http: the address of the file, at a host of HTTP_SOURCE_HOSTS */
+      url?: string;
+      /**
+       * @default none
+       * @enum {string}
+       */
+      auth: 'none' | 'basic' | 'bearer';
+      /** @description basic: kept sealed and never shown again */
+      username?: string;
+      /** @description basic: kept sealed and never shown again */
+      password?: string;
+      /** @description bearer: kept sealed and never shown again */
+      token?: string;
+      mapping?: components['schemas']['Mapping'];
+      /**
+       * @description At least 10 for a folder, 60 over HTTP
+       * @default 60
+       */
+      intervalSeconds: number;
+      /** @description The version the change began from */
+      version: number;
     };
     DistrictTower: {
       towerId: number;
@@ -2845,52 +2984,6 @@ export interface operations {
       };
     };
   };
-  'Towers.listSources': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Source'][];
-        };
-      };
-    };
-  };
-  'Towers.addSource': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['SourceInput'];
-      };
-    };
-    responses: {
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Source'];
-        };
-      };
-    };
-  };
   'Keys.list': {
     parameters: {
       query?: never;
@@ -2953,6 +3046,98 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+    };
+  };
+  'Sources.list': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Source'][];
+        };
+      };
+    };
+  };
+  'Sources.add': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SourceInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Source'];
+        };
+      };
+    };
+  };
+  'Sources.change': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SourcePatch'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Source'];
+        };
+      };
+    };
+  };
+  'Sources.retire': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Source'];
+        };
       };
     };
   };
@@ -3040,6 +3225,27 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['District'];
+        };
+      };
+    };
+  };
+  'Collect.collect': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Source'];
         };
       };
     };

@@ -1,0 +1,37 @@
+import { pipeline, Readable } from 'node:stream';
+import { createGunzip } from 'node:zlib';
+import { SourceFault } from '../collector/source-fault';
+
+const isGzip = (bytes: Buffer): boolean => bytes[0] === 0x1f && bytes[1] === 0x8b;
+const WEB_PAGE = /^\s*<(!doctype html|html|head|body|\?xml)/i;
+
+/**
+ * A body as its text: a file that is packed itself (`mast.csv.gz`) unpacked, others as they are. A web page, such as a
+ * portal's sign-in, is a `SourceFault`, for its lines would only be refused one by one.
+ */
+export function unpacked(host: string): (body: AsyncIterable<Buffer>) => AsyncGenerator<Buffer> {
+  return async function* (body) {
+    const pieces = body[Symbol.asyncIterator]();
+    const first = await pieces.next();
+    if (first.done) return;
+    const start = Buffer.from(first.value);
+    if (WEB_PAGE.test(start.toString('latin1', 0, 200)))
+      throw new SourceFault(
+        `${host}: It answers with a web page, not a file of readings. Look at the address.`,
+      );
+    const all = allOf(start, pieces);
+    yield* isGzip(start) ? gunzipped(all) : all;
+  };
+}
+
+async function* allOf(first: Buffer, pieces: AsyncIterator<Buffer>): AsyncGenerator<Buffer> {
+  yield first;
+  for (let next = await pieces.next(); !next.done; next = await pieces.next()) yield Buffer.from(next.value);
+}
+
+function gunzipped(pieces: AsyncIterable<Buffer>): AsyncIterable<Buffer> {
+  const gunzip = createGunzip();
+  // An error goes on to whoever reads the unpacked bytes, so that it needs no other handling here.
+  pipeline(Readable.from(pieces), gunzip, () => undefined);
+  return gunzip as AsyncIterable<Buffer>;
+}
