@@ -61,22 +61,30 @@ const BY_CODE: readonly [RegExp, string][] = [
   ],
 ];
 
+interface Cause {
+  readonly code?: unknown;
+  readonly message?: unknown;
+}
+
 /** Why no whole answer came, from what the connection's own error says; undefined for a fault of the service. */
 export function connectionFault(host: string, error: unknown): SourceFault | undefined {
-  const codes = causesOf(error).map(({ code }) => code);
-  for (const code of codes) {
+  const causes = causesOf(error);
+  for (const { code } of causes) {
     const found = BY_CODE.find(([pattern]) => typeof code === 'string' && pattern.test(code));
     if (found) return new SourceFault(`${host}: ${found[1]}`);
   }
-  return undefined;
+  if (!causes.some(({ message }) => message === 'fetch failed' || message === 'terminated')) return undefined;
+  // Such as "bad port": ports of other services are never asked (Fetch Standard, section 2.9).
+  return new SourceFault(`${host}: It could not be asked (${causes[0]?.message}). Look at the address.`);
 }
 
 /** An error and what caused it, the innermost first. */
-function causesOf(error: unknown): { code?: unknown }[] {
-  const chain: { code?: unknown }[] = [];
-  for (let at = error; at instanceof Error && chain.length < 5; at = at.cause) {
-    chain.unshift(at as { code?: unknown });
-    if (at instanceof AggregateError) chain.unshift(...(at.errors as { code?: unknown }[]));
+function causesOf(error: unknown): Cause[] {
+  const chain: Cause[] = [];
+  let at = error as (Cause & { cause?: unknown; errors?: Cause[] }) | undefined;
+  while (typeof at === 'object' && at !== null && chain.length < 5) {
+    chain.unshift(...(at.errors ?? []), at);
+    at = at.cause as typeof at;
   }
   return chain;
 }

@@ -28,6 +28,8 @@ class Stopping extends Error {}
 /** An answer with a body, which stands in a file. */
 interface Answer extends KeptBody {
   readonly file: string;
+  /** Whether it came packed: then a body that was cut off cannot be told from a whole one. */
+  readonly packed: boolean;
   readonly etag: string | null;
   readonly lastModified: string | null;
 }
@@ -61,7 +63,7 @@ export class HttpSources implements OnModuleDestroy {
       if (!answer) return UNCHANGED;
       return await this.take(source, address, answer).finally(() => rm(answer.file, { force: true }));
     } catch (error) {
-      return error instanceof Stopping ? undefined : failed(error, address.host, this.logger);
+      return error instanceof Stopping ? undefined : failed(error, nameOf(address), this.logger);
     }
   }
 
@@ -86,7 +88,8 @@ export class HttpSources implements OnModuleDestroy {
       if (response.status !== 200) return await this.withoutBody(response, host);
       const kept = await keepBody(response, file, { host, mostBytes, signal });
       const { headers: told } = response;
-      return { ...kept, file, etag: told.get('etag'), lastModified: told.get('last-modified') };
+      const packed = told.has('content-encoding');
+      return { ...kept, file, packed, etag: told.get('etag'), lastModified: told.get('last-modified') };
     } catch (error) {
       await rm(file, { force: true });
       if (signal.aborted) throw signal.reason;
@@ -105,7 +108,7 @@ export class HttpSources implements OnModuleDestroy {
   }
 
   private async take(source: Source, address: URL, answer: Answer): Promise<Collected> {
-    const { file, sha256, etag, lastModified, bytes } = answer;
+    const { file, packed, sha256, etag, lastModified, bytes } = answer;
     const knownAs = address.href;
     const isSame = source.bodySha256 === sha256;
     const tally = emptyTally();
@@ -115,7 +118,7 @@ export class HttpSources implements OnModuleDestroy {
       const name = nameOf(address);
       // A last line without its end may be half written; when it comes the same again, it is all there is of it.
       const given = { source, origin: 'http', file, knownAs, name, inode: 0, whole: true } as const;
-      await this.taker.take({ ...given, takeUnfinished: isSame }, context, tally);
+      await this.taker.take({ ...given, takeUnfinished: isSame && !packed }, context, tally);
     }
     const asks = tally.unfinished > 0 ? { etag: null, lastModified: null } : { etag, lastModified };
     await this.turns.keepBody(source, { ...asks, bodySha256: sha256 });

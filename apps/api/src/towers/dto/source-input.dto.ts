@@ -54,14 +54,14 @@ export class SourceInput {
   @ApiPropertyOptional({ description: 'basic: kept sealed and never shown again' })
   @IsOptional()
   @IsString()
-  @Matches(/^[^:\0-\x1f\x7f]+$/, { message: 'username must be without colon and control characters' })
+  @Matches(/^[^:\p{Cc}]+$/u, { message: 'username must be without colon and control characters' })
   @Length(1, 200)
   username?: string;
 
   @ApiPropertyOptional({ description: 'basic: kept sealed and never shown again' })
   @IsOptional()
   @IsString()
-  @Matches(/^[^\0-\x1f\x7f]+$/, { message: 'password must be without control characters' })
+  @Matches(/^\P{Cc}+$/u, { message: 'password must be without control characters' })
   @Length(1, 500)
   password?: string;
 
