@@ -4,11 +4,13 @@ import { effects } from './chapters/effects.mjs';
 import { ending } from './chapters/ending.mjs';
 import { finding } from './chapters/finding.mjs';
 import { resident } from './chapters/resident.mjs';
+import { screening } from './chapters/screening.mjs';
 
 /**
  * The whole journey, chapter by chapter; each step builds on the ones before. `trip` carries the counter of steps, the
  * product, everybody's window, and what one chapter found for the next (`valley`, `noticePath`).
  */
 export async function journey(trip) {
-  for (const chapter of [arrival, resident, finding, decision, effects, ending]) await chapter(trip);
+  for (const chapter of [arrival, resident, finding, decision, effects, ending, screening])
+    await chapter(trip);
 }

@@ -24,7 +24,15 @@ interface Row {
   readonly checks: number;
 }
 
-const COUNT = `SELECT count(*) readings, count(*) FILTER (WHERE checks <> 0) flagged FROM reading
+interface Counted {
+  readonly readings: number;
+  readonly flagged: number;
+  readonly suspect: number;
+  readonly failed: number;
+}
+
+const COUNT = `SELECT count(*) readings, count(*) FILTER (WHERE checks <> 0) flagged,
+    count(*) FILTER (WHERE quality = 1) suspect, count(*) FILTER (WHERE quality = 2) failed FROM reading
   WHERE sensor_id = $sensor AND t_end > $t0 AND t_end <= $t1`;
 const ALL = `SELECT t_end t, value, quality, checks FROM reading
   WHERE sensor_id = $sensor AND t_end > $t0 AND t_end <= $t1 ORDER BY t_end`;
@@ -59,15 +67,15 @@ export class RawService {
 
   private async series(sensor: LayoutSensor, { t0, t1 }: Stretch): Promise<RawSeriesDto> {
     const bind = { sensor: sensor.id, t0, t1 };
-    const counted = (await this.sql.get<{ readings: number; flagged: number }>(COUNT, bind))!;
+    const { flagged, ...counted } = (await this.sql.get<Counted>(COUNT, bind))!;
     const thinned = counted.readings > MOST_POINTS;
-    const keep = Number(counted.flagged <= MOST_POINTS / 2);
+    const keep = Number(flagged <= MOST_POINTS / 2);
     const part = Math.ceil((t1 - t0) / PARTS);
     const rows = await (thinned
       ? this.sql.all<Row>(THINNED, { ...bind, part, keep })
       : this.sql.all<Row>(ALL, bind));
     const points = rows.map((row) => pointOf(sensor, row));
-    return { ...seenSensor(sensor), readings: counted.readings, thinned, points };
+    return { ...seenSensor(sensor), ...counted, thinned, points };
   }
 }
 

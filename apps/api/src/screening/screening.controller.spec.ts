@@ -200,7 +200,7 @@ describe('what screening saw', () => {
       to: iso(t0 + 5_001 * 600),
     });
     const [series] = raw.sensors;
-    expect(series).toMatchObject({ readings: 5_000, thinned: true });
+    expect(series).toMatchObject({ readings: 5_000, suspect: 250, failed: 0, thinned: true });
     expect(series!.points.length).toBeLessThanOrEqual(2_000);
     expect(series!.points.filter(({ checks }) => checks)).toHaveLength(250);
     expect(Math.max(...series!.points.map(({ value }) => value))).toBeGreaterThanOrEqual(500);

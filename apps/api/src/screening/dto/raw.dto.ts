@@ -18,6 +18,8 @@ export class RawReadingDto {
 @ApiSchema({ name: 'RawSeries' })
 export class RawSeriesDto extends SeenSensorDto {
   @ApiProperty({ description: 'How many there are' }) readings!: number;
+  @ApiProperty() suspect!: number;
+  @ApiProperty() failed!: number;
   @ApiProperty({ description: 'Fewer are given: the extremes of each part of the time, and what is flagged' })
   thinned!: boolean;
   @ApiProperty({ type: [RawReadingDto] }) points!: RawReadingDto[];

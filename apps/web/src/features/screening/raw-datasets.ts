@@ -15,6 +15,9 @@ const LINES: readonly ColorName[] = ['ground', 'air', 'none', 'suspended', 'advi
 /** The colour of the line of the n-th sensor. */
 export const lineColor = (index: number): ColorName => LINES[index % LINES.length]!;
 
+/** A mark at the edge of the chart is drawn whole. */
+const EDGE_PX = 8;
+
 const SHAPES = { valid: 'circle', suspect: 'triangle', failed: 'crossRot', missing: 'circle' } as const;
 const RADII = { valid: 0, suspect: 4.5, failed: 5, missing: 0 } as const;
 
@@ -28,7 +31,7 @@ function asRead(series: RawSeries, color: string, marks: Record<ColorName, strin
     pointStyle: points.map((point) => SHAPES[qualityOf(point)]),
     pointRadius: points.map((point) => RADII[qualityOf(point)]),
     ...{ pointBackgroundColor: colors, pointBorderColor: colors, pointBorderWidth: 2 },
-    ...{ pointHoverRadius: 5, pointHitRadius: 8 },
+    ...{ pointHoverRadius: 5, pointHitRadius: 8, clip: EDGE_PX },
   } satisfies ChartDataset<'line', RawPoint[]>;
 }
 

@@ -1,4 +1,4 @@
-import { counted, decimal } from '../../lib/format/number';
+import { count, counted, decimal } from '../../lib/format/number';
 import { duration } from '../../lib/format/time';
 import type { ChangedFindings, Check, Quality, RawSeries, Said } from './types';
 
@@ -68,11 +68,10 @@ export function changeSentences(changes: ChangedFindings): string[] {
 export function rawSentence(shown: readonly RawSeries[]): string {
   if (shown.every(({ readings }) => readings === 0)) return 'No readings in this time.';
   return shown
-    .map(({ name, readings, points }) => {
-      const of = (quality: Quality) => points.filter((point) => point.quality === quality).length;
+    .map(({ name, readings, failed, suspect }) => {
       const flagged = [
-        ...(of('failed') > 0 ? [`${of('failed')} failed`] : []),
-        ...(of('suspect') > 0 ? [`${of('suspect')} suspect`] : []),
+        ...(failed > 0 ? [`${count(failed)} failed`] : []),
+        ...(suspect > 0 ? [`${count(suspect)} suspect`] : []),
       ];
       return `${name}: ${counted(readings, 'reading')}${flagged.length > 0 ? `, ${flagged.join(', ')}` : ''}.`;
     })

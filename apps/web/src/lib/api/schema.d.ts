@@ -1804,6 +1804,8 @@ export interface components {
       heightM: number;
       /** @description How many there are */
       readings: number;
+      suspect: number;
+      failed: number;
       /** @description Fewer are given: the extremes of each part of the time, and what is flagged */
       thinned: boolean;
       points: components['schemas']['RawReading'][];

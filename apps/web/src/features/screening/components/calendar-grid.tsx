@@ -52,9 +52,9 @@ export function CalendarGrid({ calendar: { days, sensors, timeZone }, chosen, on
   const frame = useRef<HTMLDivElement>(null);
   const last = chosen[0];
   useEffect(() => {
-    const button = frame.current?.querySelector<HTMLElement>(`[data-day="${last}"]`);
-    if (frame.current && button)
-      frame.current.scrollLeft = button.offsetLeft + button.offsetWidth / 2 - frame.current.clientWidth / 2;
+    const button = frame.current?.querySelector(`[data-day="${last}"]`)?.getBoundingClientRect();
+    const seen = frame.current?.getBoundingClientRect();
+    if (button && seen) frame.current!.scrollLeft += button.left - seen.left - seen.width / 2;
   }, [last, days]);
   return (
     <Box

@@ -1,6 +1,8 @@
 import { Box, chakra, Stack } from '@chakra-ui/react';
+import { useState } from 'react';
 import { Empty } from '../../../components/states/empty';
 import { Loaded } from '../../../components/states/loaded';
+import { Button } from '../../../components/ui/button';
 import { Card } from '../../../components/ui/card';
 import { Muted, PartTitle } from '../../../components/ui/heading';
 import { AgoText } from '../../../components/ui/time-text';
@@ -13,7 +15,7 @@ import { SpanText } from './span-text';
 const Bar = chakra('progress', {
   base: { width: '100%', maxWidth: '320px', height: '10px', accentColor: 'air' },
 });
-const NEWEST = 8;
+const NEWEST = 3;
 
 interface ReworksCardProps {
   towerId: number;
@@ -25,6 +27,7 @@ interface ReworksCardProps {
 /** What was worked out anew after a change, with progress, and what is different in the findings since. */
 export function ReworksCard({ towerId, zone, onEnded }: ReworksCardProps) {
   const reworks = useReworks(towerId, onEnded);
+  const [all, setAll] = useState(false);
   return (
     <Card padded minW="0">
       <PartTitle mb="2">What was worked out anew</PartTitle>
@@ -36,11 +39,18 @@ export function ReworksCard({ towerId, zone, onEnded }: ReworksCardProps) {
               the findings is said here.
             </Empty>
           ) : (
-            <Stack as="ul" gap="0" listStyleType="none" p="0" m="0" aria-live="polite">
-              {rows.slice(0, NEWEST).map((rework) => (
-                <ReworkLine key={rework.id} rework={rework} zone={zone} />
-              ))}
-            </Stack>
+            <>
+              <Stack as="ul" gap="0" listStyleType="none" p="0" m="0" aria-live="polite">
+                {rows.slice(0, all ? rows.length : NEWEST).map((rework) => (
+                  <ReworkLine key={rework.id} rework={rework} zone={zone} />
+                ))}
+              </Stack>
+              {rows.length > NEWEST && (
+                <Button kind="quiet" size="sm" aria-expanded={all} onClick={() => setAll(!all)}>
+                  {all ? 'Only the newest' : `All ${rows.length}`}
+                </Button>
+              )}
+            </>
           )
         }
       </Loaded>

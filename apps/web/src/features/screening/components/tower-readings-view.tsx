@@ -55,8 +55,8 @@ export function TowerReadingsView({ towers, tower, zone, me }: TowerReadingsView
           onSay={me.role === 'analyst' ? setSaid : undefined}
         />
       </div>
-      <FlagsCard towerId={tower.id} sensors={tower.sensors} zone={zone} choice={choice} onShow={show} />
       <ReworksCard towerId={tower.id} zone={zone} onEnded={refresh} />
+      <FlagsCard towerId={tower.id} sensors={tower.sensors} zone={zone} choice={choice} onShow={show} />
       <SetSpansCard towerId={tower.id} zone={zone} mayUndo={me.role === 'analyst'} onUndone={refresh} />
       <CorrectionsCard
         sensors={tower.sensors}
