@@ -19,6 +19,7 @@ import { ProfilesModule } from './profiles/profiles.module';
 import { ProposalsModule } from './proposals/proposals.module';
 import { PublicStatusModule } from './public-status/public-status.module';
 import { ReadingsModule } from './readings/readings.module';
+import { UploadsModule } from './readings/uploads/uploads.module';
 import { ReworkModule } from './rework/rework.module';
 import { RulesModule } from './rules/rules.module';
 import { SchedulerModule } from './scheduler/scheduler.module';
@@ -43,6 +44,7 @@ import { UsersModule } from './users/users.module';
     TowersModule,
     DistrictsModule,
     ReadingsModule,
+    UploadsModule,
     ScreeningModule,
     ProfilesModule,
     RulesModule,

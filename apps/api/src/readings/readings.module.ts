@@ -37,6 +37,6 @@ import { ReadingsStore } from './readings-store';
     HttpSources,
     ReadingsCollector,
   ],
-  exports: [ImportRunner, ReadingsService, ReadingsCollector],
+  exports: [ImportRunner, ReadingContexts, ReadingsService, ReadingsCollector],
 })
 export class ReadingsModule {}

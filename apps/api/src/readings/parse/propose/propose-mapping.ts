@@ -1,6 +1,6 @@
 import { DEFAULT_MAPPING, type Mapping } from '../mapping';
 import { HeaderError } from '../parsed-readings';
-import { findColumns, findLong, type FoundColumn } from './find-columns';
+import { findColumns, findLong, type FoundColumn, type LongColumns } from './find-columns';
 import { findHeader, type FoundHeader } from './find-header';
 import { findMarks } from './find-marks';
 import { findSeparator, type Cut } from './find-separator';
@@ -19,7 +19,10 @@ export interface ForTower {
 /** How a file seems to be laid out, and what a person should look at or has to say. */
 export interface FoundLayout {
   readonly mapping: Mapping;
+  readonly columnNames: readonly string[];
   readonly columns: readonly FoundColumn[];
+  /** Long tables: the sensors as the file writes them. */
+  readonly written: readonly string[];
   readonly notes: readonly string[];
   readonly questions: readonly Question[];
 }
@@ -92,13 +95,10 @@ const unitQuestion = (columns: readonly FoundColumn[]): Question[] => {
 
 /** The long table's columns, or those of a wide one, as part of the mapping. */
 const layoutOf = (
-  header: FoundHeader,
-  time: FoundTime,
+  long: LongColumns | undefined,
   columns: readonly FoundColumn[],
   sensors: readonly KnownSensor[],
-  decimal: '.' | ',',
 ): Pick<Mapping, 'format' | 'columns' | 'units' | 'sensorColumn' | 'valueColumn'> => {
-  const long = findLong(header, time.used, decimal);
   const { sensorColumn, valueColumn } = DEFAULT_MAPPING;
   if (long) {
     const guesses = long.written.map((name) => [name, guessSensor(name, sensors)?.name] as const);
@@ -154,7 +154,8 @@ export function proposeMapping(sample: FileSample, tower: ForTower): FoundLayout
   );
   const markTexts = new Set(marks.map(({ text }) => text));
   const columns = findColumns(header, time.used, tower.sensors, decimal, markTexts);
-  const layout = layoutOf(header, time, columns, tower.sensors, decimal);
+  const long = findLong(header, time.used, decimal);
+  const layout = layoutOf(long, columns, tower.sensors);
   const notes = [
     ...(header.headerRow === 0 ? ['The file has no header: its columns are called by their numbers.'] : []),
     ...(header.headerRow > 1
@@ -179,7 +180,7 @@ export function proposeMapping(sample: FileSample, tower: ForTower): FoundLayout
       ...(time.timeColumns ? { timeColumns: time.timeColumns } : {}),
       missing: marks.map(({ text }) => text),
     },
-    columns,
+    ...{ columnNames: header.names, columns, written: long?.written ?? [] },
     notes,
     questions: [...dayQuestion(time, firstTime), ...unitQuestion(columns)],
   };
