@@ -19,7 +19,7 @@ describe('what is worked out anew', () => {
     await putRuleInForce(test, valley.districtId, eveningRule);
     await goBy(test, valley, Array<number>(18).fill(3));
     analyst = await signInAs(test, 'analyst');
-  });
+  }, 30_000);
   afterAll(() => test.close());
 
   const reworks = async (): Promise<ReworkDto[]> =>

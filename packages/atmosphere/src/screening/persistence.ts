@@ -32,18 +32,23 @@ export function checkPersistence(series: Series, others: readonly Series[], flag
  * Stuck check: the very same value for hours *fails* when another level of the tower moves meanwhile.
  *
  * Units: those of the sensor. Valid: stretches without a gap longer than 2.5 intervals; a tower without another level
- * of the same kind has no answer. Source: [Zahumensky2004] persistence; hours and movement are settings.
+ * of the same kind has no answer. Gives the indices of what is stuck. Source: [Zahumensky2004] persistence; hours and
+ * movement are settings.
  */
-export function checkStuck(series: Series, levels: readonly Series[], flags: FlagList): void {
+export function checkStuck(series: Series, levels: readonly Series[], flags: FlagList): readonly number[] {
   const { stuckHours, movesBy } = series.limits;
-  if (stuckHours === null) return;
+  const stuck: number[] = [];
+  if (stuckHours === null) return stuck;
   for (const [first, last] of steadyWindows(series, stuckHours * S_PER_HOUR, 0)) {
     const [from, to] = [series.t[first]!, series.t[last]!];
     const moving = levels.find((level) => variationBetween(level, from, to) > movesBy);
     if (moving === undefined) continue;
     const reason = `the same value for ${stuckHours} h or more while another level of the tower moves`;
     for (let i = first; i <= last; i += 1) {
-      if (series.evidence[i] === 1) addFlag(flags, i, { check: 'stuck', verdict: 'failed', reason });
+      if (series.evidence[i] === 0) continue;
+      addFlag(flags, i, { check: 'stuck', verdict: 'failed', reason });
+      stuck.push(i);
     }
   }
+  return stuck;
 }

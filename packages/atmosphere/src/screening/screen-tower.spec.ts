@@ -348,13 +348,16 @@ describe('order and span', () => {
           const sensors = towerOf(expand(a), expand(b));
           const [from, to] = [start * S, (start + length) * S];
           const { beforeS, afterS } = screeningContext(sensors);
+          const overrides = [
+            { sensorId: 'a', from: 40 * S, to: 80 * S, quality: 'failed' as const, reason: '', at: 1 },
+          ];
           const near = sensors.map((s) => ({
             ...s,
             readings: s.readings.filter((r) => r.tEnd >= from - beforeS && r.tEnd <= to + afterS),
           }));
           const [whole, part] = [
-            screenTower({ sensors, from, to }),
-            screenTower({ sensors: near, from, to }),
+            screenTower({ sensors, from, to, overrides }),
+            screenTower({ sensors: near, from, to, overrides }),
           ];
           for (const id of ['a', 'b', 'dew']) expect(part.get(id)).toEqual(whole.get(id));
         },

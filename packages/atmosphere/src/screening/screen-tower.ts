@@ -1,23 +1,15 @@
 import type { Quality } from '../profile';
-import { checkClock, type WrongClock } from './clock';
+import { checksOfTower, type ChecksInput } from './checks-of-tower';
 import type { FlagList } from './flag-list';
-import { checkInternal } from './internal';
-import { checkNeighbours } from './neighbours';
-import { overrideAt } from './overrides';
-import { checkPersistence, checkStuck } from './persistence';
-import { checkRange } from './range';
+import { overrideAt, WORD, wordsOver, type Words } from './overrides';
 import { CHECKS, type Flag, type Override, type ScreenedReading } from './reading';
 import { seriesOf, type SensorSeries, type Series } from './series';
-import { DEFAULT_VERTICAL_LIMITS, type VerticalLimits } from './settings';
-import { checkSpike } from './spike';
-import { checkStep } from './step';
-import { checkVertical, pairsOf, type SunElevationDeg } from './vertical';
 
 /** *in force*: a failed reading is left out of means; *report only*: failed counts as suspect, though it is said. */
 export type ScreeningMode = 'in force' | 'report only';
 
 /** What screening a span of one tower is given; all series with `screeningContext` before and after the span. */
-export interface ScreeningInput {
+export interface ScreeningInput extends ChecksInput {
   readonly sensors: readonly SensorSeries[];
   /** Sensors of each neighbouring tower: used to withdraw flags, and for the neighbour check; not screened. */
   readonly neighbours?: readonly (readonly SensorSeries[])[];
@@ -25,9 +17,6 @@ export interface ScreeningInput {
   readonly from: number;
   readonly to: number;
   readonly overrides?: readonly Override[];
-  readonly wrongClocks?: readonly WrongClock[];
-  readonly sunElevationDeg?: SunElevationDeg;
-  readonly verticalLimits?: Partial<VerticalLimits>;
   readonly mode?: ScreeningMode;
 }
 
@@ -61,6 +50,13 @@ const screened = (series: Series, flags: FlagList, input: ScreeningInput): reado
   return result;
 };
 
+/** A series in which what a person has set aside is no evidence; the same series where nothing is set aside. */
+const withoutSetAside = (series: Series, words: Words | null): Series => {
+  if (!words?.includes(WORD.failed)) return series;
+  const evidence = series.evidence.map((is, i) => (words[i] === WORD.failed ? 0 : is));
+  return { ...series, evidence };
+};
+
 /**
  * Screens a span of one tower, in the order: clock, range, spike, step, stuck, persistence, internal, vertical and
  * neighbour checks. Each reading gets the worst of *valid / suspect / failed / missing* with the flags that said so; a
@@ -68,7 +64,8 @@ const screened = (series: Series, flags: FlagList, input: ScreeningInput): reado
  *
  * *Failed* needs a value outside the physical range, a single spike, the very same value for hours while another
  * level moves, or a clock proved wrong; everything else is *suspect* at most, and withdrawn when a neighbouring level
- * or tower moves the same way.
+ * or tower moves the same way. What is set aside is no evidence against others; what the checks say of itself is kept
+ * beside the person's word.
  *
  * Units: those of the sensors; UTC epoch seconds. Valid: readings and sensors in any order give the same result; two
  * values for one instant throw a `RangeError`. The result for the span equals that of the whole record when the
@@ -77,31 +74,16 @@ const screened = (series: Series, flags: FlagList, input: ScreeningInput): reado
 export function screenTower(input: ScreeningInput): ReadonlyMap<string, readonly ScreenedReading[]> {
   const tower = input.sensors.map(seriesOf).sort(byHeight);
   const nearby = (input.neighbours ?? []).map((sensors) => sensors.map(seriesOf).sort(byHeight));
-  const flags = new Map<Series, FlagList>([...tower, ...nearby.flat()].map((series) => [series, []]));
-  const flagsOf = (series: Series): FlagList => flags.get(series)!;
-  const kin = (series: Series, among: readonly Series[]) =>
-    among.filter((other) => other !== series && other.quantity === series.quantity);
-  const allOf = (series: Series) => [...kin(series, tower), ...kin(series, nearby.flat())];
-
-  for (const series of tower) {
-    checkClock(series, input.wrongClocks ?? [], flagsOf(series));
-    checkRange(series, flagsOf(series));
+  const words = tower.map((series) => wordsOver(series, input.overrides ?? []));
+  const believed = tower.map((series, k) => withoutSetAside(series, words[k]!));
+  const flags = checksOfTower(believed, nearby, words, input);
+  if (believed.some((series, k) => series !== tower[k])) {
+    const alone = checksOfTower(tower, nearby, words, input);
+    words.forEach((said, k) =>
+      said?.forEach((word, i) => {
+        if (word === WORD.failed) flags[k]![i] = alone[k]![i];
+      }),
+    );
   }
-  const spikes = tower.map((series) => checkSpike(series, allOf(series), flagsOf(series)));
-  tower.forEach((series, i) => spikes[i]!.forEach((at) => (series.evidence[at] = 0)));
-  for (const series of tower) {
-    checkStep(series, allOf(series), flagsOf(series));
-    checkStuck(series, kin(series, tower), flagsOf(series));
-    checkPersistence(series, allOf(series), flagsOf(series));
-    checkInternal(series, tower, flagsOf(series));
-    checkNeighbours(series, kin(series, nearby.flat()), flagsOf(series));
-  }
-  const pairs = pairsOf(tower);
-  const pairsNearby = nearby.flatMap(pairsOf);
-  const limits = { ...DEFAULT_VERTICAL_LIMITS, ...input.verticalLimits };
-  for (const pair of pairs) {
-    const others = [...pairs.filter((p) => p !== pair), ...pairsNearby];
-    checkVertical(pair, others, limits, input.sunElevationDeg, flagsOf);
-  }
-  return new Map(tower.map((series) => [series.sensorId, screened(series, flagsOf(series), input)]));
+  return new Map(tower.map((series, k) => [series.sensorId, screened(series, flags[k]!, input)]));
 }
