@@ -32,5 +32,7 @@ export function sendProblem(problem: Problem, request: Request, response: Respon
     instance: request.originalUrl.split('?')[0] ?? request.originalUrl,
     ...problem.extra,
   };
+  const { retryAfterSeconds } = problem.extra;
+  if (typeof retryAfterSeconds === 'number') response.setHeader('Retry-After', retryAfterSeconds);
   response.status(body.status).type('application/problem+json').send(JSON.stringify(body));
 }

@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { Problem } from '../common/problem';
+import type { Site } from '../towers/keys.service';
 import { SourcesService } from '../towers/sources.service';
 import { showIngested, type IngestResult } from './dto/ingest-result.dto';
 import { decodeText, NotTextError } from './parse/decode-text';
@@ -32,7 +33,7 @@ export class PushService {
    * Takes in what a tower's site sent. Bad rows are refused one by one with their reasons; a body that cannot be read
    * at all is answered 422 (415 for another content type), and nothing of it is taken.
    */
-  async push(towerId: number, contentType: string, body: unknown): Promise<IngestResult> {
+  async push({ towerId, name }: Site, contentType: string, body: unknown): Promise<IngestResult> {
     const read = readers[contentType.split(';')[0]!.trim().toLowerCase()];
     if (!read)
       throw new Problem(
@@ -45,7 +46,7 @@ export class PushService {
     const mapping = readMapping(await this.sources.pushMapping(towerId));
     const context = await this.contexts.of(towerId, mapping);
     const { rows, refused, ignoredColumns } = await this.parse(read, body, context);
-    const ingested = await this.readings.ingest(towerId, rows, { origin: 'push', name: 'pushed', refused });
+    const ingested = await this.readings.ingest(towerId, rows, { origin: 'push', name, refused });
     return showIngested(ingested, refused, ignoredColumns);
   }
 

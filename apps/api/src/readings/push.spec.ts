@@ -153,12 +153,66 @@ describe('readings that a site pushes', () => {
 
   it('are refused whole when they are too many, even packed, or of another type', async () => {
     const large = Buffer.alloc(10_500_000, 'x');
-    await send(large).expect(413);
-    await send(gzipSync(large)).set('Content-Encoding', 'gzip').expect(413);
+    const { body: asSent } = await send(large).expect(413);
+    expect(asSent).toMatchObject({
+      detail: 'The body has more than 10 MB. Send it in smaller parts, such as a week each.',
+    });
+    const { body: packedLarge } = await send(gzipSync(large)).set('Content-Encoding', 'gzip').expect(413);
+    expect(packedLarge).toMatchObject({ detail: expect.stringContaining('more than 10 MB, unpacked') });
     await send('<readings/>', { type: 'application/xml' }).expect(415);
     const packed = gzipSync(wide([[T, -9.5, -7.7]]));
     await send(packed).set('Content-Encoding', 'gzip').expect(200);
-    await send(packed.subarray(0, 20)).set('Content-Encoding', 'gzip').expect(400);
+    const { body: cut } = await send(packed.subarray(0, 20)).set('Content-Encoding', 'gzip').expect(400);
+    expect(cut).toMatchObject({ detail: expect.stringContaining('damaged or cut off') });
+    const { body: odd } = await send(packed).set('Content-Encoding', 'zip').expect(415);
+    expect(odd).toMatchObject({ detail: expect.stringContaining('"Content-Encoding: gzip"') });
+  });
+
+  it('are counted for each key, and what is left is said', async () => {
+    const text = wide([[T, -9.5, -7.7]]);
+    const { headers } = await send(text).expect(200);
+    expect(headers['ratelimit-policy']).toBe(
+      '"requests";q=120;w=60, "bytes";q=50000000;w=60;qu="content-bytes"',
+    );
+    expect(headers['ratelimit']).toBe('"requests";r=119;t=60, "bytes";r=50000000;t=60');
+    test.clock.advance(20);
+    for (let i = 1; i < 120; i += 1) await send('', { type: 'text/csv' }).expect(422);
+    const refused = await send(text).expect(429);
+    expect(refused.headers).toMatchObject({
+      'retry-after': '40',
+      ratelimit: expect.stringMatching(/r=0;t=40/),
+    });
+    expect(refused.body).toMatchObject({
+      code: 'too-many-requests',
+      detail: expect.stringContaining('Send again in 40 s'),
+    });
+    const other = await makeTower(test, { heightsM: [2, 10] });
+    await send(text, { key: await makeKey(other.towerId) }).expect(200);
+    test.clock.advance(40);
+    await send(text).expect(200);
+  });
+
+  it('are counted by their size, unpacked, too', async () => {
+    const nine = gzipSync('x'.repeat(9_900_000));
+    for (let i = 0; i < 6; i += 1) await send(nine).set('Content-Encoding', 'gzip').expect(422);
+    const { headers, body } = await send(nine).set('Content-Encoding', 'gzip').expect(429);
+    expect([headers['retry-after'], (body as { detail: string }).detail]).toEqual([
+      '60',
+      'This key has sent 50 MB within a minute. Send the rest in 60 s.',
+    ]);
+  });
+
+  it('are not even read with a wrong key; its address is told to stop, right keys there go on', async () => {
+    test.clock.advance(600);
+    const wrong = () => send(Buffer.alloc(11_000_000, 'x'), { key: 'site-nobody' });
+    const { headers } = await wrong().expect(401);
+    expect(headers['www-authenticate']).toBe('Bearer realm="readings"');
+    for (let i = 0; i < 30; i += 1) await send('', { key: `site-${i}` });
+    const { headers: told } = await wrong().expect(429);
+    expect(told['retry-after']).toBe('600');
+    await send(wide([[T, -9.5, -7.7]])).expect(200);
+    test.clock.advance(600);
+    await wrong().expect(401);
   });
 
   it('may come a reading a line, each taken or refused alone', async () => {
@@ -187,7 +241,7 @@ describe('readings that a site pushes', () => {
     const { body: imports } = await analyst.http.get(`/api/imports?towerId=${mast.towerId}`).expect(200);
     expect(imports).toMatchObject({
       total: 1,
-      items: [{ id: importId, origin: 'push', new: 1, refused: 1 }],
+      items: [{ id: importId, origin: 'push', name: 'mast logger', new: 1, refused: 1 }],
     });
     await analyst.http.get('/api/imports/999999/refused').expect(404);
   });

@@ -13,6 +13,7 @@ import { HttpSources } from './fetching/http-sources';
 import { ImportsController } from './imports.controller';
 import { ImportsService } from './imports.service';
 import { IngestController } from './ingest.controller';
+import { PushLimits } from './push-limits';
 import { PushService } from './push.service';
 import { ReadingContexts } from './reading-contexts';
 import { ReadingsService } from './readings.service';
@@ -29,6 +30,7 @@ import { ReadingsStore } from './readings-store';
     ImportRunner,
     ReadingsService,
     ReadingContexts,
+    PushLimits,
     PushService,
     ImportsService,
     FetchLimits,

@@ -15,6 +15,13 @@ const hashOf = (key: string): string => createHash('sha256').update(key).digest(
 /** `last used` is written at most this often, s. */
 const LAST_USED_EVERY_S = 60;
 
+/** Who pushes readings: a key, by what it was made for, and its tower. */
+export interface Site {
+  readonly keyId: number;
+  readonly towerId: number;
+  readonly name: string;
+}
+
 /** Keys by which sites push their readings: shown once, kept as a hash, each good for one tower. */
 @Injectable()
 export class KeysService {
@@ -60,16 +67,15 @@ export class KeysService {
     });
   }
 
-  /** The tower whose key this is; throws `key-not-valid` for an unknown or revoked one. Keeps when it was used. */
-  async towerOf(key: string): Promise<number> {
+  /** The site whose key this is; undefined for an unknown or revoked one. Keeps when the key was used. */
+  async siteOf(key: string): Promise<Site | undefined> {
     const found = await this.keys.findOne({ where: { hash: hashOf(key), revokedAt: null } });
-    if (!found)
-      throw new Problem('key-not-valid', 'The key is unknown or revoked. Ask your administrator for one.');
+    if (!found) return undefined;
     const now = this.clock.now();
     if (found.lastUsedAt === null || now - found.lastUsedAt >= LAST_USED_EVERY_S) {
       await this.keys.update({ lastUsedAt: now }, { where: { id: found.id } });
     }
-    return found.towerId;
+    return { keyId: found.id, towerId: found.towerId, name: found.name };
   }
 
   private record(act: string, towerId: number, by: SignedIn, body: object): Promise<void> {

@@ -26,6 +26,7 @@ export const errorCodes = {
   invalid: { status: 422, title: 'Some entries need another look' },
   'rule-not-valid': { status: 422, title: 'The rule is not valid' },
   'too-many-attempts': { status: 429, title: 'Too many attempts' },
+  'too-many-requests': { status: 429, title: 'Too many requests' },
   unexpected: { status: 500, title: 'Something went wrong on our side' },
   'not-ready': { status: 503, title: 'The service is not ready' },
   'no-room': { status: 507, title: 'The disk of the service is full' },
