@@ -18,6 +18,8 @@ import { PushService } from './push.service';
 import { ReadingContexts } from './reading-contexts';
 import { ReadingsService } from './readings.service';
 import { ReadingsStore } from './readings-store';
+import { RefusedTable } from './refused-table';
+import { WithdrawalsService } from './withdrawals.service';
 
 /** Every way in for readings. */
 @Module({
@@ -33,6 +35,8 @@ import { ReadingsStore } from './readings-store';
     PushLimits,
     PushService,
     ImportsService,
+    RefusedTable,
+    WithdrawalsService,
     FetchLimits,
     FileTaker,
     FolderSources,

@@ -416,6 +416,22 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/imports/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Imports.get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/imports/{id}/refused': {
     parameters: {
       query?: never;
@@ -426,6 +442,134 @@ export interface paths {
     get: operations['Imports.refused'];
     put?: never;
     post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/imports/{id}/refused.csv': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Imports.download'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/imports/{id}/withdraw': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Imports.withdraw'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/uploads': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Uploads.list'];
+    put?: never;
+    post: operations['Uploads.receive'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/uploads/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Uploads.get'];
+    put?: never;
+    post?: never;
+    delete: operations['Uploads.remove'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/uploads/{id}/proposal': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Uploads.proposal'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/uploads/{id}/preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Uploads.preview'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/uploads/{id}/commit': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Uploads.commit'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/uploads/{id}/cancel': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Uploads.cancel'];
     delete?: never;
     options?: never;
     head?: never;
@@ -1630,14 +1774,23 @@ export interface components {
     Import: {
       id: number;
       towerId: number;
+      towerName: string;
       /** @enum {string} */
-      origin: 'folder' | 'push' | 'demo';
+      origin: 'folder' | 'push' | 'http' | 'upload' | 'demo';
       name: string;
       receivedAt: string;
       new: number;
       repeated: number;
       corrected: number;
       refused: number;
+      /** @enum {string} */
+      state: 'running' | 'done' | 'cancelled' | 'failed' | 'withdrawing' | 'withdrawn';
+      /** @description Who sent it; null where a machine did */
+      by: string | null;
+      withdrawnAt: string | null;
+      withdrawnBy: string | null;
+      /** @description Whether it can be taken back as a whole */
+      canWithdraw: boolean;
     };
     ImportPage: {
       total: number;
@@ -1659,6 +1812,114 @@ export interface components {
       page: number;
       pageSize: number;
       items: components['schemas']['RefusedRow'][];
+    };
+    WithdrawInput: {
+      reason: string;
+    };
+    SameImport: {
+      importId: number;
+      receivedAt: string;
+    };
+    Upload: {
+      id: number;
+      towerId: number;
+      towerName: string;
+      name: string;
+      /** @enum {string} */
+      kind: 'text' | 'workbook';
+      bytes: number;
+      /** @enum {string} */
+      state: 'waiting' | 'running' | 'done' | 'cancelled' | 'failed';
+      /** @description Bytes imported so far */
+      bytesDone: number;
+      importId: number | null;
+      /** @description Why it failed, with the cure */
+      fault: string | null;
+      createdAt: string;
+      endedAt: string | null;
+      /** @description Who sent it */
+      by: string;
+      /** @description The same file was imported before */
+      sameAs: components['schemas']['SameImport'] | null;
+      mapping: components['schemas']['Mapping'] | null;
+    };
+    ProposedColumn: {
+      index: number;
+      name: string;
+      samples: string[];
+      sensor: string | null;
+      unit: string | null;
+      note: string | null;
+    };
+    Choice: {
+      value: string;
+      text: string;
+    };
+    Question: {
+      /** @enum {string} */
+      id: 'repeated-hour' | 'missing-hour' | 'day-or-month-first' | 'unit';
+      text: string;
+      choices: components['schemas']['Choice'][];
+      examples: string[];
+    };
+    Proposal: {
+      mapping: components['schemas']['Mapping'];
+      /** @enum {string} */
+      from: 'sample' | 'last file';
+      /** @description All columns, by name */
+      columnNames: string[];
+      /** @description All but those of the time */
+      columns: components['schemas']['ProposedColumn'][];
+      /** @description Long tables: the sensors as the file writes them */
+      written: string[];
+      sheets: string[] | null;
+      notes: string[];
+      questions: components['schemas']['Question'][];
+      sampleLines: string[];
+    };
+    MappingBody: {
+      mapping: components['schemas']['Mapping'];
+    };
+    PreviewValue: {
+      sensor: string;
+      value: number;
+      unit: string;
+    };
+    PreviewRow: {
+      rowNo: number;
+      /** @description END of its interval */
+      time: string;
+      values: components['schemas']['PreviewValue'][];
+    };
+    PreviewRefusal: {
+      row: number;
+      column: string | null;
+      code: string;
+      text: string;
+      raw: string;
+    };
+    PreviewSpan: {
+      sensor: string;
+      from: string;
+      to: string;
+      count: number;
+      lowest: number;
+      highest: number;
+      unit: string;
+    };
+    Preview: {
+      /** @description The first 30 */
+      rows: components['schemas']['PreviewRow'][];
+      /** @description Readings */
+      read: number;
+      refused: number;
+      /** @description The first 100 */
+      refusedRows: components['schemas']['PreviewRefusal'][];
+      ignoredColumns: string[];
+      spans: components['schemas']['PreviewSpan'][];
+      questions: components['schemas']['Question'][];
+      /** @description Whether the whole file was looked at, not only its beginning */
+      whole: boolean;
     };
     Override: {
       id: number;
@@ -3269,6 +3530,13 @@ export interface operations {
           'application/json': components['schemas']['IngestResult'];
         };
       };
+      /** @description The key has sent too much; Retry-After says when to send again */
+      429: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
     };
   };
   'Imports.list': {
@@ -3294,6 +3562,27 @@ export interface operations {
       };
     };
   };
+  'Imports.get': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Import'];
+        };
+      };
+    };
+  };
   'Imports.refused': {
     parameters: {
       query?: {
@@ -3314,6 +3603,234 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['RefusedRowPage'];
+        };
+      };
+    };
+  };
+  'Imports.download': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'text/csv': string;
+        };
+      };
+    };
+  };
+  'Imports.withdraw': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['WithdrawInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Import'];
+        };
+      };
+    };
+  };
+  'Uploads.list': {
+    parameters: {
+      query?: {
+        towerId?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Upload'][];
+        };
+      };
+    };
+  };
+  'Uploads.receive': {
+    parameters: {
+      query: {
+        towerId: number;
+        /** @description The file's name */
+        name: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/octet-stream': string;
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Upload'];
+        };
+      };
+    };
+  };
+  'Uploads.get': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Upload'];
+        };
+      };
+    };
+  };
+  'Uploads.remove': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+    };
+  };
+  'Uploads.proposal': {
+    parameters: {
+      query?: {
+        sheet?: string;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Proposal'];
+        };
+      };
+    };
+  };
+  'Uploads.preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['MappingBody'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Preview'];
+        };
+      };
+    };
+  };
+  'Uploads.commit': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['MappingBody'];
+      };
+    };
+    responses: {
+      202: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Upload'];
+        };
+      };
+    };
+  };
+  'Uploads.cancel': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Upload'];
         };
       };
     };
