@@ -88,6 +88,22 @@ describe('what is worked out anew', () => {
     expect(last!.changes).toMatchObject({ blocksChanged: 1, toNotKnown: 1, strongestAfterC: null });
   });
 
+  it('follows a correction from an instant on', async () => {
+    const from = iso(testNow + 2.5 * HOUR_S);
+    const patch = { offset: 1.5, gain: 1, from, note: 'compared with the reference' };
+    await analyst.http
+      .patch(`/api/sensors/${await lowest()}`)
+      .send(patch)
+      .expect(200);
+    await finish();
+    expect((await reworks())[0]).toMatchObject({
+      cause: 'temperature_2m: offset 1.5 degC, gain 1 (compared with the reference)',
+      from: from.replace('.000', ''),
+      changes: { blocksChanged: 3 },
+    });
+    expect((await reworks())[0]!.changes!.strongestAfterC).toBeCloseTo(1.8, 1);
+  });
+
   it('waits until nothing of it waits, and begins nothing where nothing is marked', async () => {
     const [towerId] = valley.towerIds;
     const begin = test.app.get(ReworkService, { strict: false });

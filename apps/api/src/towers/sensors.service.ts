@@ -8,6 +8,8 @@ import { Problem } from '../common/problem';
 import { invalid } from '../common/validation';
 import { DirtyStages } from '../database/dirty';
 import { UnitOfWork } from '../database/unit-of-work';
+import { ReworkService } from '../rework/rework.service';
+import { sensorChangeWords } from './change-words';
 import type { SensorInput, SensorPatch } from './dto/sensor-input.dto';
 import { showSensor, type SensorDto } from './dto/tower.dto';
 import { SensorVersion } from './models/sensor-version.model';
@@ -26,6 +28,7 @@ export class SensorsService {
     private readonly work: UnitOfWork,
     private readonly clock: Clock,
     private readonly activity: ActivityService,
+    private readonly reworks: ReworkService,
   ) {}
 
   /** Adds a sensor to a tower. */
@@ -56,6 +59,7 @@ export class SensorsService {
       });
       this.layouts.forget(towerId);
       await this.dirty.markTower(towerId);
+      await this.reworks.begin({ towerId, cause: `${name} added`, byUser: by.id });
       await this.record('sensor added', towerId, by, input);
       return showSensor(await this.find(id));
     });
@@ -72,7 +76,9 @@ export class SensorsService {
       await this.sensors.update({ name: patch.name ?? sensor.name, ...retiredAt }, { where: { id } });
       await this.changeVersion(sensor, patch);
       this.layouts.forget(towerId);
-      await this.dirty.markTower(towerId, patch.from ? instant(patch.from) : 0);
+      const t0 = patch.from ? instant(patch.from) : 0;
+      await this.dirty.markTower(towerId, t0);
+      await this.reworks.begin({ towerId, cause: sensorChangeWords(sensor, patch), byUser: by.id, t0 });
       await this.record('sensor changed', towerId, by, { id, ...patch });
       return showSensor(await this.find(id));
     });

@@ -9,6 +9,8 @@ import { invalid } from '../common/validation';
 import { DirtyStages } from '../database/dirty';
 import { Sql } from '../database/sql';
 import { UnitOfWork } from '../database/unit-of-work';
+import { ReworkService } from '../rework/rework.service';
+import { towerChangeWords } from './change-words';
 import { showTower, type TowerDto } from './dto/tower.dto';
 import type { TowerInput, TowerPatch } from './dto/tower-input.dto';
 import { SensorVersion } from './models/sensor-version.model';
@@ -31,6 +33,7 @@ export class TowersService {
     private readonly work: UnitOfWork,
     private readonly clock: Clock,
     private readonly activity: ActivityService,
+    private readonly reworks: ReworkService,
   ) {}
 
   /** Every tower with its sensors, by name. */
@@ -73,7 +76,10 @@ export class TowersService {
         throw new Problem('changed-meanwhile', 'Somebody changed this tower. Load it again, then change it.');
       }
       this.layouts.forget(id);
-      if (changesFindings(before, patch)) await this.dirty.markTower(id);
+      if (changesFindings(before, patch)) {
+        await this.dirty.markTower(id);
+        await this.reworks.begin({ towerId: id, cause: towerChangeWords(patch), byUser: by.id });
+      }
       await this.record('tower changed', id, by, patch);
       return this.get(id);
     });
