@@ -3,12 +3,14 @@ import { UnitOfWork } from '../../database/unit-of-work';
 import type { Source } from '../../towers/models/source.model';
 import { SourcePositions } from '../../towers/source-positions';
 import { CsvReader, type ReadingContext } from '../parse/csv-reader';
+import { ImportRunner } from '../importing/import-runner';
 import { decodeText } from '../parse/decode-text';
 import { HeaderError, type ParsedReadings } from '../parse/parsed-readings';
 import { linesOf } from '../parse/records';
 import { ReadingsService } from '../readings.service';
 import { newLines, type NewLines, type ReadingOn } from './new-lines';
 import { addTo, type Tally } from './tally';
+import { WholeFile } from './whole-file';
 
 /** A file to be read on. */
 export interface FileToTake extends Omit<ReadingOn, 'headerRow'> {
@@ -31,6 +33,7 @@ export class FileTaker {
   constructor(
     private readonly positions: SourcePositions,
     private readonly readings: ReadingsService,
+    private readonly imports: ImportRunner,
     private readonly work: UnitOfWork,
   ) {}
 
@@ -40,10 +43,29 @@ export class FileTaker {
     const on = { ...given, headerRow: context.mapping.headerRow };
     for (;;) {
       const found = await newLines(file, await this.positions.of(source.id, knownAs), on);
+      if (found.anew && found.more) return this.takeWhole(given, on, found.after.header, context, tally);
       if (found.lines.length > 0) await this.takeLines(given, found, read(found, context), tally);
       if (found.unfinished) tally.unfinished += 1;
       if (!found.more) return;
     }
+  }
+
+  /** A large file that is not known yet is one import, of which little is held at a time. */
+  private async takeWhole(
+    { source, origin, file, knownAs, name }: FileToTake,
+    on: ReadingOn,
+    header: string,
+    context: ReadingContext,
+    tally: Tally,
+  ): Promise<void> {
+    const whole = new WholeFile(file, on);
+    const from = { origin, name, sourceId: source.id };
+    addTo(
+      tally,
+      await this.imports.run({ towerId: source.towerId, origin: from, context, bytes: whole.bytes() }),
+    );
+    if (whole.unfinished) tally.unfinished += 1;
+    await this.positions.keep(source, knownAs, await whole.after(header));
   }
 
   private async takeLines(

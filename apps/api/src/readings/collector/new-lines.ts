@@ -17,6 +17,8 @@ export interface NewLines {
   readonly unfinished: boolean;
   /** Whether there is more to read. */
   readonly more: boolean;
+  /** Whether the file is read from its beginning. */
+  readonly anew: boolean;
 }
 
 /** How a file is read on. */
@@ -33,10 +35,13 @@ export interface ReadingOn {
 
 /** Known again by so many bytes at the beginning and at the end of what was read. */
 const KNOWN_BY_BYTES = 4096;
-const [NEWLINE, RETURN] = [0x0a, 0x0d];
+/** The byte that ends a line. */
+export const NEWLINE = 0x0a;
+const RETURN = 0x0d;
 /** Read at a time, bytes. */
 const SLICE = 1_000_000;
-const LONGEST_LINE = 8_000_000;
+/** A line that is longer is no reading, bytes. */
+export const LONGEST_LINE = 8_000_000;
 
 const bytesOf = async (file: FileHandle, from: number, length: number): Promise<Buffer> => {
   const { buffer, bytesRead } = await file.read(Buffer.alloc(length), 0, length, from);
@@ -44,7 +49,7 @@ const bytesOf = async (file: FileHandle, from: number, length: number): Promise<
 };
 
 /** Of what was read up to a position: all of it, or its beginning and its end. */
-const hashUpTo = async (file: FileHandle, position: number, whole: boolean): Promise<string> => {
+export const hashUpTo = async (file: FileHandle, position: number, whole: boolean): Promise<string> => {
   const hash = createHash('sha256');
   if (whole) {
     for (let at = 0; at < position; at += SLICE)
@@ -68,7 +73,8 @@ const sliceOf = async (file: FileHandle, from: number): Promise<Buffer> => {
   }
 };
 
-const countLines = (bytes: Buffer): number => {
+/** How many lines end in some bytes. */
+export const countLines = (bytes: Buffer): number => {
   let lines = 0;
   for (let at = bytes.indexOf(NEWLINE); at >= 0; at = bytes.indexOf(NEWLINE, at + 1)) lines += 1;
   return lines;
@@ -132,6 +138,7 @@ export async function newLines(
       after: { inode, position, rowNo: rowNo + countLines(lines), header, headSha256 },
       unfinished: isLast && position < size,
       more: !isLast,
+      anew: before === undefined,
     };
   } finally {
     await file.close();

@@ -128,6 +128,27 @@ describe("the collector of loggers' files", () => {
     expect(Date.parse((await source()).nextAt!) / 1000).toBe(begunAt + 60);
   });
 
+  it('takes a large file in as one import, then what follows in it', async () => {
+    const file = path.join(folder, 'years.csv');
+    const note = 'calm '.repeat(1000);
+    const lines = Array.from({ length: 300 }, (_, i) => line(4000 - 10 * i, -9 - i / 100, -7.123, note));
+    writeFileSync(file, `${HEADER.trim()},note\n${lines.join('\n')}\n${line(30, -9)}`);
+    await collect();
+    expect((await source()).lastResult).toBe('600 new readings, 1 unfinished line waits.');
+    appendFileSync(file, `,-7,\n${line(20, 'broken', -7.5, '')}\n`);
+    await collect();
+    expect((await source()).lastResult).toBe('3 new readings, 1 row refused.');
+    const imports = await test.sql.all(
+      `SELECT i.name, i.new_count newCount, r.row_no rowNo FROM import i LEFT JOIN refused_row r ON r.import_id = i.id
+       WHERE tower_id = $1 ORDER BY i.id`,
+      [towerId],
+    );
+    expect(imports).toEqual([
+      { name: 'years.csv', newCount: 600, rowNo: null },
+      { name: 'years.csv', newCount: 3, rowNo: 303 },
+    ]);
+  });
+
   it('goes on with the other files when one cannot be read', async () => {
     writeFileSync(path.join(folder, 'a.csv'), 'when,what\n1,2\n');
     writeFileSync(path.join(folder, 'b.csv'), `${HEADER}${line(60, -9.5, -7.7)}\n`);
