@@ -47,6 +47,8 @@ function localSettings({ dataDir, port, page, smtp, sms }) {
     LOCAL_SMTP_PORT: String(smtp),
     LOCAL_SMS_PORT: String(sms),
     LOCAL_SERVICES_URL: `http://127.0.0.1:${page}`,
+    // The local loggers serve their files over HTTP, too.
+    HTTP_SOURCE_HOSTS: [process.env.HTTP_SOURCE_HOSTS, `127.0.0.1:${page}`].filter(Boolean).join(','),
     SMS_INCOMING_URL: `${publicUrl}/api/hooks/sms/incoming`,
     ...(!ownMail && { SMTP_HOST: '127.0.0.1', SMTP_PORT: String(smtp) }),
     ...(!ownTexts && {

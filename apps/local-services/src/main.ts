@@ -1,5 +1,5 @@
 import path from 'node:path';
-import { LiveLoggers, loggersRouter } from './loggers';
+import { LiveLoggers, loggersRouter, loggerWeb, openToAll } from './loggers';
 import { startLocalServices } from './local-services';
 import { readSettings } from './settings';
 
@@ -12,9 +12,13 @@ const main = async (): Promise<void> => {
   const settings = readSettings(process.env);
   const stateFile = path.join(settings.stateDir, 'loggers.json');
   const loggers = new LiveLoggers({ loggerDir: settings.loggerDir, stateFile }, () => Date.now() / 1000);
-  const services = await startLocalServices(settings, [['/control/loggers', loggersRouter(loggers)]]);
+  const web = openToAll();
+  const services = await startLocalServices(settings, [
+    ['/control/loggers', loggersRouter(loggers, web)],
+    ['/loggers', loggerWeb(settings.loggerDir, web)],
+  ]);
   console.log(
-    `Local services: page http://127.0.0.1:${services.pagePort}, mail 127.0.0.1:${services.smtpPort}, texts http://127.0.0.1:${services.smsPort}`,
+    `Local services: page http://127.0.0.1:${services.pagePort}, mail 127.0.0.1:${services.smtpPort}, texts http://127.0.0.1:${services.smsPort}, loggers' files http://127.0.0.1:${services.pagePort}/loggers/`,
   );
   const stop = () => void Promise.all([loggers.close(), services.close()]).then(() => process.exit(0));
   process.once('SIGTERM', stop);

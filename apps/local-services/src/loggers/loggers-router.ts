@@ -1,6 +1,7 @@
 import express, { Router } from 'express';
 import { BadOrder } from '../control/orders';
 import type { LiveLoggers } from './live-loggers';
+import { orderWeb, type WebOrders } from './web-orders';
 
 /** An instant in an order: UTC epoch seconds, or ISO 8601 with an offset. */
 function instant(given: unknown, name: string): number {
@@ -10,10 +11,10 @@ function instant(given: unknown, name: string): number {
 }
 
 /**
- * Where the loggers are told what to do: POST /begin {now, anew?}, /write {until}, /skip {until}, /live {on}.
- * JSON only, so that no other site's form can reach it.
+ * Where the loggers are told what to do: POST /begin {now, anew?}, /write {until}, /skip {until}, /live {on}, and how
+ * their files are served: /web {mode, delayMs, times, auth}. JSON only, so that no other site's form can reach it.
  */
-export function loggersRouter(loggers: LiveLoggers): Router {
+export function loggersRouter(loggers: LiveLoggers, web: WebOrders): Router {
   const router = Router().use(express.json());
   router.post('/begin', async ({ body }, response) => {
     const firstStart = await loggers.begin(instant(body?.now, 'now'), body?.anew === true);
@@ -30,6 +31,10 @@ export function loggersRouter(loggers: LiveLoggers): Router {
     if (typeof body?.on !== 'boolean') throw new BadOrder('Give "on": true or false.');
     await loggers.live(body.on);
     response.json({ on: body.on });
+  });
+  router.post('/web', ({ body }, response) => {
+    if (typeof body !== 'object' || body === null) throw new BadOrder('Send the order as a JSON object.');
+    response.json(orderWeb(web, body as Record<string, unknown>));
   });
   return router;
 }

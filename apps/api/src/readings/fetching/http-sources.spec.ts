@@ -75,6 +75,7 @@ describe('sources over HTTP', () => {
     expect(server.requests[1]!.headers).toMatchObject({
       'if-none-match': '"one"',
       'if-modified-since': lastModified,
+      'cache-control': 'max-age=0',
     });
     server.answer = body(FILE + line(40, 'broken', -7.5));
     expect(await collect()).toMatchObject({ lastResult: '1 new reading, 1 row refused.', failures: 0 });

@@ -130,6 +130,8 @@ export class HttpSources implements OnModuleDestroy {
     const headers: Record<string, string> = {
       accept: 'text/csv, text/plain;q=0.9, */*;q=0.5',
       'user-agent': 'Lidwatch',
+      // Otherwise fetch asks with "no-cache", upon which many servers leave the conditions unheeded and send it all.
+      'cache-control': 'max-age=0',
     };
     if (source.etag) headers['if-none-match'] = source.etag;
     if (source.lastModified) headers['if-modified-since'] = source.lastModified;
