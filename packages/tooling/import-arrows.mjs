@@ -36,7 +36,7 @@ export const packageArrows = [
 /** The rooms of the server, floor by floor: a room imports rooms of its own floor and of the floors above it here. */
 const FLOORS = [
   ['common', 'config'],
-  ['database', 'http'],
+  ['compute', 'database', 'http'],
   ['scheduler', 'activity'],
   ['outbox'],
   ['users', 'auth'],

@@ -3,6 +3,7 @@ import { EventEmitterModule } from '@nestjs/event-emitter';
 import { ActivityModule } from './activity/activity.module';
 import { AuthModule } from './auth/auth.module';
 import { CommonModule } from './common/common.module';
+import { ComputeModule } from './compute/compute.module';
 import { ConfigModule } from './config/config.module';
 import { DatabaseModule } from './database/database.module';
 import { DeliveryModule } from './delivery/delivery.module';
@@ -34,6 +35,7 @@ import { UsersModule } from './users/users.module';
     ConfigModule,
     LoggingModule,
     CommonModule,
+    ComputeModule,
     DatabaseModule,
     EventEmitterModule.forRoot(),
     SchedulerModule,

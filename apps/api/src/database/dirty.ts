@@ -18,6 +18,13 @@ export interface DirtyRow {
   readonly gen: number;
 }
 
+/** Blocks of a tower that whoever marked them works out otherwise, if all goes well: those that end in (afterT, untilT]. */
+export interface Held {
+  readonly towerId: number;
+  readonly afterT: number;
+  readonly untilT: number;
+}
+
 /** Works out one batch of a stage, settling its rows in the transaction of its results; says how many it settled. */
 export type StageHandler = () => Promise<number>;
 
@@ -29,6 +36,10 @@ const MARK = `INSERT INTO dirty (stage, subject, t) SELECT $1, value->>0, value-
 const SETTLE = `DELETE FROM dirty WHERE (stage, subject, t) IN (
   SELECT d.stage, d.subject, d.t FROM json_each($2) j CROSS JOIN dirty d
   ON d.stage = $1 AND d.subject = j.value->>0 AND d.t = j.value->>1 AND d.gen = j.value->>2)`;
+const UNMARK = `DELETE FROM dirty WHERE stage = $1 AND subject = $2 AND t > $3 AND t <= $4 AND gen = 1`;
+const NEWEST = `SELECT subject, t, gen FROM dirty WHERE stage = $1 AND t <= $2 AND NOT EXISTS (
+  SELECT 1 FROM json_each($4) h WHERE h.value->>0 = subject AND t > h.value->>1 AND t <= h.value->>2)
+  ORDER BY t DESC LIMIT $3`;
 const MARK_TOWER = `INSERT INTO dirty (stage, subject, t)
   SELECT DISTINCT stage.value, $1, b.t_end FROM json_each('[1,2]') stage, block_mean b
   WHERE b.sensor_id IN (SELECT id FROM sensor WHERE tower_id = $1) AND b.t_end > $2 AND b.t_end <= $3
@@ -56,6 +67,8 @@ export class DirtyStages implements OnModuleDestroy {
   /** How many blocks were read last, where they were all that waited. */
   private readonly readAll = new Map<Stage, number>();
   private readonly timers = new Map<Stage, NodeJS.Timeout>();
+  /** By who holds them; kept in memory only, so that after a crash nothing is held. */
+  private readonly held = new Map<object, Held>();
   private closing = false;
 
   constructor(
@@ -73,6 +86,22 @@ export class DirtyStages implements OnModuleDestroy {
     if (blocks.length === 0) return;
     await this.sql.run(MARK, [stage, JSON.stringify(blocks)]);
     this.work.afterCommit(() => this.soon(stage));
+  }
+
+  /** Marks blocks of stage 1 in the running transaction that are held; they are worked out once they are let go. */
+  async markHeld(blocks: readonly (readonly [number, number])[]): Promise<void> {
+    if (blocks.length > 0) await this.sql.run(MARK, [1, JSON.stringify(blocks)]);
+  }
+
+  /** Takes the marks off held blocks in the running transaction, save those that somebody else has made again. */
+  async unmarkHeld({ towerId, afterT, untilT }: Held): Promise<void> {
+    await this.sql.run(UNMARK, [1, towerId, afterT, untilT]);
+  }
+
+  /** Keeps stage 1 off some blocks of a tower; a holder has one span at a time, undefined lets it go. */
+  hold(holder: object, held: Held | undefined): void {
+    if (held) this.held.set(holder, held);
+    else if (this.held.delete(holder)) this.soon(1);
   }
 
   /** Marks every block of a tower that ends in (afterT, untilT]: its settings, sensors or set spans changed. */
@@ -94,12 +123,11 @@ export class DirtyStages implements OnModuleDestroy {
     this.work.afterCommit(() => this.soon(3));
   }
 
-  /** The newest blocks of a stage that wait and end by `untilT`. */
+  /** The newest blocks of a stage that wait, are not held and end by `untilT`. */
   async newest(stage: Stage, limit: number, untilT: number): Promise<DirtyRow[]> {
-    const rows = await this.sql.all<DirtyRow>(
-      'SELECT subject, t, gen FROM dirty WHERE stage = $1 AND t <= $2 ORDER BY t DESC LIMIT $3',
-      [stage, untilT, limit],
-    );
+    const held = stage === 1 ? [...this.held.values()] : [];
+    const asked = JSON.stringify(held.map(({ towerId, afterT, untilT: until }) => [towerId, afterT, until]));
+    const rows = await this.sql.all<DirtyRow>(NEWEST, [stage, untilT, limit, asked]);
     if (rows.length < limit) this.readAll.set(stage, rows.length);
     else this.readAll.delete(stage);
     return rows;

@@ -30,12 +30,14 @@ const MEANS = `SELECT j.key,
     json_group_array(json_array(b.sensor_id, format('%!.17g', b.mean), b.n, b.quality)) means
   FROM json_each($1) j CROSS JOIN json_each(j.value->'$[0]') s CROSS JOIN block_mean b
   ON b.sensor_id = s.value AND b.t_end = j.value->>1 GROUP BY j.key`;
-const HOUR_OF_PM25 = `SELECT j.key, count(b.mean) n, avg(b.mean) mean FROM json_each($1) j CROSS JOIN block_mean b
-  ON b.sensor_id = j.value->>0 AND b.t_end > (j.value->>1) - 3600 AND b.t_end <= j.value->>1 GROUP BY j.key`;
+const HOUR_OF_PM25 = `SELECT j.key, group_concat(format('%!.17g', b.mean) ORDER BY b.t_end) means
+  FROM json_each($1) j CROSS JOIN block_mean b ON b.sensor_id = j.value->>0 AND b.t_end > (j.value->>1) - 3600
+  AND b.t_end <= j.value->>1 AND b.mean IS NOT NULL GROUP BY j.key`;
 const KEEP_PAST = `INSERT INTO profile_past (tower_id, t_end, rev, until_at, body)
   SELECT p.tower_id, p.t_end, p.rev, $2, json_object(${body})
   FROM (SELECT ${given} FROM json_each($1)) n CROSS JOIN profile p ON p.tower_id = n.tower_id AND p.t_end = n.t_end
   WHERE ${differs('p', 'n')}`;
+const ADD = `INSERT INTO profile (${columns}, rev) SELECT ${given}, 1 FROM json_each($1)`;
 const WRITE = `WITH j AS (SELECT value FROM json_each($1)) INSERT INTO profile AS p (${columns}, rev)
   SELECT ${given}, 1 FROM j WHERE true
   ON CONFLICT DO UPDATE SET ${content.map((c) => `${c} = excluded.${c}`).join(', ')}, rev = p.rev + 1
@@ -57,20 +59,23 @@ export class ProfileStore {
     }));
   }
 
-  /** The mean of the hour that ends with each block, and how many blocks it holds, in the order asked. */
-  async hours(
-    blocks: readonly { sensorId: number; tEnd: number }[],
-  ): Promise<{ n: number; mean: number | null }[]> {
+  /** The means of the blocks of the hour that ends with each block, in the order asked. */
+  async hours(blocks: readonly { sensorId: number; tEnd: number }[]): Promise<number[][]> {
     if (blocks.length === 0) return [];
     const asked = JSON.stringify(blocks.map(({ sensorId, tEnd }) => [sensorId, tEnd]));
-    const rows = await this.sql.all<{ key: number; n: number; mean: number | null }>(HOUR_OF_PM25, [asked]);
-    const found = new Map(rows.map((row) => [row.key, row]));
-    return blocks.map((_, key) => found.get(key) ?? { n: 0, mean: null });
+    const rows = await this.sql.all<{ key: number; means: string }>(HOUR_OF_PM25, [asked]);
+    const found = new Map(rows.map(({ key, means }) => [key, JSON.parse(`[${means}]`) as number[]]));
+    return blocks.map((_, key) => found.get(key) ?? []);
   }
 
   /** Keeps, within the caller's transaction, what these profiles are about to replace. */
   async keepPast(rows: readonly ReturnType<typeof profileRow>[], now: number): Promise<void> {
     if (rows.length > 0) await this.sql.run(KEEP_PAST, [JSON.stringify(rows), now]);
+  }
+
+  /** Writes profiles, given as JSON rows, of blocks that had none, within the caller's transaction. */
+  async addRows(rows: string): Promise<void> {
+    await this.sql.run(ADD, [rows]);
   }
 
   /** Writes profiles within the caller's transaction; gives those that are new or differ. */

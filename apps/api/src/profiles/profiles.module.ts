@@ -13,6 +13,6 @@ import { ProfilesStage } from './profiles.stage';
   imports: [TowersModule, SchedulerModule],
   controllers: [ProfilesController],
   providers: [ProfileStore, Hours, ProfilesStage, ProfilesService, PipelineService],
-  exports: [ProfilesService, PipelineService],
+  exports: [Hours, PipelineService, ProfileStore, ProfilesService],
 })
 export class ProfilesModule {}

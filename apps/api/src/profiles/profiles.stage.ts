@@ -6,6 +6,8 @@ import { expectedReadings, type TowerLayout } from '../towers/tower-layout';
 import { TowerLayouts } from '../towers/tower-layouts';
 import { blockFacts, type KeptMean } from './block-facts';
 import { findingsOf } from './findings';
+import { graceS } from './grace';
+import { hourMean, pm25SensorOf } from './hour-mean';
 import { Hours } from './hours';
 import { profileRow } from './profile-row';
 import { ProfileStore, type MeansOfBlock } from './profile-store';
@@ -14,8 +16,6 @@ import { ProfileStore, type MeansOfBlock } from './profile-store';
 const BATCH = 500;
 /** Blocks worked out before other requests get their turn. */
 const AT_ONCE = 100;
-const HOUR_S = 3600;
-const LEAST_GRACE_S = 120;
 
 interface Waiting extends MeansOfBlock {
   readonly row: DirtyRow;
@@ -28,9 +28,6 @@ interface Made extends Waiting {
 }
 
 const pause = (): Promise<void> => new Promise((resolve) => setImmediate(resolve));
-
-/** How long after a block's end late readings are waited for, s, before the block counts as closed. */
-export const graceS = (intervalS: number): number => Math.max(LEAST_GRACE_S, intervalS / 2);
 
 /** Stage 2: makes a profile of every closed block whose means changed, and rolls its hour up. */
 @Injectable()
@@ -109,17 +106,12 @@ export class ProfilesStage implements OnModuleInit {
   /** The PM2.5 mean of the hour that ends with each block, where its tower measures it and 75 % is there. */
   private async pm25Hours(closed: readonly Waiting[]): Promise<(number | undefined)[]> {
     const asked = closed.flatMap(({ row, tower }, at) => {
-      const sensor = tower.sensors.find(
-        ({ quantity, retiredAt }) => quantity === 'pm2.5' && retiredAt === null,
-      );
-      return sensor ? [{ at, sensorId: sensor.id, tEnd: row.t, expected: HOUR_S / tower.blockS }] : [];
+      const sensor = pm25SensorOf(tower);
+      return sensor ? [{ at, tower, sensorId: sensor.id, tEnd: row.t }] : [];
     });
     const found = await this.store.hours(asked);
     const hours: (number | undefined)[] = [];
-    found.forEach(({ n, mean }, i) => {
-      const { at, expected } = asked[i]!;
-      if (mean !== null && n >= 0.75 * expected) hours[at] = mean;
-    });
+    found.forEach((means, i) => (hours[asked[i]!.at] = hourMean(means, asked[i]!.tower.blockS)));
     return hours;
   }
 }

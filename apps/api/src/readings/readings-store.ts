@@ -1,4 +1,5 @@
 import { Injectable } from '@nestjs/common';
+import { exactSql, millionths } from '../common/exact-decimal';
 import { Sql } from '../database/sql';
 import type { ParsedReading } from './parse/parsed-readings';
 
@@ -14,10 +15,10 @@ export interface InForce {
 const IN_FORCE = `SELECT r.sensor_id sensorId, r.t_end tEnd, r.value, r.import_id importId, r.row_no rowNo
   FROM json_each($1) j CROSS JOIN reading r ON r.sensor_id = j.value->>0 AND r.t_end = j.value->>1`;
 const WRITE = `INSERT INTO reading (sensor_id, t_end, value, import_id, row_no)
-  SELECT value->>0, value->>1, CAST(value->>2 AS REAL), $2, value->>3 FROM json_each($1) WHERE true
+  SELECT value->>0, value->>1, ${exactSql(1e6, 2, 4)}, $2, value->>3 FROM json_each($1) WHERE true
   ON CONFLICT DO UPDATE SET value = excluded.value, import_id = excluded.import_id, row_no = excluded.row_no`;
 const KEEP_PAST = `INSERT INTO reading_past (sensor_id, t_end, until_at, value, import_id, row_no)
-  SELECT value->>0, value->>1, $2, CAST(value->>2 AS REAL), value->>3, value->>4 FROM json_each($1)`;
+  SELECT value->>0, value->>1, $2, ${exactSql(1e6, 2, 5)}, value->>3, value->>4 FROM json_each($1)`;
 /** The statements that put readings into the store; each within the caller's transaction. */
 @Injectable()
 export class ReadingsStore {
@@ -31,7 +32,13 @@ export class ReadingsStore {
   /** Puts values in force. */
   async write(rows: readonly ParsedReading[], importId: number): Promise<void> {
     if (rows.length === 0) return;
-    const values = rows.map(({ sensorId, tEnd, value, rowNo }) => [sensorId, tEnd, value, rowNo]);
+    const values = rows.map(({ sensorId, tEnd, value, rowNo }) => [
+      sensorId,
+      tEnd,
+      millionths(value),
+      rowNo,
+      value,
+    ]);
     await this.sql.run(WRITE, [JSON.stringify(values), importId]);
   }
 
@@ -43,8 +50,8 @@ export class ReadingsStore {
   ): Promise<void> {
     if (past.length === 0) return;
     const values = past.map((was) => [
-      ...[was.sensorId, was.tEnd, was.value],
-      ...['importId' in was ? was.importId : importId, was.rowNo],
+      ...[was.sensorId, was.tEnd, millionths(was.value)],
+      ...['importId' in was ? was.importId : importId, was.rowNo, was.value],
     ]);
     await this.sql.run(KEEP_PAST, [JSON.stringify(values), untilAt]);
   }

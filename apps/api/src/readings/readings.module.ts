@@ -1,10 +1,13 @@
 import { Module } from '@nestjs/common';
+import { ProfilesModule } from '../profiles/profiles.module';
 import { SchedulerModule } from '../scheduler/scheduler.module';
+import { ScreeningModule } from '../screening/screening.module';
 import { TowersModule } from '../towers/towers.module';
 import { CollectController } from './collector/collect.controller';
 import { FileTaker } from './collector/file-taker';
 import { FolderSources } from './collector/folder-sources';
 import { ReadingsCollector } from './collector/readings-collector';
+import { FreshWriter } from './importing/fresh/fresh-writer';
 import { ImportRunner } from './importing/import-runner';
 import { ImportStore } from './importing/import-store';
 import { ReadingTaker } from './importing/reading-taker';
@@ -23,12 +26,13 @@ import { WithdrawalsService } from './withdrawals.service';
 
 /** Every way in for readings. */
 @Module({
-  imports: [TowersModule, SchedulerModule],
+  imports: [ProfilesModule, ScreeningModule, TowersModule, SchedulerModule],
   controllers: [CollectController, IngestController, ImportsController],
   providers: [
     ReadingsStore,
     ImportStore,
     ReadingTaker,
+    FreshWriter,
     ImportRunner,
     ReadingsService,
     ReadingContexts,

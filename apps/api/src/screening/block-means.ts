@@ -1,5 +1,6 @@
 import { isEnough, isKnown, meanDirectionDeg } from '@lidwatch/atmosphere';
 import { checkBits, qualityCodes } from '@lidwatch/contracts';
+import { atBillionth } from '../common/exact-decimal';
 import { expectedReadings, versionAt, type LayoutSensor, type TowerLayout } from '../towers/tower-layout';
 import { firstAfter, type Flags, type Series } from './series';
 
@@ -16,7 +17,7 @@ export interface BlockMean {
 }
 
 /** Mean that does not overflow, whatever the size of the values. */
-const plainMean = (values: readonly number[]): number =>
+export const plainMean = (values: readonly number[]): number =>
   values.reduce((mean, value, i) => mean + value / (i + 1) - mean / (i + 1), 0);
 
 const directionOf = (degrees: readonly number[]): number => {
@@ -34,7 +35,7 @@ const usedAs = (quality: number, checks: number, reportOnly: boolean): number =>
 /**
  * The mean of one sensor over the block that ends at `tEnd`: readings in (start, end] that have not failed, each
  * corrected by the version that measured it; directions are averaged as vectors. Valid with 75 % of the expected
- * readings, or 2 of 3 (EPA-454/R-99-005 §6). Undefined where the sensor has no reading.
+ * readings, or 2 of 3 (EPA-454/R-99-005 §6); at the nearest 10⁻⁹, which the store keeps exactly. Undefined where the sensor has no reading.
  */
 export function blockMean(
   tower: TowerLayout,
@@ -62,5 +63,5 @@ export function blockMean(
   if (!isEnough(n, expectedReadings(tower)) || !Number.isFinite(mean)) {
     return { sensorId, tEnd, mean: null, n, quality: qualityCodes.missing };
   }
-  return { sensorId, tEnd, mean, n, quality: worst };
+  return { sensorId, tEnd, mean: atBillionth(mean), n, quality: worst };
 }

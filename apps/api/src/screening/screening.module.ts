@@ -26,5 +26,6 @@ import { TowerZones } from './tower-zones';
     RawService,
     TowerZones,
   ],
+  exports: [ScreeningStore],
 })
 export class ScreeningModule {}

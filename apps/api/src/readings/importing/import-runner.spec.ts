@@ -33,7 +33,7 @@ describe('the import of a whole file', () => {
   async function run(text: string, more: Partial<ImportJob> = {}): Promise<Imported> {
     const context = await test.app.get(ReadingContexts, { strict: false }).of(mast.towerId, DEFAULT_MAPPING);
     return test.app.get(ImportRunner, { strict: false }).run({
-      ...{ towerId: mast.towerId, context, bytes: pieces(text) },
+      ...{ towerId: mast.towerId, context, bytes: pieces(text), pieceBytes: 20_000 },
       origin: { origin: 'upload', name: 'mast.csv', sha256: 'ab'.repeat(32) },
       ...more,
     });
@@ -97,7 +97,7 @@ describe('the import of a whole file', () => {
     const count = 'SELECT count(*) n FROM import WHERE tower_id = $1';
     expect(await test.sql.get(count, [mast.towerId])).toEqual({ n: 0 });
     async function* broken(): AsyncGenerator<Buffer> {
-      yield* pieces(fileOf(500));
+      yield* pieces(fileOf(2_000));
       throw new Error('the disk is gone');
     }
     await expect(run('', { bytes: broken() })).rejects.toThrow('the disk is gone');

@@ -1,16 +1,20 @@
 import { Injectable, type OnApplicationBootstrap, type OnModuleDestroy } from '@nestjs/common';
 import { Clock } from '../../common/clock';
 import { Problem } from '../../common/problem';
+import { ComputePool } from '../../compute/compute-pool';
 import type { Lane } from '../../database/gate';
 import { UnitOfWork } from '../../database/unit-of-work';
 import type { TowerLayout } from '../../towers/tower-layout';
 import { TowerLayouts } from '../../towers/tower-layouts';
-import { CsvReader, type ReadingContext } from '../parse/csv-reader';
-import { HeaderError } from '../parse/parsed-readings';
+import type { ReadingContext } from '../parse/csv-reader';
 import { refuseRetired } from '../refuse-strangers';
+import { FileInThread } from './file-in-thread';
+import { rowsOf, type HowToRead, type PieceRead } from './file-reading';
+import type { Fresh } from './fresh/fresh';
+import { FreshWriter } from './fresh/fresh-writer';
 import { ImportStore } from './import-store';
-import { LineCutter, type Lines } from './lines';
 import { NOTHING_COUNTED, sumOf, type Counts, type Ingested, type Origin } from './origin';
+import { piecesOf } from './pieces';
 import { CHUNK_ROWS, ReadingTaker, type TakenRows } from './reading-taker';
 
 /** A whole file to be imported. */
@@ -24,6 +28,8 @@ export interface ImportJob {
   /** Asked between transactions; what was taken until then is kept. */
   readonly isCancelled?: () => boolean;
   readonly lane?: Lane;
+  /** Bytes that are read, worked out and written in one go; 128 KB unless set. */
+  readonly pieceBytes?: number;
 }
 
 /** What importing a file gave. */
@@ -39,6 +45,8 @@ interface Running {
   /** Begun with the first rows, so that a file without a usable header leaves nothing. */
   importId: number | undefined;
   counts: Counts;
+  /** How further rows are treated. */
+  how: HowToRead;
 }
 
 /** Imports whole files of any size with little memory: one import for the file, many short transactions. */
@@ -49,7 +57,9 @@ export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
 
   constructor(
     private readonly taker: ReadingTaker,
+    private readonly fresh: FreshWriter,
     private readonly imports: ImportStore,
+    private readonly pool: ComputePool,
     private readonly layouts: TowerLayouts,
     private readonly work: UnitOfWork,
     private readonly clock: Clock,
@@ -84,7 +94,13 @@ export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
   private async runNow(job: ImportJob): Promise<Imported> {
     const layout = await this.layouts.of(job.towerId);
     refuseRetired(layout);
-    const running: Running = { job, layout, importId: undefined, counts: NOTHING_COUNTED };
+    const running: Running = {
+      job,
+      layout,
+      importId: undefined,
+      counts: NOTHING_COUNTED,
+      how: { direct: true, passedUntil: 0 },
+    };
     try {
       return await this.readAll(running);
     } catch (error) {
@@ -95,31 +111,75 @@ export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
   }
 
   private async readAll(running: Running): Promise<Imported> {
-    const { job } = running;
-    const [cutter, reader] = [new LineCutter(), new CsvReader(job.context)];
+    const { job, layout } = running;
+    const file = new FileInThread(this.pool, { context: job.context, tower: layout });
     const ignoredColumns: string[] = [];
-    let [bytesDone, cancelled] = [0, false];
-    const take = async (lines: Lines): Promise<void> => {
-      reader.readLines(lines.lines, lines.firstRowNo);
-      const { rows, refused, ignoredColumns: ignored } = reader.take();
-      ignoredColumns.push(...ignored);
-      await this.take(running, { rows, refused: [...lines.refused, ...refused] });
-    };
-    for await (const piece of job.bytes) {
-      this.refuseWhenClosing();
-      if ((cancelled = job.isCancelled?.() ?? false)) break;
-      await take(cutter.push(piece));
-      job.onProgress?.((bytesDone += piece.length));
+    let bytesDone = 0;
+    try {
+      for await (const { read, bytes } of file.pieces(
+        piecesOf(job.bytes, job.pieceBytes),
+        () => running.how,
+      )) {
+        this.refuseWhenClosing();
+        if (job.isCancelled?.()) return await this.end(running, 'cancelled', ignoredColumns);
+        ignoredColumns.push(...read.ignoredColumns);
+        await this.take(running, read);
+        job.onProgress?.((bytesDone += bytes));
+      }
+      return await this.end(running, 'done', ignoredColumns);
+    } finally {
+      await file.close();
+      this.fresh.letGo(running);
     }
-    if (!cancelled) await take(cutter.end());
-    if (!cancelled && !reader.hasHeader)
-      throw new HeaderError('The file has no header line; send the column names first.');
-    running.importId ??= await this.begin(running);
-    await this.imports.end(running.importId, cancelled ? 'cancelled' : 'done');
-    return { importId: running.importId, ...running.counts, cancelled, ignoredColumns };
   }
 
-  private async take(running: Running, { rows, refused }: TakenRows): Promise<void> {
+  private async end(
+    running: Running,
+    state: 'done' | 'cancelled',
+    ignoredColumns: string[],
+  ): Promise<Imported> {
+    running.importId ??= await this.begin(running);
+    await this.imports.end(running.importId, state);
+    return {
+      importId: running.importId,
+      ...running.counts,
+      cancelled: state === 'cancelled',
+      ignoredColumns,
+    };
+  }
+
+  /** Writes a piece worked out where nothing else lies near it, else row by row. */
+  private async take(running: Running, read: PieceRead): Promise<void> {
+    const { fresh, refused } = read;
+    const { passedUntil } = running.how;
+    if (fresh && fresh.epoch > passedUntil && (await this.takeFresh(running, read, fresh))) return;
+    const rows = rowsOf(read.rows);
+    if (rows.length === 0) return this.takeRows(running, { rows, refused });
+    this.fresh.letGo(running);
+    const before = running.counts.new;
+    await this.takeRows(running, { rows, refused });
+    running.how = {
+      direct: running.counts.new - before === rows.length,
+      passedUntil: Math.max(passedUntil, fresh?.epoch ?? 0),
+    };
+  }
+
+  private async takeFresh(running: Running, read: PieceRead, fresh: Fresh): Promise<boolean> {
+    const { job, layout } = running;
+    return this.work.run(async () => {
+      if ((await this.layouts.of(job.towerId)) !== layout) return false;
+      const importId = running.importId ?? (await this.begin(running));
+      if (!(await this.fresh.isAlone(layout, importId, fresh))) return false;
+      await this.fresh.write(layout, importId, fresh, running);
+      const taken = { ...NOTHING_COUNTED, new: read.rows.tEnd.length, refused: read.refused.length };
+      await this.taker.keep(importId, read.rows, read.refused, taken, running.counts.refused);
+      running.importId = importId;
+      running.counts = sumOf(running.counts, taken);
+      return true;
+    }, job.lane ?? 'bulk');
+  }
+
+  private async takeRows(running: Running, { rows, refused }: TakenRows): Promise<void> {
     const { layout, job } = running;
     for (let at = 0; at < Math.max(rows.length, refused.length); at += CHUNK_ROWS) {
       const chunk = { rows: rows.slice(at, at + CHUNK_ROWS), refused: refused.slice(at, at + CHUNK_ROWS) };

@@ -63,13 +63,13 @@ describe('lines of a file that comes in pieces', () => {
     const before = process.memoryUsage().arrayBuffers;
     const found = [cutter.push(Buffer.from(`time,t2${lineEnd}1,2${lineEnd}`))];
     const piece = Buffer.alloc(65_536, 'x');
-    for (let i = 0; i < 2_000; i += 1) found.push(cutter.push(piece));
+    for (let i = 0; i < 1_000; i += 1) found.push(cutter.push(piece));
     expect(process.memoryUsage().arrayBuffers - before).toBeLessThan(30_000_000);
     for (const text of [`y${lineEnd}`, `4,5${lineEnd}`]) found.push(cutter.push(Buffer.from(text)));
     found.push(cutter.end());
     const refused = found.flatMap((each) => each.refused);
     expect(refused.map(({ rowNo, code }) => [rowNo, code])).toEqual([[3, 'line-too-long']]);
-    expect(refused[0]!.text).toContain(String(2_000 * 65_536 + 1));
+    expect(refused[0]!.text).toContain(String(1_000 * 65_536 + 1));
     expect(found.flatMap(({ lines }) => lines)).toEqual(['time,t2', '1,2', '', '4,5']);
   });
 

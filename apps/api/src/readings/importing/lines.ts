@@ -82,7 +82,8 @@ export class LineCutter {
 
   /** What follows the line at hand, of which only the beginning is held. */
   private afterLongLine(piece: Buffer): Buffer {
-    const end = piece.findIndex((byte) => byte === LF || byte === CR);
+    const ends = [piece.indexOf(LF), piece.indexOf(CR)].filter((at) => at >= 0);
+    const end = ends.length === 0 ? -1 : Math.min(...ends);
     this.letGo += end < 0 ? piece.length : end;
     return end < 0 ? NOTHING : piece.subarray(end);
   }
@@ -128,6 +129,6 @@ const tooLong = (rowNo: number, length: number, line: string): RefusedRow => {
 
 const notText = (rowNo: number, line: string): RefusedRow => {
   const why = 'the line is not UTF-8 text; save the file as UTF-8, or correct the line, and send it again.';
-  const shown = line.replaceAll(/[\u0000-\u001f\u007f-\u00ff]/g, '·');
+  const shown = line.replaceAll(/[^\x20-\x7e]/g, '·');
   return refusedRow(rowNo, undefined, { code: 'line-not-text', why }, shown);
 };

@@ -5,6 +5,7 @@ import { blockEndOf, type TowerLayout } from '../../towers/tower-layout';
 import type { ParsedReading } from '../parse/parsed-readings';
 import { ReadingsStore } from '../readings-store';
 import type { RefusedRow } from '../refusal';
+import { columnsOf, type ReadingColumns } from './file-reading';
 import { ImportStore, type SensorSpan } from './import-store';
 import type { Counts } from './origin';
 import { sortRows } from './sort-rows';
@@ -43,9 +44,7 @@ export class ReadingTaker {
   ): Promise<Counts> {
     const { write, past, counts } = sortRows(rows, await this.store.inForce(rows));
     const taken = { ...counts, refused: refused.length };
-    await this.imports.count(importId, taken);
-    await this.imports.widen(importId, spansOf(rows));
-    await this.imports.refuse(keptOf(refused, refusedBefore), importId);
+    await this.keep(importId, columnsOf(rows), refused, taken, refusedBefore);
     await this.store.write(write, importId);
     await this.store.keepPast(past, importId, this.clock.now());
     const blocks = new Set(write.map((row) => blockEndOf(row.tEnd, layout.blockS)));
@@ -55,15 +54,29 @@ export class ReadingTaker {
     );
     return taken;
   }
+
+  /** Keeps what is said of an import about some of its rows: counts, spans and refused rows. */
+  async keep(
+    importId: number,
+    rows: Pick<ReadingColumns, 'sensorId' | 'tEnd'>,
+    refused: readonly RefusedRow[],
+    taken: Counts,
+    refusedBefore: number,
+  ): Promise<void> {
+    await this.imports.count(importId, taken);
+    await this.imports.widen(importId, spansOf(rows));
+    await this.imports.refuse(keptOf(refused, refusedBefore), importId);
+  }
 }
 
-const spansOf = (rows: readonly ParsedReading[]): SensorSpan[] => {
+const spansOf = ({ sensorId, tEnd }: Pick<ReadingColumns, 'sensorId' | 'tEnd'>): SensorSpan[] => {
   const spans = new Map<number, { sensorId: number; t0: number; t1: number }>();
-  for (const { sensorId, tEnd } of rows) {
-    const span = spans.get(sensorId);
-    if (!span) spans.set(sensorId, { sensorId, t0: tEnd, t1: tEnd });
-    else if (tEnd < span.t0) span.t0 = tEnd;
-    else if (tEnd > span.t1) span.t1 = tEnd;
+  for (let i = 0; i < tEnd.length; i += 1) {
+    const [id, t] = [sensorId[i]!, tEnd[i]!];
+    const span = spans.get(id);
+    if (!span) spans.set(id, { sensorId: id, t0: t, t1: t });
+    else if (t < span.t0) span.t0 = t;
+    else if (t > span.t1) span.t1 = t;
   }
   return [...spans.values()];
 };

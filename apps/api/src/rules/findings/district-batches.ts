@@ -2,7 +2,7 @@ import { isFresh, notKnown } from '@lidwatch/atmosphere';
 import { Injectable } from '@nestjs/common';
 import { groupBy } from '../../common/group-by';
 import type { DirtyRow } from '../../database/dirty';
-import { graceS } from '../../profiles/profiles.stage';
+import { graceS } from '../../profiles/grace';
 import { blockAt, newestValidEnd } from './answering';
 import { districtBlock, REACH_S, type DistrictBlock, type DistrictSources } from './district-block';
 import { towerIdsOf, type DistrictPlan } from './district-plan';
