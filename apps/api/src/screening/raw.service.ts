@@ -31,18 +31,20 @@ interface Counted {
   readonly failed: number;
 }
 
+const OF_SENSOR = 'sensor_id = $sensor AND t_end > $t0 AND t_end <= $t1';
 const COUNT = `SELECT count(*) readings, count(*) FILTER (WHERE checks <> 0) flagged,
-    count(*) FILTER (WHERE quality = 1) suspect, count(*) FILTER (WHERE quality = 2) failed FROM reading
-  WHERE sensor_id = $sensor AND t_end > $t0 AND t_end <= $t1`;
-const ALL = `SELECT t_end t, value, quality, checks FROM reading
-  WHERE sensor_id = $sensor AND t_end > $t0 AND t_end <= $t1 ORDER BY t_end`;
-/* Of each part of the time the lowest and the highest, apart for what is flagged, and all of that where it is few. */
-const THINNED = `SELECT t, value, quality, checks FROM (
-    SELECT t_end t, value, quality, checks,
-      row_number() OVER (PARTITION BY (t_end - $t0 - 1) / $part, checks <> 0 ORDER BY value, t_end) lowest,
-      row_number() OVER (PARTITION BY (t_end - $t0 - 1) / $part, checks <> 0 ORDER BY value DESC, t_end) highest
-    FROM reading WHERE sensor_id = $sensor AND t_end > $t0 AND t_end <= $t1)
-  WHERE lowest = 1 OR highest = 1 OR (checks <> 0 AND $keep) ORDER BY t`;
+    count(*) FILTER (WHERE quality = 1) suspect, count(*) FILTER (WHERE quality = 2) failed
+  FROM reading WHERE ${OF_SENSOR}`;
+const ALL = `SELECT t_end t, value, quality, checks FROM reading WHERE ${OF_SENSOR} ORDER BY t_end`;
+/*
+ * Of each part of the time the lowest and the highest, apart for what is flagged, and all of that where it is few. The
+ * columns beside min() and max() are those of the row they come from.
+ */
+const EXTREMES = (which: 'min' | 'max'): string => `SELECT t_end t, ${which}(value) value, quality, checks
+  FROM reading WHERE ${OF_SENSOR} GROUP BY (t_end - $t0 - 1) / $part, checks <> 0`;
+const THINNED = `${EXTREMES('min')} UNION ${EXTREMES('max')}
+  UNION SELECT t_end t, value, quality, checks FROM reading INDEXED BY reading_flagged
+    WHERE $keep AND ${OF_SENSOR} AND checks <> 0 ORDER BY t`;
 
 /** Readings as they came, for a chart. */
 @Injectable()
