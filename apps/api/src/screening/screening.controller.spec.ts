@@ -7,6 +7,7 @@ import { SetClock } from '../common/clock';
 import type { TowerCalendarDto } from './dto/calendar.dto';
 import type { FlaggedSpanPage } from './dto/flags.dto';
 import type { RawReadingsDto } from './dto/raw.dto';
+import type { ReadingDetailDto } from './dto/reading-detail.dto';
 
 const INTERVAL_S = 600;
 const DAY_S = 86_400;
@@ -174,6 +175,15 @@ describe('what screening saw', () => {
         quality: 'valid',
         checks: ['override', 'stuck'],
       });
+      const one = await get<ReadingDetailDto>(`/api/towers/${tower.towerId}/reading`, {
+        ...{ sensorId, t: raw.sensors[0]!.points[30]!.t },
+      });
+      expect(one).toMatchObject({
+        ...{ sensorName: 'temperature_30m', value: -4.2, corrected: -4.2, quality: 'valid', earlier: [] },
+        checks: [{ check: 'stuck', says: 'The very same value for 3 h or more while another level moved' }],
+        word: { quality: 'valid', by: analyst.name, reason: 'freezing fog, seen by camera' },
+        from: { name: 'test', origin: 'push', rowNo: 30 },
+      });
       expect(raw.sensors[0]!.points[0]).toEqual({
         t: expect.any(String),
         value: expect.any(Number),
@@ -205,6 +215,24 @@ describe('what screening saw', () => {
     expect(series!.points.filter(({ checks }) => checks)).toHaveLength(250);
     expect(Math.max(...series!.points.map(({ value }) => value))).toBeGreaterThanOrEqual(500);
     expect(series!.points.map(({ t }) => t)).toEqual(series!.points.map(({ t }) => t).sort());
+  });
+
+  it('keeps what a reading was before', async () => {
+    const { towerId, sensorIds } = await makeTower(test, { heightsM: [2] });
+    const [sensorId] = sensorIds as [number];
+    const readings = test.app.get(ReadingsService, { strict: false });
+    for (const [rowNo, value] of [-4, -5].entries())
+      await readings.ingest(towerId, [{ sensorId, tEnd: MIDNIGHT, value, rowNo }], {
+        ...{ origin: 'push', name: `file ${rowNo}` },
+      });
+    const query = { sensorId, t: iso(MIDNIGHT) };
+    expect(await get<ReadingDetailDto>(`/api/towers/${towerId}/reading`, query)).toMatchObject({
+      ...{ value: -5, from: { name: 'file 1' }, earlier: [{ value: -4, from: { name: 'file 0' } }] },
+    });
+    await analyst.http
+      .get(`/api/towers/${towerId}/reading`)
+      .query({ sensorId, t: iso(MIDNIGHT + 1) })
+      .expect(404);
   });
 
   it.each([

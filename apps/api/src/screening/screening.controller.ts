@@ -5,9 +5,11 @@ import { CalendarService } from './calendar.service';
 import { TowerCalendarDto } from './dto/calendar.dto';
 import { FlaggedSpanPage } from './dto/flags.dto';
 import { RawReadingsDto } from './dto/raw.dto';
+import { ReadingDetailDto, ReadingQuery } from './dto/reading-detail.dto';
 import { CalendarQuery, FlagsQuery, RawQuery } from './dto/seen-query.dto';
 import { FlagsService } from './flags.service';
 import { RawService } from './raw.service';
+import { ReadingDetailService } from './reading-detail.service';
 
 /** What screening saw in a tower's readings, for staff. */
 @ApiTags('readings')
@@ -18,6 +20,7 @@ export class ScreeningController {
     private readonly calendars: CalendarService,
     private readonly flags: FlagsService,
     private readonly raw: RawService,
+    private readonly details: ReadingDetailService,
   ) {}
 
   /** Says how complete the readings of each day are, sensor by sensor; at most 400 days. */
@@ -39,5 +42,12 @@ export class ScreeningController {
   @ApiOkResponse({ type: RawReadingsDto })
   readings(@Param('id', ParseIntPipe) id: number, @Query() query: RawQuery): Promise<RawReadingsDto> {
     return this.raw.of(id, query);
+  }
+
+  /** Shows one reading with the file and row it came from, what was said of it and what it was before. */
+  @Get('reading')
+  @ApiOkResponse({ type: ReadingDetailDto })
+  reading(@Param('id', ParseIntPipe) id: number, @Query() query: ReadingQuery): Promise<ReadingDetailDto> {
+    return this.details.of(id, query);
   }
 }

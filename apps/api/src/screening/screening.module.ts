@@ -6,6 +6,7 @@ import { FlagsService } from './flags.service';
 import { OverridesController } from './overrides.controller';
 import { OverridesService } from './overrides.service';
 import { RawService } from './raw.service';
+import { ReadingDetailService } from './reading-detail.service';
 import { ReadingWindows } from './reading-windows';
 import { ScreeningController } from './screening.controller';
 import { ScreeningStage } from './screening.stage';
@@ -24,6 +25,7 @@ import { TowerZones } from './tower-zones';
     CalendarService,
     FlagsService,
     RawService,
+    ReadingDetailService,
     TowerZones,
   ],
   exports: [ScreeningStore],

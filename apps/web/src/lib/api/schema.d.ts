@@ -480,6 +480,150 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/towers/{id}/profile': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Profiles.latest'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/profiles': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Profiles.range'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/pipeline': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Profiles.state'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/overrides': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Overrides.list'];
+    put?: never;
+    post: operations['Overrides.set'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/overrides/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete: operations['Overrides.undo'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/calendar': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Screening.calendar'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/flags': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Screening.flagged'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/raw': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Screening.readings'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/towers/{id}/reading': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Screening.reading'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/uploads': {
     parameters: {
       query?: never;
@@ -570,134 +714,6 @@ export interface paths {
     get?: never;
     put?: never;
     post: operations['Uploads.cancel'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/overrides': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Overrides.list'];
-    put?: never;
-    post: operations['Overrides.set'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/overrides/{id}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get?: never;
-    put?: never;
-    post?: never;
-    delete: operations['Overrides.undo'];
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/towers/{id}/calendar': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Screening.calendar'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/towers/{id}/flags': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Screening.flagged'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/towers/{id}/raw': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Screening.readings'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/towers/{id}/profile': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Profiles.latest'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/towers/{id}/profiles': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Profiles.range'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/towers/{id}/pipeline': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get: operations['Profiles.state'];
-    put?: never;
-    post?: never;
     delete?: never;
     options?: never;
     head?: never;
@@ -1816,110 +1832,99 @@ export interface components {
     WithdrawInput: {
       reason: string;
     };
-    SameImport: {
-      importId: number;
-      receivedAt: string;
+    ProfileLevel: {
+      heightM: number;
+      temperatureC: number | null;
+      sigmaC: number;
+      /** @description Readings in the mean */
+      n: number;
+      /** @enum {string} */
+      quality: 'valid' | 'suspect' | 'failed' | 'missing';
     };
-    Upload: {
-      id: number;
+    ProfileLayer: {
+      lowerM: number;
+      upperM: number;
+      /** @description −dT/dz: positive where it cools upward */
+      lapseRateKPerKm: number | null;
+      sigmaKPerKm: number | null;
+      textbookClass: string | null;
+      probabilityTRises: number | null;
+      /** @description Moist-adiabatic rate at its temperature and pressure */
+      moistLapseRateKPerKm: number | null;
+      superadiabatic: boolean | null;
+      autoconvective: boolean | null;
+    };
+    RangeValue: {
+      exactly?: number;
+      atLeast?: number;
+      atMost?: number;
+      between?: number[];
+      /** @description The reason, in plain words */
+      notKnown?: string;
+    };
+    SurfaceInversion: {
+      baseM: number;
+      /** @description The lowest level at which its top can lie */
+      topM: number;
+      depthM: components['schemas']['RangeValue'];
+      strengthC: components['schemas']['RangeValue'];
+      strengthWithinTowerC: number;
+      sigmaC: number | null;
+      /** @description P(strength > 0) */
+      probability: number | null;
+      gradientCPer100m: number;
+      /** @enum {string} */
+      open: 'no' | 'at the top' | 'cut by a missing level';
+      /** @description A missing level lies just below */
+      baseAtOrBelow: boolean;
+      sure: boolean;
+      /** @enum {string} */
+      form: 'plain' | 'sensor-aware';
+    };
+    ElevatedInversion: {
+      baseM: number;
+      topM: number;
+      strengthC: components['schemas']['RangeValue'];
+      sure: boolean;
+    };
+    Profile: {
       towerId: number;
-      towerName: string;
-      name: string;
+      /** @description End of the block */
+      tEnd: string;
+      blockMinutes: number;
+      /** @description Counts how often it was worked out anew with another result */
+      rev: number;
+      levels: components['schemas']['ProfileLevel'][];
+      /** @description Between each two neighbouring levels the tower has */
+      layers: components['schemas']['ProfileLayer'][];
       /** @enum {string} */
-      kind: 'text' | 'workbook';
-      bytes: number;
-      /** @enum {string} */
-      state: 'waiting' | 'running' | 'done' | 'cancelled' | 'failed';
-      /** @description Bytes imported so far */
-      bytesDone: number;
-      importId: number | null;
-      /** @description Why it failed, with the cure */
-      fault: string | null;
-      createdAt: string;
-      endedAt: string | null;
-      /** @description Who sent it */
-      by: string;
-      /** @description The same file was imported before */
-      sameAs: components['schemas']['SameImport'] | null;
-      mapping: components['schemas']['Mapping'] | null;
+      surface: 'present' | 'absent' | 'not known';
+      /** @description Why the surface finding is not known */
+      reason?: string;
+      inversion: components['schemas']['SurfaceInversion'] | null;
+      elevated: components['schemas']['ElevatedInversion'][];
+      stableDepthM: components['schemas']['RangeValue'];
+      heatDeficitMJPerM2: components['schemas']['RangeValue'];
+      breakUpTemperatureC: components['schemas']['RangeValue'];
+      pressureHpa: number;
+      /** @description The standard atmosphere’s, none being measured */
+      pressureAssumed: boolean;
+      relativeHumidityPct?: number;
+      windSpeedMPerS?: number;
+      windDirectionDeg?: number;
+      /** @description Block mean, µg/m³ */
+      pm25?: number;
+      /** @description Mean of the hour that ends with the block, µg/m³ */
+      pm25Hour?: number;
     };
-    ProposedColumn: {
-      index: number;
-      name: string;
-      samples: string[];
-      sensor: string | null;
-      unit: string | null;
-      note: string | null;
+    ProfileSpan: {
+      items: components['schemas']['Profile'][];
+      /** @description Ask again with `from` set to this for what follows */
+      next?: string;
     };
-    Choice: {
-      value: string;
-      text: string;
-    };
-    Question: {
-      /** @enum {string} */
-      id: 'repeated-hour' | 'missing-hour' | 'day-or-month-first' | 'unit';
-      text: string;
-      choices: components['schemas']['Choice'][];
-      examples: string[];
-    };
-    Proposal: {
-      mapping: components['schemas']['Mapping'];
-      /** @enum {string} */
-      from: 'sample' | 'last file';
-      /** @description All columns, by name */
-      columnNames: string[];
-      /** @description All but those of the time */
-      columns: components['schemas']['ProposedColumn'][];
-      /** @description Long tables: the sensors as the file writes them */
-      written: string[];
-      sheets: string[] | null;
-      notes: string[];
-      questions: components['schemas']['Question'][];
-      sampleLines: string[];
-    };
-    MappingBody: {
-      mapping: components['schemas']['Mapping'];
-    };
-    PreviewValue: {
-      sensor: string;
-      value: number;
-      unit: string;
-    };
-    PreviewRow: {
-      rowNo: number;
-      /** @description END of its interval */
-      time: string;
-      values: components['schemas']['PreviewValue'][];
-    };
-    PreviewRefusal: {
-      row: number;
-      column: string | null;
-      code: string;
-      text: string;
-      raw: string;
-    };
-    PreviewSpan: {
-      sensor: string;
-      from: string;
-      to: string;
-      count: number;
-      lowest: number;
-      highest: number;
-      unit: string;
-    };
-    Preview: {
-      /** @description The first 30 */
-      rows: components['schemas']['PreviewRow'][];
-      /** @description Readings */
-      read: number;
-      refused: number;
-      /** @description The first 100 */
-      refusedRows: components['schemas']['PreviewRefusal'][];
-      ignoredColumns: string[];
-      spans: components['schemas']['PreviewSpan'][];
-      questions: components['schemas']['Question'][];
-      /** @description Whether the whole file was looked at, not only its beginning */
-      whole: boolean;
+    PipelineState: {
+      /** @description Blocks that ended and wait; 0 when everything is worked out */
+      pending: number;
     };
     Override: {
       id: number;
@@ -2078,99 +2083,165 @@ export interface components {
       to: string;
       sensors: components['schemas']['RawSeries'][];
     };
-    ProfileLevel: {
-      heightM: number;
-      temperatureC: number | null;
-      sigmaC: number;
-      /** @description Readings in the mean */
-      n: number;
+    SaidOfReading: {
+      /** @enum {string} */
+      check:
+        | 'range'
+        | 'spike'
+        | 'step'
+        | 'persistence'
+        | 'internal consistency'
+        | 'vertical consistency'
+        | 'neighbours'
+        | 'override'
+        | 'stuck'
+        | 'clock';
+      /** @description In plain words with its limits */
+      says: string;
+    };
+    WordOnReading: {
+      /** @enum {string} */
+      quality: 'valid' | 'failed';
+      by: string;
+      at: string;
+      reason: string;
+    };
+    ReadingOrigin: {
+      importId: number;
+      /** @description Of the file, or of the key that pushed it */
+      name: string;
+      origin: string;
+      receivedAt: string;
+      /** @description The row of the file */
+      rowNo: number;
+    };
+    EarlierValue: {
+      value: number;
+      /** @description Until when it was in force */
+      until: string;
+      from: components['schemas']['ReadingOrigin'];
+    };
+    ReadingDetail: {
+      sensorId: number;
+      sensorName: string;
+      unit: string;
+      t: string;
+      /** @description As it came */
+      value: number;
+      /** @description With the correction of its time */
+      corrected: number;
       /** @enum {string} */
       quality: 'valid' | 'suspect' | 'failed' | 'missing';
+      checks: components['schemas']['SaidOfReading'][];
+      word: components['schemas']['WordOnReading'] | null;
+      from: components['schemas']['ReadingOrigin'];
+      /** @description The newest first */
+      earlier: components['schemas']['EarlierValue'][];
     };
-    ProfileLayer: {
-      lowerM: number;
-      upperM: number;
-      /** @description −dT/dz: positive where it cools upward */
-      lapseRateKPerKm: number | null;
-      sigmaKPerKm: number | null;
-      textbookClass: string | null;
-      probabilityTRises: number | null;
-      /** @description Moist-adiabatic rate at its temperature and pressure */
-      moistLapseRateKPerKm: number | null;
-      superadiabatic: boolean | null;
-      autoconvective: boolean | null;
+    SameImport: {
+      importId: number;
+      receivedAt: string;
     };
-    RangeValue: {
-      exactly?: number;
-      atLeast?: number;
-      atMost?: number;
-      between?: number[];
-      /** @description The reason, in plain words */
-      notKnown?: string;
-    };
-    SurfaceInversion: {
-      baseM: number;
-      /** @description The lowest level at which its top can lie */
-      topM: number;
-      depthM: components['schemas']['RangeValue'];
-      strengthC: components['schemas']['RangeValue'];
-      strengthWithinTowerC: number;
-      sigmaC: number | null;
-      /** @description P(strength > 0) */
-      probability: number | null;
-      gradientCPer100m: number;
-      /** @enum {string} */
-      open: 'no' | 'at the top' | 'cut by a missing level';
-      /** @description A missing level lies just below */
-      baseAtOrBelow: boolean;
-      sure: boolean;
-      /** @enum {string} */
-      form: 'plain' | 'sensor-aware';
-    };
-    ElevatedInversion: {
-      baseM: number;
-      topM: number;
-      strengthC: components['schemas']['RangeValue'];
-      sure: boolean;
-    };
-    Profile: {
+    Upload: {
+      id: number;
       towerId: number;
-      /** @description End of the block */
-      tEnd: string;
-      blockMinutes: number;
-      /** @description Counts how often it was worked out anew with another result */
-      rev: number;
-      levels: components['schemas']['ProfileLevel'][];
-      /** @description Between each two neighbouring levels the tower has */
-      layers: components['schemas']['ProfileLayer'][];
+      towerName: string;
+      name: string;
       /** @enum {string} */
-      surface: 'present' | 'absent' | 'not known';
-      /** @description Why the surface finding is not known */
-      reason?: string;
-      inversion: components['schemas']['SurfaceInversion'] | null;
-      elevated: components['schemas']['ElevatedInversion'][];
-      stableDepthM: components['schemas']['RangeValue'];
-      heatDeficitMJPerM2: components['schemas']['RangeValue'];
-      breakUpTemperatureC: components['schemas']['RangeValue'];
-      pressureHpa: number;
-      /** @description The standard atmosphere’s, none being measured */
-      pressureAssumed: boolean;
-      relativeHumidityPct?: number;
-      windSpeedMPerS?: number;
-      windDirectionDeg?: number;
-      /** @description Block mean, µg/m³ */
-      pm25?: number;
-      /** @description Mean of the hour that ends with the block, µg/m³ */
-      pm25Hour?: number;
+      kind: 'text' | 'workbook';
+      bytes: number;
+      /** @enum {string} */
+      state: 'waiting' | 'running' | 'done' | 'cancelled' | 'failed';
+      /** @description Bytes imported so far */
+      bytesDone: number;
+      importId: number | null;
+      /** @description Why it failed, with the cure */
+      fault: string | null;
+      createdAt: string;
+      endedAt: string | null;
+      /** @description Who sent it */
+      by: string;
+      /** @description The same file was imported before */
+      sameAs: components['schemas']['SameImport'] | null;
+      mapping: components['schemas']['Mapping'] | null;
     };
-    ProfileSpan: {
-      items: components['schemas']['Profile'][];
-      /** @description Ask again with `from` set to this for what follows */
-      next?: string;
+    ProposedColumn: {
+      index: number;
+      name: string;
+      samples: string[];
+      sensor: string | null;
+      unit: string | null;
+      note: string | null;
     };
-    PipelineState: {
-      /** @description Blocks that ended and wait; 0 when everything is worked out */
-      pending: number;
+    Choice: {
+      value: string;
+      text: string;
+    };
+    Question: {
+      /** @enum {string} */
+      id: 'repeated-hour' | 'missing-hour' | 'day-or-month-first' | 'unit';
+      text: string;
+      choices: components['schemas']['Choice'][];
+      examples: string[];
+    };
+    Proposal: {
+      mapping: components['schemas']['Mapping'];
+      /** @enum {string} */
+      from: 'sample' | 'last file';
+      /** @description All columns, by name */
+      columnNames: string[];
+      /** @description All but those of the time */
+      columns: components['schemas']['ProposedColumn'][];
+      /** @description Long tables: the sensors as the file writes them */
+      written: string[];
+      sheets: string[] | null;
+      notes: string[];
+      questions: components['schemas']['Question'][];
+      sampleLines: string[];
+    };
+    MappingBody: {
+      mapping: components['schemas']['Mapping'];
+    };
+    PreviewValue: {
+      sensor: string;
+      value: number;
+      unit: string;
+    };
+    PreviewRow: {
+      rowNo: number;
+      /** @description END of its interval */
+      time: string;
+      values: components['schemas']['PreviewValue'][];
+    };
+    PreviewRefusal: {
+      row: number;
+      column: string | null;
+      code: string;
+      text: string;
+      raw: string;
+    };
+    PreviewSpan: {
+      sensor: string;
+      from: string;
+      to: string;
+      count: number;
+      lowest: number;
+      highest: number;
+      unit: string;
+    };
+    Preview: {
+      /** @description The first 30 */
+      rows: components['schemas']['PreviewRow'][];
+      /** @description Readings */
+      read: number;
+      refused: number;
+      /** @description The first 100 */
+      refusedRows: components['schemas']['PreviewRefusal'][];
+      ignoredColumns: string[];
+      spans: components['schemas']['PreviewSpan'][];
+      questions: components['schemas']['Question'][];
+      /** @description Whether the whole file was looked at, not only its beginning */
+      whole: boolean;
     };
     LabelDto: {
       en: string;
@@ -3653,6 +3724,252 @@ export interface operations {
       };
     };
   };
+  'Profiles.latest': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Profile'];
+        };
+      };
+    };
+  };
+  'Profiles.range': {
+    parameters: {
+      query?: {
+        from?: string;
+        to?: string;
+        limit?: number;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProfileSpan'];
+        };
+      };
+    };
+  };
+  'Profiles.state': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PipelineState'];
+        };
+      };
+    };
+  };
+  'Overrides.list': {
+    parameters: {
+      query: {
+        towerId: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Override'][];
+        };
+      };
+    };
+  };
+  'Overrides.set': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['OverrideInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Override'];
+        };
+      };
+    };
+  };
+  'Overrides.undo': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Override'];
+        };
+      };
+    };
+  };
+  'Screening.calendar': {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TowerCalendar'];
+        };
+      };
+    };
+  };
+  'Screening.flagged': {
+    parameters: {
+      query: {
+        page?: number;
+        pageSize?: number;
+        from: string;
+        to: string;
+        sensorId?: number;
+        check?:
+          | 'range'
+          | 'spike'
+          | 'step'
+          | 'persistence'
+          | 'internal consistency'
+          | 'vertical consistency'
+          | 'neighbours'
+          | 'override'
+          | 'stuck'
+          | 'clock';
+        /** @description The worst of the span; any when left out */
+        quality?: 'suspect' | 'failed';
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FlaggedSpanPage'];
+        };
+      };
+    };
+  };
+  'Screening.readings': {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+        sensorId?: number;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['RawReadings'];
+        };
+      };
+    };
+  };
+  'Screening.reading': {
+    parameters: {
+      query: {
+        sensorId: number;
+        /** @description End of its interval */
+        t: string;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ReadingDetail'];
+        };
+      };
+    };
+  };
   'Uploads.list': {
     parameters: {
       query?: {
@@ -3831,227 +4148,6 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['Upload'];
-        };
-      };
-    };
-  };
-  'Overrides.list': {
-    parameters: {
-      query: {
-        towerId: number;
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Override'][];
-        };
-      };
-    };
-  };
-  'Overrides.set': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['OverrideInput'];
-      };
-    };
-    responses: {
-      201: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Override'];
-        };
-      };
-    };
-  };
-  'Overrides.undo': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Override'];
-        };
-      };
-    };
-  };
-  'Screening.calendar': {
-    parameters: {
-      query: {
-        from: string;
-        to: string;
-      };
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['TowerCalendar'];
-        };
-      };
-    };
-  };
-  'Screening.flagged': {
-    parameters: {
-      query: {
-        page?: number;
-        pageSize?: number;
-        from: string;
-        to: string;
-        sensorId?: number;
-        check?:
-          | 'range'
-          | 'spike'
-          | 'step'
-          | 'persistence'
-          | 'internal consistency'
-          | 'vertical consistency'
-          | 'neighbours'
-          | 'override'
-          | 'stuck'
-          | 'clock';
-        /** @description The worst of the span; any when left out */
-        quality?: 'suspect' | 'failed';
-      };
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['FlaggedSpanPage'];
-        };
-      };
-    };
-  };
-  'Screening.readings': {
-    parameters: {
-      query: {
-        from: string;
-        to: string;
-        sensorId?: number;
-      };
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['RawReadings'];
-        };
-      };
-    };
-  };
-  'Profiles.latest': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['Profile'];
-        };
-      };
-    };
-  };
-  'Profiles.range': {
-    parameters: {
-      query?: {
-        from?: string;
-        to?: string;
-        limit?: number;
-      };
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ProfileSpan'];
-        };
-      };
-    };
-  };
-  'Profiles.state': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        id: number;
-      };
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['PipelineState'];
         };
       };
     };
