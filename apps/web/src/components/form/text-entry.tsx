@@ -3,7 +3,7 @@ import { Input, Textarea } from '../ui/input';
 import { useEntry, type EntryProps } from './entry';
 
 interface TextEntryProps extends EntryProps {
-  type?: 'text' | 'email' | 'datetime-local';
+  type?: 'text' | 'email' | 'datetime-local' | 'password';
   lines?: number;
   autoComplete?: string;
   /** Figures of one width, for codes and rules. */

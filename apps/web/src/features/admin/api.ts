@@ -6,7 +6,8 @@ import type { District, IngestKey, Measure, Office, Rule, Source, Tower, User } 
 export const useUsers = () => useApi<Page<User>>(withQuery('/api/users', { pageSize: 200 }));
 export const useTowers = () => useApi<Tower[]>('/api/towers');
 export const useTower = (id: number) => useApi<Tower>(`/api/towers/${id}`);
-export const useSources = (towerId: number) => useApi<Source[]>(`/api/towers/${towerId}/sources`);
+export const useSources = (towerId: number) =>
+  useApi<Source[]>(`/api/towers/${towerId}/sources`, { live: true });
 export const useKeys = (towerId: number) => useApi<IngestKey[]>(`/api/towers/${towerId}/keys`);
 export const useDistrictSettings = () => useApi<District[]>('/api/districts');
 export const useRules = (districtId: number | undefined) =>
@@ -36,6 +37,9 @@ export const addSensor = (towerId: number, sensor: object) =>
 export const retireSensor = (id: number) => api.patch<object>(`/api/sensors/${id}`, { retired: true });
 export const addSource = (towerId: number, source: object) =>
   api.post<Source>(`/api/towers/${towerId}/sources`, source);
+export const changeSource = (id: number, change: object) => api.patch<Source>(`/api/sources/${id}`, change);
+export const retireSource = (id: number) => api.post<Source>(`/api/sources/${id}/retire`);
+export const collectSource = (id: number) => api.post<Source>(`/api/sources/${id}/collect`);
 export const makeKey = (towerId: number, name: string) =>
   api.post<{ id: number; key: string }>(`/api/towers/${towerId}/keys`, { name });
 export const revokeKey = (id: number) => api.remove<object>(`/api/keys/${id}`);

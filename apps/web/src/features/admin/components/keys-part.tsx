@@ -1,19 +1,21 @@
 import { Box } from '@chakra-ui/react';
 import { useState } from 'react';
 import { EntryForm, TextEntry } from '../../../components/form';
+import { Empty } from '../../../components/states/empty';
 import { Loaded } from '../../../components/states/loaded';
-import { Refusal } from '../../../components/states/refusal';
 import { Button } from '../../../components/ui/button';
 import { Card } from '../../../components/ui/card';
 import { PartTitle } from '../../../components/ui/heading';
 import { PlainTable } from '../../../components/ui/plain-table';
 import { ShownOnce } from '../../../components/ui/shown-once';
+import { AgoText } from '../../../components/ui/time-text';
 import { dateAndTime } from '../../../lib/format/time';
-import { useAct } from '../../../lib/use-act';
 import { useEntryForm } from '../../../lib/use-entry-form';
-import { makeKey, revokeKey, useKeys } from '../api';
+import { useTowerZone } from '../../../lib/use-tower-zone';
+import { makeKey, useKeys } from '../api';
 import type { IngestKey } from '../types';
-import { curlExample } from './curl-example';
+import { PushExamples } from './push-examples';
+import { RevokeKeyDialog } from './revoke-key-dialog';
 
 interface KeysPartProps {
   towerId: number;
@@ -22,14 +24,12 @@ interface KeysPartProps {
   mayMakeKeys: boolean;
 }
 
-/** The keys with which a site pushes readings. A new one is shown once, with a command to try it. */
+/** The keys with which a site pushes readings. A new one is shown once, with commands to try it. */
 export function KeysPart({ towerId, sensor, mayMakeKeys }: KeysPartProps) {
   const keys = useKeys(towerId);
+  const zone = useTowerZone(towerId) ?? 'UTC';
   const [made, setMade] = useState<string>();
-  const revoke = useAct(async (id: number) => {
-    await revokeKey(id);
-    await keys.mutate();
-  });
+  const [revoking, setRevoking] = useState<IngestKey>();
   const entries = useEntryForm({
     entries: { name: '' },
     perform: ({ name }: { name: string }) => makeKey(towerId, name),
@@ -39,11 +39,11 @@ export function KeysPart({ towerId, sensor, mayMakeKeys }: KeysPartProps) {
       await keys.mutate();
     },
   });
-  const state = ({ id, name, revokedAt }: IngestKey) => {
-    if (revokedAt) return `revoked ${dateAndTime(revokedAt, 'UTC')}`;
+  const state = (key: IngestKey) => {
+    if (key.revokedAt) return `revoked ${dateAndTime(key.revokedAt, zone)}`;
     if (!mayMakeKeys) return 'in use';
     return (
-      <Button size="sm" onClick={() => void revoke.run(id)} aria-label={`Revoke ${name}`}>
+      <Button size="sm" onClick={() => setRevoking(key)} aria-label={`Revoke ${key.name}`}>
         Revoke
       </Button>
     );
@@ -53,31 +53,50 @@ export function KeysPart({ towerId, sensor, mayMakeKeys }: KeysPartProps) {
       <PartTitle mb="3">Keys</PartTitle>
       {made && (
         <ShownOnce title="Keep this key now: it is not shown again" secret={made}>
-          <p>To try it:</p>
-          <Box as="pre" fontSize="sm" whiteSpace="pre-wrap" overflowWrap="anywhere" m="0">
-            {curlExample(window.location.origin, made, sensor)}
+          <Box mt="3">
+            <PushExamples apiKey={made} sensor={sensor} />
           </Box>
         </ShownOnce>
       )}
-      <Refusal problem={revoke.problem} />
       <Loaded from={keys} what="the keys">
-        {(rows) => (
-          <PlainTable
-            caption="Keys"
-            rows={rows}
-            keyOf={({ id }) => id}
-            columns={[
-              { head: 'Key', cell: ({ name }) => <strong>{name}</strong> },
-              { head: 'Made', cell: ({ createdAt }) => dateAndTime(createdAt, 'UTC') },
-              {
-                head: 'Last used',
-                cell: ({ lastUsedAt }) => (lastUsedAt ? dateAndTime(lastUsedAt, 'UTC') : 'never'),
-              },
-              { head: 'State', cell: state },
-            ]}
-          />
-        )}
+        {(rows) =>
+          rows.length === 0 ? (
+            <Empty title="No key yet">A key is needed where the site sends its readings itself.</Empty>
+          ) : (
+            <PlainTable
+              caption="Keys"
+              rows={rows}
+              keyOf={({ id }) => id}
+              columns={[
+                { head: 'Key', cell: ({ name }) => <strong>{name}</strong> },
+                { head: 'Made', cell: ({ createdAt }) => dateAndTime(createdAt, zone) },
+                {
+                  head: 'Last used',
+                  cell: ({ lastUsedAt }) => (lastUsedAt ? <AgoText at={lastUsedAt} zone={zone} /> : 'never'),
+                },
+                { head: 'State', cell: state },
+              ]}
+            />
+          )
+        }
       </Loaded>
+      {revoking && (
+        <RevokeKeyDialog
+          ingestKey={revoking}
+          onClose={() => setRevoking(undefined)}
+          onRevoked={() => keys.mutate()}
+        />
+      )}
+      {!made && (
+        <Box as="details" mt="4">
+          <Box as="summary" cursor="pointer" fontWeight="600">
+            How a site pushes
+          </Box>
+          <Box mt="2">
+            <PushExamples apiKey="YOUR-KEY" sensor={sensor} />
+          </Box>
+        </Box>
+      )}
       {mayMakeKeys && (
         <Box mt="4">
           <EntryForm entries={entries} act="Make a key">

@@ -1,100 +1,62 @@
 import { Box } from '@chakra-ui/react';
-import { ChoiceEntry, EntryForm, EntryGrid, NumberEntry, TextEntry } from '../../../components/form';
+import { useState } from 'react';
+import { Empty } from '../../../components/states/empty';
 import { Loaded } from '../../../components/states/loaded';
+import { Button } from '../../../components/ui/button';
 import { Card } from '../../../components/ui/card';
 import { PartTitle } from '../../../components/ui/heading';
-import { PlainTable } from '../../../components/ui/plain-table';
-import { dateAndTime } from '../../../lib/format/time';
-import { useEntryForm } from '../../../lib/use-entry-form';
-import { addSource, useSources } from '../api';
+import { useMe } from '../../../lib/api/use-me';
+import { useTowerZone } from '../../../lib/use-tower-zone';
+import { useSources } from '../api';
+import { SourceForm } from './source-form';
+import { SourceRow } from './source-row';
 
-interface SourceEntries {
-  kind: 'folder' | 'push';
-  path: string;
-  format: string;
-  separator: string;
-  timeColumn: string;
-  missing: string;
-  intervalSeconds: number;
-}
-
-const EMPTY: SourceEntries = {
-  kind: 'folder',
-  path: '',
-  format: 'wide',
-  separator: ',',
-  timeColumn: 'time',
-  missing: 'NaN',
-  intervalSeconds: 60,
-};
-
-/** Where a tower's readings come from: files in the loggers' folder, or what its site pushes. */
+/** Where a tower's readings come from: files in the loggers' folder or at an address, or what its site pushes. */
 export function SourcesPart({ towerId }: { towerId: number }) {
   const sources = useSources(towerId);
-  const entries = useEntryForm({
-    entries: EMPTY,
-    perform: (typed: SourceEntries) => addSource(towerId, toSource(typed)),
-    onDone: () => void sources.mutate(),
-  });
-  const kind = entries.form.watch('kind');
+  const zone = useTowerZone(towerId) ?? 'UTC';
+  const mayUseHttp = useMe().me?.role === 'administrator';
+  const [adding, setAdding] = useState(false);
+  const renew = () => void sources.mutate();
   return (
     <Card padded>
       <PartTitle mb="3">Sources</PartTitle>
       <Loaded from={sources} what="the sources">
-        {(rows) => (
-          <PlainTable
-            caption="Sources"
-            rows={rows}
-            keyOf={({ id }) => id}
-            columns={[
-              { head: 'Kind', cell: (source) => source.kind },
-              { head: 'Path', cell: ({ path }) => path ?? 'by key' },
-              {
-                head: 'Last looked at',
-                cell: ({ lastAt }) => (lastAt ? dateAndTime(lastAt, 'UTC') : 'never'),
-              },
-              { head: 'What it gave', cell: ({ lastResult }) => lastResult ?? '–' },
-            ]}
-          />
-        )}
+        {(rows) =>
+          rows.length === 0 ? (
+            <Empty title="No source yet">
+              Add the folder its logger writes into, the address of its file, or let its site push.
+            </Empty>
+          ) : (
+            <Box as="ul" listStyleType="none" m="0" p="0">
+              {rows.map((source) => (
+                <SourceRow
+                  key={source.id}
+                  source={source}
+                  zone={zone}
+                  mayUseHttp={mayUseHttp}
+                  onChanged={renew}
+                />
+              ))}
+            </Box>
+          )
+        }
       </Loaded>
-      <Box mt="4">
-        <EntryForm entries={entries} act="Add the source">
-          <EntryGrid>
-            <ChoiceEntry
-              name="kind"
-              label="Kind"
-              choices={[
-                { value: 'folder', label: 'files in the loggers’ folder' },
-                { value: 'push', label: 'the site pushes with a key' },
-              ]}
-            />
-            {kind === 'folder' && (
-              <TextEntry name="path" label="File or folder" help="Beneath the loggers’ folder" required />
-            )}
-            <ChoiceEntry
-              name="format"
-              label="Layout"
-              choices={[
-                { value: 'wide', label: 'wide: a column per sensor' },
-                { value: 'long', label: 'long: time, sensor, value' },
-              ]}
-            />
-            <TextEntry name="separator" label="Separator" help="One character, or blank" required />
-            <TextEntry name="timeColumn" label="Column with the time" required />
-            <TextEntry name="missing" label="Written for no reading" help="Several: with blanks between" />
-            {kind === 'folder' && <NumberEntry name="intervalSeconds" label="Look every, s" required />}
-          </EntryGrid>
-        </EntryForm>
+      <Box mt="4" pt="4" borderTopWidth="1px" borderColor="line">
+        {adding ? (
+          <SourceForm
+            towerId={towerId}
+            mayUseHttp={mayUseHttp}
+            onDone={() => {
+              renew();
+              setAdding(false);
+            }}
+            onCancel={() => setAdding(false)}
+          />
+        ) : (
+          <Button onClick={() => setAdding(true)}>Add a source</Button>
+        )}
       </Box>
     </Card>
   );
-}
-
-function toSource({ kind, path, missing, intervalSeconds, ...mapping }: SourceEntries) {
-  return {
-    kind,
-    mapping: { ...mapping, missing: missing.split(/\s+/).filter(Boolean) },
-    ...(kind === 'folder' && { path, intervalSeconds }),
-  };
 }
