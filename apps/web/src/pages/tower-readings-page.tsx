@@ -7,7 +7,7 @@ import { Loading } from '../components/states/loading';
 import { TextLink } from '../components/ui/text-link';
 import { useTowers } from '../features/screening/api';
 import { TowerReadingsView } from '../features/screening/components/tower-readings-view';
-import { useTowerZone } from '../features/screening/use-tower-zone';
+import { useTowerZone } from '../lib/use-tower-zone';
 import { useMe } from '../lib/api/use-me';
 
 /** The readings of one tower: completeness, flags, what people set, corrections, and what that changed. */
