@@ -3,7 +3,17 @@ import { api, withQuery } from '../../lib/api/client';
 import type { ApiProblem } from '../../lib/api/problem';
 import type { Page } from '../../lib/api/types';
 import { LIVE_REFRESH_MS, useApi } from '../../lib/api/use-api';
-import type { FlaggedSpan, RawReadings, Rework, Said, Sensor, SetSpan, Tower, TowerCalendar } from './types';
+import type {
+  FlaggedSpan,
+  RawReadings,
+  ReadingDetail,
+  Rework,
+  Said,
+  Sensor,
+  SetSpan,
+  Tower,
+  TowerCalendar,
+} from './types';
 
 /** How often work under way is asked after, ms. */
 const UNDER_WAY_MS = 1_500;
@@ -29,6 +39,10 @@ export const useRaw = (towerId: number, ends: Ends) =>
     live: true,
     keepPrevious: true,
   });
+
+/** One reading with the file and row it came from. */
+export const useReading = (towerId: number, reading: { sensorId: number; t: string }) =>
+  useApi<ReadingDetail>(withQuery(`/api/towers/${towerId}/reading`, { ...reading }));
 
 /** What flagged spans are narrowed to; empty: all. */
 export interface FlagFilter {

@@ -1,30 +1,44 @@
 import type { Chart } from 'chart.js';
-import { useRef, type PointerEvent, type RefObject } from 'react';
+import { useRef, type MouseEvent, type PointerEvent, type RefObject } from 'react';
 
 /** Less than this is a click, px. */
 const LEAST_PX = 4;
 
-/** Pointer handlers of a chart's frame by which a stretch of time is drawn; instants in epoch ms. */
-export function useDrag(
-  chart: RefObject<Chart<'line'> | null>,
-  onDraw: ((a: number, b: number) => void) | undefined,
-) {
+/** What may be done with the pointer over a chart. */
+interface Pointing {
+  /** A stretch of time is drawn, epoch ms; left out where none may be chosen. */
+  onDraw: ((a: number, b: number) => void) | undefined;
+  /** A point is clicked: numbers of its line and of the point. */
+  onPoint: (line: number, index: number) => void;
+}
+
+/** Pointer handlers of a chart's frame, by which a stretch of time is drawn or a point is opened. */
+export function useDrag(chart: RefObject<Chart<'line'> | null>, { onDraw, onPoint }: Pointing) {
   const start = useRef<number | null>(null);
+  const drawn = useRef(false);
   const timeAt = (px: number): number => chart.current?.scales.x?.getValueForPixel(px) ?? NaN;
   const pxOf = (event: PointerEvent): number =>
     event.clientX - (chart.current?.canvas.getBoundingClientRect().left ?? 0);
-  if (!onDraw) return {};
   return {
     onPointerDown: (event: PointerEvent) => {
-      if (event.button === 0) start.current = pxOf(event);
+      if (event.button !== 0) return;
+      start.current = pxOf(event);
+      drawn.current = false;
     },
     onPointerMove: (event: PointerEvent) => {
-      if (start.current === null || event.buttons === 0) return;
+      if (!onDraw || start.current === null || event.buttons === 0) return;
       const px = pxOf(event);
-      if (Math.abs(px - start.current) >= LEAST_PX) onDraw(timeAt(start.current), timeAt(px));
+      if (!drawn.current && Math.abs(px - start.current) < LEAST_PX) return;
+      drawn.current = true;
+      onDraw(timeAt(start.current), timeAt(px));
     },
     onPointerUp: () => {
       start.current = null;
+    },
+    onClick: (event: MouseEvent) => {
+      const mode = { axis: 'xy', intersect: true } as const;
+      const [hit] = chart.current?.getElementsAtEventForMode(event.nativeEvent, 'nearest', mode, false) ?? [];
+      if (hit && !drawn.current) onPoint(hit.datasetIndex, hit.index);
     },
     onPointerCancel: () => {
       start.current = null;

@@ -16,6 +16,7 @@ import type { ReadingsChoice } from '../use-readings-choice';
 import { rawSentence } from '../words';
 import { RawChart } from './raw-chart';
 import { RawTable } from './raw-table';
+import { ReadingDialog } from './reading-dialog';
 import { SelectionBar } from './selection-bar';
 import { SensorChoice } from './sensor-choice';
 
@@ -70,6 +71,7 @@ function RawPart({
 }: RawCardProps & { raw: RawReadings }) {
   const [hidden, setHidden] = useState<ReadonlySet<number>>(new Set());
   const [asTable, setAsTable] = useState(false);
+  const [opened, setOpened] = useState<{ sensorId: number; t: string }>();
   const spans = useSetSpans(tower.id);
   const quantity = raw.sensors.some((sensor) => sensor.quantity === choice.quantity)
     ? choice.quantity
@@ -108,7 +110,7 @@ function RawPart({
       {own.every(({ readings }) => readings === 0) ? (
         <Empty title="No readings in this time">Choose another day, or look into the tower’s sources.</Empty>
       ) : asTable ? (
-        <RawTable shown={shown.map(({ series }) => series)} zone={zone} />
+        <RawTable shown={shown.map(({ series }) => series)} zone={zone} onOpen={setOpened} />
       ) : (
         <RawChart
           raw={raw}
@@ -117,6 +119,7 @@ function RawPart({
           bands={bands}
           label={`Readings of ${tower.name}, ${quantity}. ${words}`}
           onDraw={onSay && draw}
+          onOpen={setOpened}
         />
       )}
       <Flex gap="3" align="flex-start" wrap="wrap">
@@ -140,6 +143,9 @@ function RawPart({
       </Flex>
       {onSay && (
         <SelectionBar sensors={own} selection={selection} zone={zone} onChange={onSelect} onSay={onSay} />
+      )}
+      {opened && (
+        <ReadingDialog towerId={tower.id} reading={opened} zone={zone} onClose={() => setOpened(undefined)} />
       )}
     </Stack>
   );

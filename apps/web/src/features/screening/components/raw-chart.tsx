@@ -23,17 +23,26 @@ interface RawChartProps {
   label: string;
   /** A stretch drawn over the chart, epoch ms; left out where nothing may be set. */
   onDraw?: ((a: number, b: number) => void) | undefined;
+  /** A reading is to be opened. */
+  onOpen: (reading: { sensorId: number; t: string }) => void;
 }
 
 /** Readings as they came, with flags by shape and colour and set spans shaded. */
-export function RawChart({ raw, shown, intervalMinutes, bands, label, onDraw }: RawChartProps) {
+export function RawChart({ raw, shown, intervalMinutes, bands, label, onDraw, onOpen }: RawChartProps) {
   const colors = useChartColors();
   const chart = useRef<ChartJS<'line'>>(null);
-  const drag = useDrag(chart, onDraw);
   const { data, reach } = useMemo(
     () => rawDrawing(raw, shown, intervalMinutes, colors),
     [raw, shown, intervalMinutes, colors],
   );
+  const drag = useDrag(chart, {
+    onDraw,
+    onPoint: (line, index) => {
+      const reading = data.datasets[line]?.data[index]?.reading;
+      const own = shown.find(({ series }) => series.name === data.datasets[line]?.label);
+      if (reading && own) onOpen({ sensorId: own.series.sensorId, t: reading.t });
+    },
+  });
   const unit = shown[0]?.series.unit ?? '';
   const options = useMemo(() => rawOptions({ raw, unit, reach, colors }), [raw, unit, reach, colors]);
   useEffect(() => {

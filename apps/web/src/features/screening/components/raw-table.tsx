@@ -16,8 +16,25 @@ const said = ({ value, quality, checks = [] }: RawReading): string => {
   return [decimal(value, 2), ...flagged, ...checks.map((check) => CHECK_NAME[check])].join(', ');
 };
 
-/** The readings behind the chart, a row each time. */
-export function RawTable({ shown, zone }: { shown: readonly RawSeries[]; zone: string }) {
+const Open = chakra('button', {
+  base: {
+    color: 'air',
+    textDecoration: 'underline',
+    textUnderlineOffset: '3px',
+    minH: '6',
+    cursor: 'pointer',
+  },
+});
+
+interface RawTableProps {
+  shown: readonly RawSeries[];
+  zone: string;
+  /** A reading is to be opened. */
+  onOpen: (reading: { sensorId: number; t: string }) => void;
+}
+
+/** The readings behind the chart, a row each time; each opens. */
+export function RawTable({ shown, zone, onOpen }: RawTableProps) {
   const byTime = shown.map(({ points }) => new Map(points.map((reading) => [reading.t, reading])));
   const times = [...new Set(shown.flatMap(({ points }) => points.map(({ t }) => t)))].sort();
   return (
@@ -41,7 +58,16 @@ export function RawTable({ shown, zone }: { shown: readonly RawSeries[]; zone: s
               <Cell textAlign="start">{dateAndTime(t, zone)}</Cell>
               {byTime.map((readings, k) => {
                 const reading = readings.get(t);
-                return <Cell key={shown[k]!.sensorId}>{reading ? said(reading) : ''}</Cell>;
+                const { sensorId } = shown[k]!;
+                return (
+                  <Cell key={sensorId}>
+                    {reading && (
+                      <Open type="button" onClick={() => onOpen({ sensorId, t })}>
+                        {said(reading)}
+                      </Open>
+                    )}
+                  </Cell>
+                );
               })}
             </tr>
           ))}
