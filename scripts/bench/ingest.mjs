@@ -1,37 +1,23 @@
-import { readFile } from 'node:fs/promises';
+import { readFile, rm } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import path from 'node:path';
+import { fileURLToPath } from 'node:url';
 import { Client } from '../verify-tower/client.mjs';
 import { startService } from '../verify-tower/service.mjs';
 import { makeTower, waitUntilWorkedOut } from '../verify-tower/through-the-service.mjs';
-import { HEIGHTS_M, winterParts } from './ingest/winter.mjs';
+import { askMeanwhile } from './ingest/ask-meanwhile.mjs';
+import { uploadFile } from './ingest/upload-file.mjs';
+import { HEIGHTS_M, winterFile } from './ingest/winter.mjs';
 import { importSeconds } from './ingest/yardstick.mjs';
 
-const READINGS = { small: 100_000, full: 1_000_000 };
-const ASK_EVERY_MS = 40;
-const pause = (ms) => new Promise((resolve) => setTimeout(resolve, ms));
+/** Readings of a round, and how many rounds. */
+const SIZES = { small: { readings: 100_000, rounds: 2 }, full: { readings: 1_000_000, rounds: 3 } };
+const loopDelay = fileURLToPath(new URL('./ingest/loop-delay.cjs', import.meta.url));
 
 const tower = {
   ...{ time: 'time', stamp: 'end', blockMinutes: 5, missing: [] },
   levels: HEIGHTS_M.map((heightM) => ({ heightM, column: `t${heightM}` })),
 };
-
-/** Asks for the list of towers every so often, as a screen would; gives the p95 of the answers' times, ms. */
-function askMeanwhile(client) {
-  const times = [];
-  let going = true;
-  const asking = (async () => {
-    while (going) {
-      const begun = performance.now();
-      await client.get('/api/towers');
-      times.push(performance.now() - begun);
-      await pause(ASK_EVERY_MS);
-    }
-  })();
-  return async () => {
-    going = false;
-    await asking;
-    return times.sort((a, b) => a - b)[Math.floor(times.length * 0.95)];
-  };
-}
 
 /** Largest memory a process has held, MB (Linux). */
 const peakMemoryMb = async (pid) => {
@@ -39,33 +25,62 @@ const peakMemoryMb = async (pid) => {
   return Number(/VmHWM:\s+(\d+) kB/.exec(status)?.[1]) / 1024;
 };
 
-/**
- * Sends generated readings through the real way in of a service with an empty store, until every profile is worked
- * out, against the sqlite3 command line importing the same rows into the same table.
- */
-export async function run({ size }) {
-  const rows = READINGS[size];
-  const yardstick = await importSeconds(rows);
+/** One file through a service with an empty store, from the last byte sent until every profile is worked out. */
+async function importThroughService(readings) {
+  process.env.NODE_OPTIONS = `--require ${loopDelay}`;
+  process.env.LOOP_DELAY_FILE = path.join(tmpdir(), `lidwatch-loop-${process.pid}.json`);
   const service = await startService();
   try {
     const client = new Client(service.url);
-    const { towerId, key } = await makeTower(client, service.token, tower);
+    const { towerId } = await makeTower(client, service.token, tower);
+    const id = await uploadFile(client, towerId, winterFile(readings));
     const stopAsking = askMeanwhile(client);
     const begun = performance.now();
-    for (const text of winterParts(rows)) {
-      await client.request('POST', '/api/ingest/readings', { text, type: 'text/csv', key });
-    }
+    await client.post(`/api/uploads/${id}/commit`, { mapping: { timeColumn: 'time' } });
+    await uploadFile.done(client, id, readings);
+    const importedS = (performance.now() - begun) / 1000;
     await waitUntilWorkedOut(client, towerId);
     const seconds = (performance.now() - begun) / 1000;
-    return {
-      rows,
-      seconds,
-      rowsPerSecond: rows / seconds,
-      ...(yardstick && { ratioToSqliteImport: seconds / yardstick }),
-      peakMemoryMb: await peakMemoryMb(service.pid),
-      otherRequestsP95Ms: await stopAsking(),
-    };
+    const { p99Ms, maxMs } = JSON.parse(await readFile(process.env.LOOP_DELAY_FILE, 'utf8'));
+    const otherP95Ms = await stopAsking();
+    return { seconds, importedS, memoryMb: await peakMemoryMb(service.pid), otherP95Ms, p99Ms, maxMs };
   } finally {
     await service.close();
+    await rm(process.env.LOOP_DELAY_FILE, { force: true });
   }
+}
+
+const spread = (values) => {
+  const sorted = [...values].sort((a, b) => a - b);
+  return { median: sorted[Math.floor((sorted.length - 1) / 2)], low: sorted[0], high: sorted.at(-1) };
+};
+
+/**
+ * Generated readings as one uploaded file through the real way in, screening and profiles included, against the
+ * sqlite3 command line importing the same rows into the same table; both in turn, medians. A file of a fifth of the
+ * size shows whether memory grows with it.
+ */
+export async function run({ size }) {
+  const { readings, rounds } = SIZES[size];
+  const fifth = await importThroughService(readings / 5);
+  const found = [];
+  for (let round = 0; round < rounds; round += 1) {
+    const yardstickS = await importSeconds(readings);
+    found.push({ ...(await importThroughService(readings)), yardstickS });
+  }
+  const each = (key) => spread(found.map((round) => round[key]));
+  return {
+    rows: readings,
+    seconds: each('seconds'),
+    importedSeconds: each('importedS'),
+    rowsPerSecond: spread(found.map(({ seconds }) => readings / seconds)),
+    ...(found[0].yardstickS && {
+      ratioToSqliteImport: spread(found.map(({ seconds, yardstickS }) => seconds / yardstickS)),
+    }),
+    peakMemoryMb: each('memoryMb'),
+    peakMemoryMbOfAFifth: fifth.memoryMb,
+    otherRequestsP95Ms: each('otherP95Ms'),
+    eventLoopP99Ms: each('p99Ms'),
+    eventLoopMaxMs: each('maxMs'),
+  };
 }

@@ -2,7 +2,6 @@
 export const HEIGHTS_M = [2, 10, 30, 60, 100];
 const INTERVAL_S = 300;
 const BEGIN_S = Date.UTC(2015, 10, 1) / 1000;
-const LINES_AT_A_TIME = 20_000;
 
 /** Generated temperature, °C: nights with an inversion, days without, with jitter that needs no randomness. */
 const temperatureC = (t, heightM) => {
@@ -11,19 +10,15 @@ const temperatureC = (t, heightM) => {
   return Math.round((-4 + night * (Math.sqrt(heightM) * 0.5 - 3) + jitter) * 100) / 100;
 };
 
-/** A mast's readings as CSV parts with their header, so many readings altogether, a reading every five minutes. */
-export function* winterParts(readings) {
-  const header = ['time', ...HEIGHTS_M.map((heightM) => `t${heightM}`)].join(',');
-  const lines = Math.ceil(readings / HEIGHTS_M.length);
-  for (let at = 0; at < lines; at += LINES_AT_A_TIME) {
-    const part = [header];
-    for (let i = at; i < Math.min(at + LINES_AT_A_TIME, lines); i += 1) {
-      const t = BEGIN_S + (i + 1) * INTERVAL_S;
-      const cells = HEIGHTS_M.map((heightM) => temperatureC(t, heightM));
-      part.push(`${new Date(t * 1000).toISOString()},${cells.join(',')}`);
-    }
-    yield part.join('\n');
+/** A mast's readings as a CSV file, so many readings altogether, a line every five minutes. */
+export function winterFile(readings) {
+  const lines = [['time', ...HEIGHTS_M.map((heightM) => `t${heightM}`)].join(',')];
+  for (let i = 1; i <= Math.ceil(readings / HEIGHTS_M.length); i += 1) {
+    const t = BEGIN_S + i * INTERVAL_S;
+    const cells = HEIGHTS_M.map((heightM) => temperatureC(t, heightM));
+    lines.push(`${new Date(t * 1000).toISOString()},${cells.join(',')}`);
   }
+  return lines.join('\n');
 }
 
 /** The same readings as rows of the reading table, for the yardstick. */

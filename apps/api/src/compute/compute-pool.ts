@@ -6,6 +6,8 @@ import type { ComputeTask, ThreadCall } from './compute-task';
 
 /** Memory of the thread, MB: work that needs more fails alone, not the service. */
 const MOST_MEMORY_MB = 512;
+/** Of it for what lives shortly, as most of a computation does. */
+const YOUNG_MEMORY_MB = 48;
 const THREAD = path.join(__dirname, 'thread.js');
 /** A crash of the thread, as opposed to an error that the work threw. */
 const isCrash = (error: unknown): boolean =>
@@ -61,7 +63,7 @@ export class ComputePool implements OnApplicationShutdown {
     this.pool = new Piscina({
       filename: THREAD,
       ...{ minThreads: 1, maxThreads: 1 },
-      resourceLimits: { maxOldGenerationSizeMb: MOST_MEMORY_MB },
+      resourceLimits: { maxOldGenerationSizeMb: MOST_MEMORY_MB, maxYoungGenerationSizeMb: YOUNG_MEMORY_MB },
     });
     this.pool.on('error', (error) => this.log.error('The compute thread failed', error));
     this.log.log('Heavy computing has a thread of its own.');

@@ -62,15 +62,25 @@ const nearest = (
   present: readonly Measured[],
   quantity: SensorQuantity,
   heightM: number,
-): Measured | undefined =>
-  present
-    .filter(({ sensor }) => sensor.quantity === quantity)
-    .sort((a, b) => Math.abs(a.version.heightM - heightM) - Math.abs(b.version.heightM - heightM))[0];
+): Measured | undefined => {
+  let best: Measured | undefined;
+  let least = Infinity;
+  for (const each of present) {
+    if (each.sensor.quantity !== quantity) continue;
+    const away = Math.abs(each.version.heightM - heightM);
+    if (away < least) [best, least] = [each, away];
+  }
+  return best;
+};
+
+const NOTHING_ELSE: OtherQuantities = {};
+const isTemperature = ({ sensor }: Present): boolean => sensor.quantity === 'air temperature';
 
 const defined = <T extends object>(values: T): T =>
   Object.fromEntries(Object.entries(values).filter(([, value]) => value !== undefined)) as T;
 
 const otherOf = (present: readonly Measured[], pm25Hour: number | undefined): OtherQuantities => {
+  if (pm25Hour === undefined && present.every(isTemperature)) return NOTHING_ELSE;
   const shown = {
     'relative humidity': nearest(present, 'relative humidity', 2),
     'wind speed': nearest(present, 'wind speed', 10),
@@ -111,7 +121,7 @@ export function blockFacts(
     return [{ sensor, version, kept: means.find((each) => each.sensorId === sensor.id) }];
   });
   const levels = present
-    .filter(({ sensor }) => sensor.quantity === 'air temperature')
+    .filter(isTemperature)
     .map(levelOf)
     .sort((a, b) => a[0] - b[0]);
   const measured = present.filter(isMeasured);

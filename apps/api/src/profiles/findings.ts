@@ -20,7 +20,8 @@ import type { BlockFacts, StoredLevel } from './block-facts';
 /** All that follows from one block of a tower. */
 export interface Findings {
   readonly profile: Profile;
-  readonly layers: readonly Layer[];
+  /** Whether every level gave what can be a temperature of air: else nothing but the plain differences is said. */
+  readonly isAir: boolean;
   readonly inversions: InversionFinding;
   readonly stableDepthM: Quantity;
   readonly heatDeficitJPerM2: Quantity;
@@ -28,12 +29,19 @@ export interface Findings {
 }
 
 const levelOf = ([heightM, temperatureC, sigmaC, n, quality]: StoredLevel): Level => ({
-  ...{ heightM, temperatureC, sigmaC, n },
+  heightM,
+  temperatureC,
+  sigmaC,
+  n,
   quality: qualityName(quality),
 });
 
+const NO_PAIRS: MatchedPair[] = [];
+
 /** Each two sensors that have a standard deviation as a matched pair; the larger of the two holds for them. */
 function matchedPairs(tower: TowerLayout, tEnd: number): MatchedPair[] {
+  if (!tower.sensors.some(({ versions }) => versions.some(({ pairSigma }) => pairSigma !== null)))
+    return NO_PAIRS;
   const matched = tower.sensors
     .filter(({ quantity }) => quantity === 'air temperature')
     .flatMap((sensor) => versionAt(sensor, tEnd) ?? [])
@@ -47,6 +55,9 @@ function matchedPairs(tower: TowerLayout, tEnd: number): MatchedPair[] {
     })),
   );
 }
+
+/** The layers of a profile with all that is derived from each. */
+export const layersIn = ({ profile, isAir }: Findings): readonly Layer[] => (isAir ? layersOf(profile) : []);
 
 /**
  * A tower whose screening only reports shows what its sensors said, even where that is no temperature of air:
@@ -75,10 +86,11 @@ export function findingsOf(facts: BlockFacts, tower: TowerLayout): Findings {
   const impossible = tower.reportOnly ? withImpossibleLevels(profile, facts.levels) : undefined;
   const inversions = findInversions(impossible ?? profile, { form, embedDepthM });
   if (impossible) return nothingElse(impossible, inversions);
-  const layers = layersOf(profile);
   return {
-    ...{ profile, layers, inversions },
-    stableDepthM: stableDepth(profile, layers).moistM,
+    profile,
+    isAir: true,
+    inversions,
+    stableDepthM: stableDepth(profile).moistM,
     heatDeficitJPerM2: heatDeficitJPerM2(profile, undefined, inversions),
     breakUpTemperatureC: breakUpTemperatureC(inversions.surface),
   };
@@ -87,7 +99,7 @@ export function findingsOf(facts: BlockFacts, tower: TowerLayout): Findings {
 const nothingElse = (profile: Profile, inversions: InversionFinding): Findings => {
   const unknown = notKnown('a level gave what is no temperature of air');
   return {
-    ...{ profile, inversions, layers: [] },
+    ...{ profile, inversions, isAir: false },
     ...{ stableDepthM: unknown, heatDeficitJPerM2: unknown, breakUpTemperatureC: unknown },
   };
 };

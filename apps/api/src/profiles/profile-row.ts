@@ -44,7 +44,6 @@ type Stored = number | string | null;
 
 const finite = (value: number | null): number | null =>
   value !== null && Number.isFinite(value) ? value : null;
-const bounds = ({ lo, hi }: Quantity): [Stored, Stored] => [finite(lo), finite(hi)];
 const number = (quantity: Quantity): Stored => (quantity.lo === quantity.hi ? finite(quantity.lo) : null);
 const truth = (value: Truth): Stored => (value === 'not known' ? null : Number(value === 'true'));
 
@@ -52,8 +51,8 @@ const truth = (value: Truth): Stored => (value === 'not known' ? null : Number(v
 export function profileRow(facts: BlockFacts, findings: Findings): Stored[] {
   const { surface, lid } = findings.inversions;
   const { inversion } = surface;
-  const heat = findings.heatDeficitJPerM2;
-  const heatMJ = { lo: mjPerM2FromJPerM2(heat.lo), hi: mjPerM2FromJPerM2(heat.hi) };
+  const { depthM: depth, strengthC: strength } = surface;
+  const { stableDepthM: stable, heatDeficitJPerM2: heat, breakUpTemperatureC: breakUp } = findings;
   return [
     facts.towerId,
     facts.tEnd,
@@ -62,19 +61,25 @@ export function profileRow(facts: BlockFacts, findings: Findings): Stored[] {
     surface.reason ?? null,
     inversion?.baseM ?? null,
     inversion?.topM ?? null,
-    ...bounds(surface.depthM),
-    ...bounds(surface.strengthC),
+    finite(depth.lo),
+    finite(depth.hi),
+    finite(strength.lo),
+    finite(strength.hi),
     number(surface.strengthWithinTowerC),
     finite(inversion?.sigmaC ?? null),
     finite(surface.probability),
     number(surface.gradientCPer100M),
     inversion?.open ?? 'no',
     truth(surface.sure),
-    ...bounds(findings.stableDepthM),
+    finite(stable.lo),
+    finite(stable.hi),
     number(lid.baseM),
-    ...bounds(lid.strengthC),
-    ...bounds(heatMJ),
-    ...bounds(findings.breakUpTemperatureC),
+    finite(lid.strengthC.lo),
+    finite(lid.strengthC.hi),
+    finite(mjPerM2FromJPerM2(heat.lo)),
+    finite(mjPerM2FromJPerM2(heat.hi)),
+    finite(breakUp.lo),
+    finite(breakUp.hi),
     findings.profile.pressureHPa,
     Number(findings.profile.pressureAssumed),
     JSON.stringify(facts.other),

@@ -1,4 +1,4 @@
-import { mjPerM2FromJPerM2, type Inversion, type Layer } from '@lidwatch/atmosphere';
+import { mjPerM2FromJPerM2, type Inversion, type Layer, type Profile } from '@lidwatch/atmosphere';
 import { qualityName } from '@lidwatch/contracts';
 import { toIso } from '../common/instants';
 import type { TowerLayout } from '../towers/tower-layout';
@@ -10,7 +10,7 @@ import type {
   SurfaceInversionDto,
 } from './dto/profile.dto';
 import { showRange } from './dto/range-value.dto';
-import { findingsOf, type Findings } from './findings';
+import { findingsOf, layersIn } from './findings';
 
 const unknownLayer = {
   ...{ lapseRateKPerKm: null, sigmaKPerKm: null, textbookClass: null, probabilityTRises: null },
@@ -33,7 +33,7 @@ const bareRate = (lowerC: number, upperC: number, thicknessM: number): number | 
   return Number.isFinite(rate) ? rate : null;
 };
 
-function showLayers({ profile, layers }: Findings): ProfileLayerDto[] {
+function showLayers(profile: Profile, layers: readonly Layer[]): ProfileLayerDto[] {
   return profile.levels.slice(1).map((upper, i) => {
     const lower = profile.levels[i]!;
     const heights = { lowerM: lower.heightM, upperM: upper.heightM };
@@ -87,7 +87,7 @@ export function showProfile(facts: BlockFacts, rev: number, tower: TowerLayout):
     blockMinutes: tower.blockS / 60,
     rev,
     levels: facts.levels.map(showLevel),
-    layers: showLayers(findings),
+    layers: showLayers(findings.profile, layersIn(findings)),
     surface: surface.finding,
     reason: surface.reason,
     inversion: surface.inversion ? showInversion(surface.inversion, tower.inversionForm) : null,

@@ -48,6 +48,6 @@ export class ScreeningStore {
   /** Writes block means and gives those that were new or differed. */
   async writeMeans(means: readonly BlockMean[]): Promise<{ sensorId: number; tEnd: number }[]> {
     if (means.length === 0) return [];
-    return this.sql.returning(WRITE_MEANS, [JSON.stringify(means.map(meanRow))]);
+    return this.sql.returning(WRITE_MEANS, [`[${means.map(meanRow).join()}]`]);
   }
 }

@@ -1,6 +1,6 @@
 import { atLeast, exactly, notKnown, type Quantity } from '../bounds';
 import { DRY_ADIABATIC_LAPSE_RATE_K_PER_KM } from '../constants';
-import { isMeasured, layersOf, SAME_LAPSE_RATE_K_PER_KM, type Layer, type Profile } from '../profile';
+import { isMeasured, layerRates, SAME_LAPSE_RATE_K_PER_KM, type LayerRate, type Profile } from '../profile';
 
 /** Over what depth, from the lowest level up, air that is lifted comes back. */
 export interface StableDepth {
@@ -10,7 +10,11 @@ export interface StableDepth {
   readonly dryM: Quantity;
 }
 
-const depth = (profile: Profile, layers: readonly Layer[], stable: (layer: Layer) => boolean): Quantity => {
+const depth = (
+  profile: Profile,
+  layers: readonly LayerRate[],
+  stable: (layer: LayerRate) => boolean,
+): Quantity => {
   const lowest = profile.levels[0];
   if (lowest === undefined) return notKnown('the tower gave no temperature level');
   if (!isMeasured(lowest)) return notKnown(`the lowest level, at ${lowest.heightM} m, gave nothing`);
@@ -36,7 +40,10 @@ const depth = (profile: Profile, layers: readonly Layer[], stable: (layer: Layer
  * Units: m, counted from the lowest level. Valid: any profile; "at least" when the stable layers reach the highest
  * level or a missing one; not known without the lowest level. Source: [AMSGlossary] static stability.
  */
-export function stableDepth(profile: Profile, layers: readonly Layer[] = layersOf(profile)): StableDepth {
+export function stableDepth(
+  profile: Profile,
+  layers: readonly LayerRate[] = layerRates(profile),
+): StableDepth {
   const same = SAME_LAPSE_RATE_K_PER_KM;
   return {
     moistM: depth(profile, layers, (l) => l.lapseRateKPerKm <= l.moistLapseRateKPerKm + same),

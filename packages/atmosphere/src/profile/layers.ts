@@ -27,23 +27,29 @@ export const DEFAULT_LAYER_SETTINGS: LayerSettings = {
   sureFromProbability: SURE_FROM_PROBABILITY,
 };
 
-/** The air between two adjacent levels that have a temperature. */
-export interface Layer extends Displacement {
+/** How fast the air between two adjacent levels that have a temperature cools upward, and how fast it may. */
+export interface LayerRate {
   readonly baseM: number;
   readonly topM: number;
+  /** Γ = −dT/dz, K/km, positive where it cools upward. */
+  readonly lapseRateKPerKm: number;
+  /** Γm at the layer's mean temperature and pressure, K/km. */
+  readonly moistLapseRateKPerKm: number;
+  /** Declared levels between the two that gave no value, m: the layer is read across them. */
+  readonly missingBetweenM: readonly number[];
+}
+
+/** The air between two adjacent levels that have a temperature. */
+export interface Layer extends Displacement, LayerRate {
   readonly thicknessM: number;
   readonly meanTemperatureC: number;
   readonly meanPressureHPa: number;
   /** T(top) − T(base), °C. */
   readonly differenceC: number;
   readonly sigmaDifferenceC: number | null;
-  /** Γ = −dT/dz, K/km, positive where it cools upward. */
-  readonly lapseRateKPerKm: number;
   readonly sigmaKPerKm: number | null;
   /** +dT/dz, °C/100 m. */
   readonly gradientCPer100M: number;
-  /** Γm at the layer's mean temperature and pressure, K/km. */
-  readonly moistLapseRateKPerKm: number;
   readonly potentialTemperatureDifferenceK: number;
   readonly meanPotentialTemperatureK: number;
   /** Textbook class of the estimate. */
@@ -56,8 +62,6 @@ export interface Layer extends Displacement {
   readonly saturated: Truth;
   /** Height of the humidity reading that says saturated, m. */
   readonly saturatedAtM: number | null;
-  /** Declared levels between the two that gave no value, m: the layer is read across them. */
-  readonly missingBetweenM: readonly number[];
   readonly suspect: boolean;
 }
 
@@ -72,6 +76,43 @@ const pressuresHPa = (profile: Profile, levels: readonly MeasuredLevel[]): numbe
     return pressureHPa;
   });
 };
+
+const NONE_MISSING: readonly number[] = [];
+
+const missingBetweenM = (profile: Profile, lower: MeasuredLevel, upper: MeasuredLevel): readonly number[] => {
+  const between = profile.levels.filter((l) => l.heightM > lower.heightM && l.heightM < upper.heightM);
+  return between.length === 0 ? NONE_MISSING : between.map((l) => l.heightM);
+};
+
+const lapseRateKPerKm = (lower: MeasuredLevel, upper: MeasuredLevel): number =>
+  0 - (1000 * (upper.temperatureC - lower.temperatureC)) / (upper.heightM - lower.heightM);
+
+/**
+ * The lapse rates of the layers between adjacent levels that have a temperature, from the ground up: of `layersOf`
+ * what the stable depth needs, at a third of the cost.
+ *
+ * Units: m, K/km. Valid: any profile; fewer than two measured levels give none. Source: [AMSGlossary] lapse rate.
+ */
+export function layerRates(profile: Profile): readonly LayerRate[] {
+  const levels = measuredLevels(profile);
+  if (levels.length < 2) return [];
+  const pressures = pressuresHPa(profile, levels);
+  const rates: LayerRate[] = [];
+  for (let i = 0; i + 1 < levels.length; i += 1) {
+    const [lower, upper] = [levels[i]!, levels[i + 1]!];
+    rates.push({
+      baseM: lower.heightM,
+      topM: upper.heightM,
+      lapseRateKPerKm: lapseRateKPerKm(lower, upper),
+      moistLapseRateKPerKm: moistLapseRateKPerKm(
+        (lower.temperatureC + upper.temperatureC) / 2,
+        (pressures[i]! + pressures[i + 1]!) / 2,
+      ),
+      missingBetweenM: missingBetweenM(profile, lower, upper),
+    });
+  }
+  return rates;
+}
 
 const riseSure = (probability: number | undefined, suspect: boolean, from: number): Truth => {
   if (probability === undefined) return 'not known';
@@ -98,7 +139,7 @@ export function layersOf(profile: Profile, settings: Partial<LayerSettings> = {}
     const meanPressureHPa = (pressures[i]! + pressures[i + 1]!) / 2;
     const differenceC = upper.temperatureC - lower.temperatureC;
     const sigmaDifferenceC = sigmaBetween(lower, upper, profile.matchedPairs);
-    const rate = 0 - (1000 * differenceC) / thicknessM;
+    const rate = lapseRateKPerKm(lower, upper);
     const sigmaKPerKm = sigmaDifferenceC === null ? null : (1000 * sigmaDifferenceC) / thicknessM;
     const moist = moistLapseRateKPerKm(meanTemperatureC, meanPressureHPa);
     const thetaLower = potentialTemperatureK(lower.temperatureC + ZERO_CELSIUS_K, pressures[i]!);
@@ -128,9 +169,7 @@ export function layersOf(profile: Profile, settings: Partial<LayerSettings> = {}
       saturated: wet.saturated,
       saturatedAtM: wet.atM,
       ...displacement(rate, sigmaKPerKm, moist, wet.saturated),
-      missingBetweenM: profile.levels
-        .filter((l) => l.heightM > lower.heightM && l.heightM < upper.heightM)
-        .map((l) => l.heightM),
+      missingBetweenM: missingBetweenM(profile, lower, upper),
       suspect,
     };
   });

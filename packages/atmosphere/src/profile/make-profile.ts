@@ -67,22 +67,33 @@ const pressureOf = (air: ProfileAir, notes: string[]): { pressureHPa: number; pr
  */
 export function makeProfile(levels: readonly Level[], air: ProfileAir = {}): Profile {
   const notes: string[] = [];
-  const byHeight = new Map<number, ProfileLevel[]>();
-  for (const level of levels) {
-    if (!Number.isFinite(level.heightM)) {
-      notes.push('a level without a height was set aside');
-      continue;
-    }
-    const same = byHeight.get(level.heightM) ?? [];
-    same.push(arranged(level, notes));
-    byHeight.set(level.heightM, same);
-  }
-  const heights = [...byHeight.keys()].sort((a, b) => a - b);
+  const arrangedLevels = isAscending(levels)
+    ? levels.map((level) => arranged(level, notes))
+    : byHeight(levels, notes);
   return {
-    levels: heights.map((heightM) => merged(byHeight.get(heightM)!, notes)),
+    levels: arrangedLevels,
     ...pressureOf(air, notes),
     matchedPairs: air.matchedPairs ?? [],
     humidity: air.humidity ?? [],
     notes: notes.sort(),
   };
 }
+
+/** Whether the heights are numbers and each above the one before, as they mostly come. */
+const isAscending = (levels: readonly Level[]): boolean =>
+  levels.every(({ heightM }, i) => Number.isFinite(heightM) && (i === 0 || heightM > levels[i - 1]!.heightM));
+
+const byHeight = (levels: readonly Level[], notes: string[]): ProfileLevel[] => {
+  const atHeight = new Map<number, ProfileLevel[]>();
+  for (const level of levels) {
+    if (!Number.isFinite(level.heightM)) {
+      notes.push('a level without a height was set aside');
+      continue;
+    }
+    const same = atHeight.get(level.heightM) ?? [];
+    same.push(arranged(level, notes));
+    atHeight.set(level.heightM, same);
+  }
+  const heights = [...atHeight.keys()].sort((a, b) => a - b);
+  return heights.map((heightM) => merged(atHeight.get(heightM)!, notes));
+};

@@ -27,6 +27,8 @@ export interface Series {
   readonly value: Float64Array;
   /** 1 where the value may serve as evidence: present, within the physical range and no spike. */
   readonly evidence: Uint8Array;
+  /** Where the last look-up ended: the checks go forward in time, so that the next one is close by. */
+  readonly cursor: { at: number };
 }
 
 /**
@@ -39,26 +41,36 @@ export interface Series {
 export function seriesOf(sensor: SensorSeries): Series {
   if (!(sensor.intervalS > 0))
     throw new RangeError(`The interval of sensor ${sensor.sensorId} must be above 0 s.`);
-  const sorted = [...sensor.readings].sort((a, b) => a.tEnd - b.tEnd);
-  const readings = sorted.filter((r, i) => i === 0 || r.tEnd !== sorted[i - 1]!.tEnd);
-  if (readings.length < sorted.length) refuseContradictions(sensor.sensorId, sorted);
-  const value = Float64Array.from(readings, (r) => (Number.isFinite(r.value) ? r.value! : NaN));
+  const readings = inOrder(sensor);
   const limits = { ...DEFAULT_LIMITS[sensor.quantity], ...sensor.limits };
+  const { lowest, highest } = limits.physical;
+  const n = readings.length;
+  const [t, value, evidence] = [new Float64Array(n), new Float64Array(n), new Uint8Array(n)];
+  for (let i = 0; i < n; i += 1) {
+    const reading = readings[i]!;
+    const v = Number.isFinite(reading.value) ? reading.value! : NaN;
+    t[i] = reading.tEnd;
+    value[i] = v;
+    evidence[i] = v >= lowest && v <= highest ? 1 : 0;
+  }
   return {
     sensorId: sensor.sensorId,
     quantity: sensor.quantity,
     heightM: sensor.heightM,
     intervalS: sensor.intervalS,
     sigma: sensor.sigma ?? 0,
-    limits,
-    readings,
-    t: Float64Array.from(readings, (r) => r.tEnd),
-    value,
-    evidence: Uint8Array.from(value, (v) =>
-      v >= limits.physical.lowest && v <= limits.physical.highest ? 1 : 0,
-    ),
+    ...{ limits, readings, t, value, evidence },
+    cursor: { at: 0 },
   };
 }
+
+/** Readings ascending, one per instant; mostly they come so. */
+const inOrder = ({ sensorId, readings }: SensorSeries): readonly RawReading[] => {
+  if (readings.every((r, i) => i === 0 || r.tEnd > readings[i - 1]!.tEnd)) return readings;
+  const sorted = [...readings].sort((a, b) => a.tEnd - b.tEnd);
+  refuseContradictions(sensorId, sorted);
+  return sorted.filter((r, i) => i === 0 || r.tEnd !== sorted[i - 1]!.tEnd);
+};
 
 const refuseContradictions = (sensorId: string, sorted: readonly RawReading[]): void => {
   sorted.forEach((reading, i) => {
@@ -87,6 +99,14 @@ export function firstFrom(t: Float64Array, instant: number): number {
   return low;
 }
 
+/** As `firstFrom`, looking first where the last look-up ended and one further. */
+const firstFromCursor = ({ t, cursor }: Series, instant: number): number => {
+  for (let at = cursor.at; at <= cursor.at + 1 && at <= t.length; at += 1) {
+    if ((at === t.length || t[at]! >= instant) && (at === 0 || t[at - 1]! < instant)) return (cursor.at = at);
+  }
+  return (cursor.at = firstFrom(t, instant));
+};
+
 /**
  * The value that may serve as evidence nearest to an instant, within half an interval; NaN where there is none.
  *
@@ -95,7 +115,7 @@ export function firstFrom(t: Float64Array, instant: number): number {
  */
 export function evidenceNear(series: Series, instant: number): number {
   const { t, value, evidence, intervalS } = series;
-  const after = firstFrom(t, instant);
+  const after = firstFromCursor(series, instant);
   const toAfter = after < t.length ? t[after]! - instant : Infinity;
   const toBefore = after > 0 ? instant - t[after - 1]! : Infinity;
   const nearest = toBefore <= toAfter ? after - 1 : after;

@@ -41,18 +41,21 @@ const unusual = (
   sunDeg: number | null,
   limits: VerticalLimits,
 ): { reason: string; rises: boolean } | undefined => {
-  const said100 = `${said(differenceC)} °C over ${said(thicknessM)} m`;
   const perMetre = differenceC / thicknessM;
-  if (differenceC > limits.riseC) return { reason: `${said100} exceeds +${limits.riseC} °C`, rises: true };
-  if (differenceC < -limits.fallC) return { reason: `${said100} exceeds −${limits.fallC} °C`, rises: false };
+  const because = (why: string, rises: boolean) => ({
+    reason: `${said(differenceC)} °C over ${said(thicknessM)} m ${why}`,
+    rises,
+  });
+  if (differenceC > limits.riseC) return because(`exceeds +${limits.riseC} °C`, true);
+  if (differenceC < -limits.fallC) return because(`exceeds −${limits.fallC} °C`, false);
   if (sunDeg !== null && sunDeg > 0 && perMetre > limits.risePerMetreByDayC) {
-    return { reason: `${said100} exceeds +${limits.risePerMetreByDayC} °C/m by day`, rises: true };
+    return because(`exceeds +${limits.risePerMetreByDayC} °C/m by day`, true);
   }
   if (sunDeg !== null && sunDeg <= 0 && perMetre < -limits.fallPerMetreAtNightC) {
-    return { reason: `${said100} exceeds −${limits.fallPerMetreAtNightC} °C/m at night`, rises: false };
+    return because(`exceeds −${limits.fallPerMetreAtNightC} °C/m at night`, false);
   }
   if (-1000 * perMetre > AUTOCONVECTIVE_LAPSE_RATE_K_PER_KM) {
-    return { reason: `${said100} is beyond the autoconvective lapse rate`, rises: false };
+    return because('is beyond the autoconvective lapse rate', false);
   }
   return undefined;
 };

@@ -9,8 +9,11 @@ const DENOMINATOR = [
   637.333633378831, 793.826512519948, 440.413735824752,
 ];
 
-const polynomial = (coefficients: readonly number[], x: number): number =>
-  coefficients.reduce((sum, c) => sum * x + c, 0);
+const polynomial = (coefficients: readonly number[], x: number): number => {
+  let sum = 0;
+  for (const c of coefficients) sum = sum * x + c;
+  return sum;
+};
 
 const tail = (x: number): number => {
   const fraction = x + 1 / (x + 2 / (x + 3 / (x + 4 / (x + 0.65))));

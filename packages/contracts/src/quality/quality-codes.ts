@@ -10,11 +10,12 @@ export type Quality = keyof typeof qualityCodes;
 /** A quality as it is stored. */
 export type QualityCode = (typeof qualityCodes)[Quality];
 
+/** By their codes, which count from 0 in this order. */
 const names = Object.keys(qualityCodes) as Quality[];
 
 /** The name of a stored quality. Throws a RangeError for a number that is no quality. */
 export function qualityName(code: number): Quality {
-  const name = names.find((each) => qualityCodes[each] === code);
+  const name = names[code];
   if (!name) throw new RangeError(`${code} is no quality code; the codes are 0 to ${names.length - 1}.`);
   return name;
 }

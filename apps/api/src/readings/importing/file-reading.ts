@@ -85,12 +85,17 @@ export class FileReading {
 }
 
 /** Readings as columns. */
-export const columnsOf = (rows: readonly ParsedReading[]): ReadingColumns => ({
-  sensorId: Float64Array.from(rows, (row) => row.sensorId),
-  tEnd: Float64Array.from(rows, (row) => row.tEnd),
-  value: Float64Array.from(rows, (row) => row.value),
-  rowNo: Float64Array.from(rows, (row) => row.rowNo),
-});
+export function columnsOf(rows: readonly ParsedReading[]): ReadingColumns {
+  const column = (): Float64Array => new Float64Array(rows.length);
+  const columns = { sensorId: column(), tEnd: column(), value: column(), rowNo: column() };
+  rows.forEach((row, i) => {
+    columns.sensorId[i] = row.sensorId;
+    columns.tEnd[i] = row.tEnd;
+    columns.value[i] = row.value;
+    columns.rowNo[i] = row.rowNo;
+  });
+  return columns;
+}
 
 const NOTHING: PieceRead = { rows: columnsOf([]), refused: [], ignoredColumns: [], fresh: undefined };
 

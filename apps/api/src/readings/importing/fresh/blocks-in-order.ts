@@ -33,7 +33,7 @@ export class BlocksInOrder {
       const own = this.tower.sensors.flatMap(
         (sensor, i) => blockMean(this.tower, sensor, series[i]!, flags[i]!, tEnd) ?? [],
       );
-      for (const mean of own) means.push(JSON.stringify(meanRow(mean)));
+      for (const mean of own) means.push(meanRow(mean));
       const profile = this.profileOf(tEnd, own);
       if (profile === undefined) failedEnds.push(tEnd);
       else {
