@@ -60,7 +60,7 @@ export function SourceForm({ towerId, source, mayUseHttp, onDone, onCancel }: So
         )}
       </EntryForm>
       <Button kind="quiet" onClick={onCancel} alignSelf="flex-start">
-        Leave it as it is
+        {source ? 'Leave it as it is' : 'Add none'}
       </Button>
     </Stack>
   );

@@ -38,7 +38,7 @@ function settingsOf({ kind, intervalSeconds, auth, mapping }: Source): string {
 /** One source: how it stands, and what can be done with it. */
 export function SourceRow({ source, zone, mayUseHttp, onChanged }: SourceRowProps) {
   const [doing, setDoing] = useState<'change' | 'retire'>();
-  const { tone, text } = sourceState(source, zone, useNow());
+  const { tone, title, text } = sourceState(source, zone, useNow());
   const collect = useAct(async (id: number) => {
     await collectSource(id);
     onChanged();
@@ -56,7 +56,13 @@ export function SourceRow({ source, zone, mayUseHttp, onChanged }: SourceRowProp
         <SmallTitle overflowWrap="anywhere">{place}</SmallTitle>
         <Muted small>{settingsOf(source)}</Muted>
       </Box>
-      {tone === 'failing' ? <Message tone="warn">{text}</Message> : <Box>{text}</Box>}
+      {tone === 'failing' ? (
+        <Message tone="warn" title={title}>
+          {text}
+        </Message>
+      ) : (
+        <Box>{text}</Box>
+      )}
       <Refusal problem={collect.problem} />
       {doing === 'change' ? (
         <SourceForm
@@ -73,18 +79,18 @@ export function SourceRow({ source, zone, mayUseHttp, onChanged }: SourceRowProp
               size="sm"
               busy={collect.busy || source.collecting}
               onClick={() => void collect.run(source.id)}
-              aria-label={`Collect ${place} now`}
+              aria-label={`Collect now: ${place}`}
             >
               Collect now
             </Button>
           )}
           {mayChange && (
-            <Button size="sm" onClick={() => setDoing('change')} aria-label={`Change ${place}`}>
+            <Button size="sm" onClick={() => setDoing('change')} aria-label={`Change: ${place}`}>
               Change
             </Button>
           )}
           {mayChange && (
-            <Button size="sm" onClick={() => setDoing('retire')} aria-label={`Retire ${place}`}>
+            <Button size="sm" onClick={() => setDoing('retire')} aria-label={`Retire: ${place}`}>
               Retire
             </Button>
           )}

@@ -1,5 +1,5 @@
 import type { Source } from '../types';
-import { sourceState } from './source-state';
+import { sourceState, type SourceState } from './source-state';
 
 const now = Date.parse('2026-01-16T01:00:00Z');
 const at = (minutes: number) => new Date(now + minutes * 60_000).toISOString();
@@ -24,34 +24,39 @@ const source: Source = {
 };
 
 describe('how a source stands', () => {
-  it.each<[Partial<Source>, string, string]>([
-    [{}, 'fine', 'Collected 3 min ago: 12 new readings. Next at 18:02.'],
+  it.each<[Partial<Source>, SourceState]>([
+    [{}, { tone: 'fine', text: 'Collected 3 min ago: 12 new readings. Next at 18:02 MST.' }],
     [
       { lastResult: 'Not changed since the last time.', nextAt: at(-1) },
-      'fine',
-      'Collected 3 min ago: not changed since the last time. Next: now.',
+      { tone: 'fine', text: 'Collected 3 min ago: not changed since the last time. Next: now.' },
     ],
-    [{ nextAt: at(20 * 60) }, 'fine', 'Collected 3 min ago: 12 new readings. Next at Fri 16 Jan, 14:00.'],
-    [{ lastAt: null, nextAt: null }, 'quiet', 'Not collected yet: that happens within half a minute.'],
-    [{ collecting: true }, 'quiet', 'Being collected now.'],
-    [{ kind: 'push' }, 'quiet', 'The site sends its readings with a key, see below.'],
+    [
+      { nextAt: at(20 * 60) },
+      { tone: 'fine', text: 'Collected 3 min ago: 12 new readings. Next at Fri 16 Jan, 14:00 MST.' },
+    ],
+    [
+      { lastAt: null, nextAt: null },
+      { tone: 'quiet', text: 'Not collected yet: that happens within half a minute.' },
+    ],
+    [{ collecting: true }, { tone: 'quiet', text: 'Being collected now.' }],
+    [{ kind: 'push' }, { tone: 'quiet', text: 'The site sends its readings with a key, see below.' }],
     [
       { failures: 1, failingSince: at(-3), lastOkAt: null, lastResult: '"mast" is not there.' },
-      'failing',
-      'Failing since 17:57, tried once: "mast" is not there. It is tried again at 18:02. It has never worked so far.',
+      {
+        tone: 'failing',
+        title: 'Failing since 17:57 MST, tried once',
+        text: '"mast" is not there. It is tried again at 18:02 MST. It has never worked so far.',
+      },
     ],
     [
+      { failures: 9, failingSince: at(-45 * 60), lastOkAt: at(-46 * 60), lastResult: 'Gone.', nextAt: null },
       {
-        failures: 9,
-        failingSince: at(-45 * 60),
-        lastOkAt: at(-46 * 60),
-        lastResult: 'It is gone.',
-        nextAt: null,
+        tone: 'failing',
+        title: 'Failing since Tue 13 Jan, 21:00 MST, tried 9 times',
+        text: 'Gone. It is tried again now. It last worked 46 h ago.',
       },
-      'failing',
-      'Failing since Tue 13 Jan, 21:00, tried 9 times: It is gone. It is tried again now. It last worked 46 h ago.',
     ],
-  ])('%j', (change, tone, text) => {
-    expect(sourceState({ ...source, ...change }, 'America/Denver', now)).toEqual({ tone, text });
+  ])('%j', (change, state) => {
+    expect(sourceState({ ...source, ...change }, 'America/Denver', now)).toEqual(state);
   });
 });

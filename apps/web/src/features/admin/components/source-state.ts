@@ -4,6 +4,8 @@ import type { Source } from '../types';
 /** How a source stands. */
 export interface SourceState {
   tone: 'fine' | 'failing' | 'quiet';
+  /** Since when it fails. */
+  title?: string;
   /** One calm sentence or a few. */
   text: string;
 }
@@ -17,10 +19,11 @@ export function placeOf({ kind, path, url }: Pick<Source, 'kind' | 'path' | 'url
 /** "Collected" sentences go on after a colon, so that their first word is no beginning any more. */
 const goingOn = (sentence: string): string => sentence.charAt(0).toLowerCase() + sentence.slice(1);
 
-/** "10:15", or with the day where it is not within half a day. */
+/** "10:15 MST", or with the day where it is not within half a day. */
 function when(instant: string, zone: string, nowMs: number): string {
+  const inFull = dayAndTime(instant, zone);
   const near = Math.abs(Date.parse(instant) - nowMs) < 12 * 3_600_000;
-  return near ? clockTime(instant, zone) : dayAndTime(instant, zone, { zoneName: false });
+  return near ? `${clockTime(instant, zone)} ${inFull.split(' ').at(-1)}` : inFull;
 }
 
 /** How a source stands, as its list says it. Times are in the tower's zone. */
@@ -40,5 +43,9 @@ export function sourceState(source: Source, zone: string, nowMs: number): Source
   const before =
     lastOkAt === null ? 'It has never worked so far.' : `It last worked ${ago(lastOkAt, nowMs)}.`;
   const since = when(failingSince ?? lastAt, zone, nowMs);
-  return { tone: 'failing', text: `Failing since ${since}, ${tries}: ${lastResult ?? ''} ${next} ${before}` };
+  return {
+    tone: 'failing',
+    title: `Failing since ${since}, ${tries}`,
+    text: `${lastResult ?? ''} ${next} ${before}`,
+  };
 }
