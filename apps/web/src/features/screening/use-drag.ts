@@ -3,6 +3,8 @@ import { useRef, type MouseEvent, type PointerEvent, type RefObject } from 'reac
 
 /** Less than this is a click, px. */
 const LEAST_PX = 4;
+/** A click so near to a point opens it, px. */
+const NEAR_PX = 24;
 
 /** What may be done with the pointer over a chart. */
 interface Pointing {
@@ -36,9 +38,12 @@ export function useDrag(chart: RefObject<Chart<'line'> | null>, { onDraw, onPoin
       start.current = null;
     },
     onClick: (event: MouseEvent) => {
-      const mode = { axis: 'xy', intersect: true } as const;
+      const mode = { axis: 'xy', intersect: false } as const;
       const [hit] = chart.current?.getElementsAtEventForMode(event.nativeEvent, 'nearest', mode, false) ?? [];
-      if (hit && !drawn.current) onPoint(hit.datasetIndex, hit.index);
+      if (!hit || drawn.current) return;
+      const { offsetX, offsetY } = event.nativeEvent;
+      if (Math.hypot(hit.element.x - offsetX, hit.element.y - offsetY) <= NEAR_PX)
+        onPoint(hit.datasetIndex, hit.index);
     },
     onPointerCancel: () => {
       start.current = null;

@@ -124,7 +124,7 @@ function RawPart({
       )}
       <Flex gap="3" align="flex-start" wrap="wrap">
         <Muted small flex="1" minW="240px">
-          {words} Triangle: suspect; cross: failed; dashed frame: set by a person
+          {words} A reading opens by a click. Triangle: suspect; cross: failed; dashed frame: set by a person
           {own.some(({ points }) => points.some(({ corrected }) => corrected !== undefined)) &&
             '; dashed line: corrected'}
           {own.some(({ thinned }) => thinned) &&
