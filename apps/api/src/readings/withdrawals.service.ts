@@ -95,36 +95,53 @@ export class WithdrawalsService implements OnApplicationBootstrap {
       [id],
     );
     const { blockS } = await this.layouts.of(towerId);
-    const blocks = { first: Infinity, last: -Infinity };
+    const prepared = await this.prepare({ towerId, name, byUser, blockS }, spans);
+    const marked = new Set<number>();
     for (const span of spans) {
       let after = span.t0 - 1;
       for (;;) {
-        const last = await this.work.run(
+        const taken = await this.work.run(
           () => this.takeSome(id, towerId, blockS, { ...span, t0: after }),
           'bulk',
         );
-        if (last === undefined) break;
-        blocks.first = Math.min(blocks.first, blockEndOf(after + 1, blockS));
-        blocks.last = Math.max(blocks.last, blockEndOf(last, blockS));
-        after = last;
+        if (taken === undefined) break;
+        taken.blocks.forEach((t) => marked.add(t));
+        after = taken.last;
       }
     }
     await this.work.run(async () => {
       await this.sql.run(`UPDATE import SET state = 'withdrawn' WHERE id = $1`, [id]);
-      if (blocks.first > blocks.last) return;
-      const cause = `Import of "${name}" undone`;
-      const span = { t0: blocks.first - 1, t1: blocks.last };
-      await this.rework.begin({ towerId, cause, ...(byUser === null ? {} : { byUser }), ...span });
+      if (prepared !== null) await this.rework.follow(prepared, marked.size);
     }, 'bulk');
   }
 
-  /** Takes the next readings of one sensor back; gives the last instant, or nothing where none is left. */
+  /** Keeps how the findings are before anything is taken back; null where nothing was brought. */
+  private async prepare(
+    {
+      towerId,
+      name,
+      byUser,
+      blockS,
+    }: { towerId: number; name: string; byUser: number | null; blockS: number },
+    spans: readonly SensorSpan[],
+  ): Promise<number | null> {
+    if (spans.length === 0) return null;
+    const first = blockEndOf(Math.min(...spans.map(({ t0 }) => t0)), blockS) - blockS;
+    const last = blockEndOf(Math.max(...spans.map(({ t1 }) => t1)), blockS);
+    const cause = `Import of "${name}" undone`;
+    return this.rework.prepare({
+      ...{ towerId, cause, t0: first, t1: last },
+      ...(byUser !== null && { byUser }),
+    });
+  }
+
+  /** Takes the next readings of one sensor back; gives the last instant and the blocks, or nothing where none is left. */
   private async takeSome(
     importId: number,
     towerId: number,
     blockS: number,
     { sensorId, t0, t1 }: SensorSpan,
-  ): Promise<number | undefined> {
+  ): Promise<{ last: number; blocks: readonly number[] } | undefined> {
     const rows = await this.sql.all<{ t_end: number }>(HELD, [sensorId, t0, t1, importId, AT_ONCE]);
     if (rows.length === 0) return undefined;
     const instants = rows.map((row) => row.t_end);
@@ -137,6 +154,6 @@ export class WithdrawalsService implements OnApplicationBootstrap {
     const marks = blocks.map((t) => [towerId, t] as const);
     await this.dirty.mark(1, marks);
     await this.dirty.mark(2, marks);
-    return instants.at(-1);
+    return { last: instants.at(-1)!, blocks };
   }
 }

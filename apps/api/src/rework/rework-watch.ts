@@ -11,7 +11,9 @@ import { RuleTruths } from './rule-truths';
 
 const LOOK_EVERY_S = 3;
 const OPEN = `SELECT id, tower_id towerId, cause, t0, t1, begun_at begunAt, past_seq pastSeq, truths_before truthsBefore FROM rework
-  WHERE ended_at IS NULL ORDER BY id`;
+  WHERE ended_at IS NULL AND blocks > 0 ORDER BY id`;
+/** What a former process prepared and did not come to follow. */
+const LEFT = 'UPDATE rework SET blocks = 1 WHERE ended_at IS NULL AND blocks = 0';
 
 /** Ends a rework once nothing that depends on its change waits any more, and keeps what is different now. */
 @Injectable()
@@ -27,7 +29,8 @@ export class ReworkWatch implements OnModuleInit {
     private readonly clock: Clock,
   ) {}
 
-  onModuleInit(): void {
+  async onModuleInit(): Promise<void> {
+    await this.sql.run(LEFT);
     this.jobs.register('what was worked out anew', LOOK_EVERY_S, () => this.endFinished());
   }
 

@@ -15,18 +15,21 @@ export interface Rework {
   readonly t1?: number;
 }
 
+/** One whose span is known. */
+type Spanned = Rework & Required<Pick<Rework, 't0' | 't1'>>;
+
 interface Marked {
   readonly blocks: number;
   readonly first: number | null;
   readonly last: number | null;
 }
 
+const EVER_S = Number.MAX_SAFE_INTEGER;
 const MARKED = `SELECT count(*) blocks, min(t) first, max(t) last FROM dirty
   WHERE stage = 1 AND subject = $1 AND t > $2 AND t <= $3`;
-const BEGIN = `WITH one AS (SELECT 1)
+const KEEP = `WITH one AS (SELECT 1)
   INSERT INTO rework (tower_id, cause, by_user, t0, t1, begun_at, blocks, past_seq, truths_before)
-  SELECT $1, $2, $3, $4 - block_s, $5, $6, $7, (SELECT coalesce(max(seq), 0) FROM profile_past), $8
-  FROM one JOIN tower ON tower.id = $1 RETURNING id`;
+  SELECT $1, $2, $3, $4, $5, $6, $7, (SELECT coalesce(max(seq), 0) FROM profile_past), $8 FROM one RETURNING id`;
 
 /** Keeps what was changed and has it followed until everything that depends on it is worked out anew. */
 @Injectable()
@@ -41,20 +44,36 @@ export class ReworkService {
    * Begins the record of a change, in the caller's transaction and after its blocks were marked (`DirtyStages`). Gives
    * its id, or null where no block is marked and so nothing depends on the change yet.
    */
-  async begin({
-    towerId,
-    cause,
-    byUser,
-    t0 = 0,
-    t1 = Number.MAX_SAFE_INTEGER,
-  }: Rework): Promise<number | null> {
-    const now = this.clock.now();
-    const marked = await this.sql.get<Marked>(MARKED, [towerId, t0, Math.min(t1, now)]);
+  async begin(rework: Rework): Promise<number | null> {
+    const { towerId, t0 = 0, t1 = EVER_S } = rework;
+    const span = [towerId, t0, Math.min(t1, this.clock.now())];
+    const marked = await this.sql.get<Marked>(MARKED, span);
     if (!marked || marked.first === null || marked.last === null) return null;
-    const { first, last, blocks } = marked;
-    const truths = await this.truths.before(towerId, first, last, now);
-    const values = [towerId, cause, byUser ?? null, first, last, now, blocks, JSON.stringify(truths)];
-    const [made] = await this.sql.returning<{ id: number }>(BEGIN, values);
+    const tower = await this.sql.get<{ blockS: number }>('SELECT block_s blockS FROM tower WHERE id = $1', [
+      towerId,
+    ]);
+    return this.keep({ ...rework, t0: marked.first - tower!.blockS, t1: marked.last }, marked.blocks);
+  }
+
+  /**
+   * Keeps how things are before a change that takes several transactions; call it before the first mark, and `follow`
+   * after the last.
+   */
+  prepare(rework: Spanned): Promise<number> {
+    return this.keep(rework, 0);
+  }
+
+  /** Follows what was prepared: so many blocks have been marked. Where there are none nothing is kept of it. */
+  async follow(id: number, blocks: number): Promise<void> {
+    if (blocks > 0) await this.sql.run('UPDATE rework SET blocks = $2 WHERE id = $1', [id, blocks]);
+    else await this.sql.run('DELETE FROM rework WHERE id = $1', [id]);
+  }
+
+  private async keep({ towerId, cause, byUser, t0, t1 }: Spanned, blocks: number): Promise<number> {
+    const now = this.clock.now();
+    const truths = await this.truths.before(towerId, t0, t1, now);
+    const values = [towerId, cause, byUser ?? null, t0, t1, now, blocks, JSON.stringify(truths)];
+    const [made] = await this.sql.returning<{ id: number }>(KEEP, values);
     return made!.id;
   }
 }

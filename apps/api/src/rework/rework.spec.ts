@@ -1,3 +1,4 @@
+import { ReadingsService } from '../readings/readings.service';
 import { signInAs, type SignedInAgent } from '../testing/people';
 import { createTestApp, testNow, type TestApp } from '../testing/test-app';
 import { eveningRule, goBy, putRuleInForce } from '../testing/evening';
@@ -102,6 +103,32 @@ describe('what is worked out anew', () => {
       // 2 m is then warmer than 10 m: the inversion begins above.
       changes: { blocksChanged: 3, presentToAbsent: 3, inversionHoursBefore: 0.5, inversionHoursAfter: 0 },
     });
+  });
+
+  it('tells of an import that was taken back, from before its first step to after its last', async () => {
+    const [towerId] = valley.towerIds;
+    const sensorId = await lowest();
+    const rows = [0, 1, 2].map((i) => ({
+      sensorId,
+      tEnd: testNow + HOUR_S + i * 600,
+      value: -30,
+      rowNo: i + 2,
+    }));
+    const origin = { origin: 'upload' as const, name: 'wrong.csv' };
+    const readings = test.app.get(ReadingsService, { strict: false });
+    const { importId } = await readings.ingest(towerId!, rows, origin);
+    await finish();
+    await analyst.http.post(`/api/imports/${importId}/withdraw`).send({ reason: 'wrong logger' }).expect(200);
+    await finish();
+    const [last] = await reworks();
+    expect(last).toMatchObject({
+      cause: 'Import of "wrong.csv" undone',
+      by: analyst.name,
+      blocks: 3,
+      pending: 0,
+    });
+    expect(last!.changes!.blocksChanged).toBeGreaterThan(0);
+    expect(last!.changes!.strongestBeforeC).toBeGreaterThan(last!.changes!.strongestAfterC!);
   });
 
   it('waits until nothing of it waits, and begins nothing where nothing is marked', async () => {

@@ -76,6 +76,7 @@ function ReworkLine({ rework, zone }: { rework: Rework; zone: string }) {
 
 function Progress({ rework: { cause, blocks, pending, pendingDistricts } }: { rework: Rework }) {
   const done = blocks - pending;
+  if (blocks === 0) return <Muted small>what depends on it is being looked for</Muted>;
   return (
     <Stack gap="1">
       <Bar value={done} max={blocks} aria-label={`Worked out anew: ${cause}`} />
