@@ -62,7 +62,8 @@ class Watched extends Transform {
   }
 }
 
-const faultOf = (error: unknown): unknown => {
+/** What a fault of the disk or the connection means to who sent a file; other faults stay as they are. */
+export const faultOf = (error: unknown): unknown => {
   const { code } = error as NodeJS.ErrnoException;
   if (code === 'ENOSPC' || code === 'EDQUOT') {
     return new Problem(

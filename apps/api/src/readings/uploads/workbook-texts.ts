@@ -4,8 +4,9 @@ import path from 'node:path';
 import { Injectable } from '@nestjs/common';
 import { Problem } from '../../common/problem';
 import { HeaderError } from '../parse/parsed-readings';
-import { UploadFiles } from './upload-files';
-import { writeSheets, type WrittenSheet } from './workbook';
+import { faultOf, UploadFiles } from './upload-files';
+import type { WrittenSheet } from './workbook';
+import { writeSheetsInThread } from './workbook-thread';
 
 /** A sheet of a workbook, written out as text. */
 export interface Sheet extends WrittenSheet {
@@ -60,9 +61,11 @@ export class WorkbookTexts {
     await rm(unfinished, { recursive: true, force: true });
     await mkdir(unfinished, { recursive: true });
     try {
-      const sheets = await writeSheets(this.files.pathOf(uploadId), unfinished);
+      const sheets = await writeSheetsInThread(this.files.pathOf(uploadId), unfinished);
       await writeFile(path.join(unfinished, LIST), JSON.stringify(sheets));
       await rename(unfinished, folder);
+    } catch (error) {
+      throw faultOf(error);
     } finally {
       await rm(unfinished, { recursive: true, force: true });
     }

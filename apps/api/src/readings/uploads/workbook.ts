@@ -2,9 +2,11 @@ import { createWriteStream } from 'node:fs';
 import path from 'node:path';
 import { once } from 'node:events';
 import { finished } from 'node:stream/promises';
-import ExcelJS, { type CellValue } from 'exceljs';
+import type { Row } from 'exceljs';
 import { NotTextError } from '../parse/decode-text';
-import { refuseBombs } from './archive-size';
+import { openArchive } from './archive-size';
+import { cellText, isFormula } from './cell-text';
+import { sheetsOf } from './workbook-parts';
 
 /** A sheet as it was written out. */
 export interface WrittenSheet {
@@ -19,27 +21,13 @@ export interface WrittenSheet {
 }
 
 const MOST_SHEETS = 50;
-const MOST_COLUMNS = 2_000;
-const HALF_SECOND_MS = 500;
+const MOST_COLUMNS = 2_001;
+/** Rows of a sheet at most (ECMA-376). */
+const MOST_ROWS = 1_048_576;
 
-/** A date as the clock shows it; spreadsheets keep fractions of days, so it is rounded to the second. */
-const wallTime = (date: Date): string =>
-  new Date(date.getTime() + HALF_SECOND_MS).toISOString().slice(0, 19).replace('T', ' ');
-
-/** What a cell shows as text; a formula without a result is left as its formula, which no reading is. */
-function textOf(value: CellValue): string {
-  if (value === null || value === undefined) return '';
-  if (value instanceof Date) return Number.isNaN(value.getTime()) ? '' : wallTime(value);
-  if (typeof value !== 'object') return String(value);
-  if ('richText' in value) return value.richText.map(({ text }) => text).join('');
-  if ('error' in value) return value.error;
-  if ('hyperlink' in value) return String(value.text);
-  const { result } = value;
-  return result === undefined ? `=${'formula' in value ? value.formula : ''}` : textOf(result);
-}
-
-const isFormula = (value: CellValue): boolean =>
-  typeof value === 'object' && value !== null && ('formula' in value || 'sharedFormula' in value);
+const DAMAGED =
+  'The spreadsheet cannot be read: it is damaged, protected by a password, or of another kind. ' +
+  'Open it, save it as .xlsx or as CSV, and send it again.';
 
 const quotedCell = (text: string): string => {
   const line = text.replace(/[\r\n]+/g, ' ');
@@ -48,58 +36,50 @@ const quotedCell = (text: string): string => {
 
 /** Writes one sheet, a line for each of its rows, so that row numbers are the sheet's own. */
 async function writeSheet(
-  sheet: AsyncIterable<ExcelJS.Row>,
+  sheet: AsyncIterable<Row>,
   file: string,
 ): Promise<{ rows: number; formulas: number }> {
   const out = createWriteStream(file);
   let [rows, formulas] = [0, 0];
-  for await (const row of sheet) {
-    const values = (Array.isArray(row.values) ? row.values.slice(1, MOST_COLUMNS + 2) : []) as CellValue[];
-    formulas += values.filter(isFormula).length;
-    const line = Array.from(values, (value) => quotedCell(textOf(value))).join(',');
-    const gap = '\n'.repeat(Math.max(0, row.number - rows - 1));
-    rows = Math.max(row.number, rows + 1);
-    if (!out.write(`${gap}${line}\n`)) await once(out, 'drain');
+  try {
+    for await (const row of sheet) {
+      if (!(row.number > rows && row.number <= MOST_ROWS)) throw new NotTextError(DAMAGED);
+      const cells = Array.from({ length: Math.min(row.cellCount, MOST_COLUMNS) }, (_, i) =>
+        row.getCell(i + 1),
+      );
+      formulas += cells.filter(({ value }) => isFormula(value)).length;
+      const line = cells.map((cell) => quotedCell(cellText(cell))).join(',');
+      if (!out.write(`${'\n'.repeat(row.number - rows - 1)}${line}\n`)) await once(out, 'drain');
+      rows = row.number;
+    }
+  } finally {
+    out.end();
+    await finished(out);
   }
-  out.end();
-  await finished(out);
   return { rows, formulas };
 }
 
 /**
- * Writes the sheets of a workbook (Office Open XML, ECMA-376) as files of comma-separated text into a folder. Dates
- * become what the clock shows, formulas their last result. The workbook is read as a stream, sheet by sheet.
+ * Writes the sheets of a workbook as files of comma-separated text into a folder. Dates become what the clock shows,
+ * formulas their last result. The workbook is read as a stream, sheet by sheet.
  *
- * @throws NotTextError where the file is no such workbook, is damaged, or inflates beyond all measure.
+ * @throws NotTextError where the file is no such workbook, is damaged, or unpacks beyond all measure.
  */
 export async function writeSheets(workbook: string, folder: string): Promise<WrittenSheet[]> {
-  await refuseBombs(workbook);
+  const archive = await openArchive(workbook);
   const sheets: WrittenSheet[] = [];
   try {
-    const reader = new ExcelJS.stream.xlsx.WorkbookReader(workbook, {
-      ...{
-        worksheets: 'emit',
-        sharedStrings: 'cache',
-        styles: 'cache',
-        hyperlinks: 'ignore',
-        entries: 'ignore',
-      },
-    });
-    for await (const sheet of reader) {
-      const { name, state } = sheet as unknown as { name?: string; state?: string };
+    for await (const { name, isHidden, rows } of sheetsOf(archive)) {
       const file = `${sheets.length}.csv`;
-      const written = await writeSheet(sheet, path.join(folder, file));
-      const isHidden = state !== undefined && state !== 'visible';
-      sheets.push({ name: name ?? `Sheet ${sheets.length + 1}`, isHidden, ...written, file });
+      sheets.push({ name, isHidden, ...(await writeSheet(rows, path.join(folder, file))), file });
       if (sheets.length >= MOST_SHEETS) break;
     }
   } catch (error) {
     if (error instanceof NotTextError || (error as NodeJS.ErrnoException).syscall !== undefined) throw error;
-    throw new NotTextError(
-      'The spreadsheet cannot be read: it is damaged, protected by a password, or of another kind. ' +
-        'Open it, save it as .xlsx or as CSV, and send it again.',
-    );
+    throw new NotTextError(DAMAGED);
   }
   if (sheets.length > 0) return sheets;
-  throw new NotTextError('The archive holds no sheet. Send a spreadsheet (.xlsx) or a file of text.');
+  throw new NotTextError(
+    'The workbook holds no sheet with cells. Send a spreadsheet (.xlsx) or a file of text.',
+  );
 }
