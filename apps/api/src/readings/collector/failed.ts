@@ -3,7 +3,7 @@ import type { Collected } from '../../towers/next-turn';
 import { faultWords } from './fault-words';
 import { SourceFault } from './source-fault';
 
-const OUR_OWN = 'was not taken in by a fault of the service. It is tried again; the log says more.';
+const OUR_OWN = 'was not taken in, by a fault of the service. The log says more.';
 
 /** A collection that failed, in words. A fault of the service itself is logged, and does not hold up other sources. */
 export function failed(error: unknown, name: string, logger: Logger): Collected {

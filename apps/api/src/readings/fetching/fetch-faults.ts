@@ -28,7 +28,7 @@ export function statusFault(
   const why =
     BY_STATUS[status] ??
     (status >= 500
-      ? `It has a fault of its own (${status}). It is tried again; if it stays, tell whoever runs it.`
+      ? `It has a fault of its own (${status}). If it stays, tell whoever runs it.`
       : `It answered ${status} instead of the file. Look at the address.`);
   const pause = retryAfterS(retryAfter, nowMs);
   return new SourceFault(`${host}: ${why}`, pause === undefined ? {} : { retryAfterS: pause });
@@ -49,11 +49,11 @@ const BY_CODE: readonly [RegExp, string][] = [
   ],
   [
     /^(ECONNRESET|EPIPE|UND_ERR_SOCKET|UND_ERR_RES_CONTENT_LENGTH_MISMATCH|ERR_STREAM_PREMATURE_CLOSE)$/,
-    'The connection broke before the whole file had come. Nothing of it was taken; it is tried again.',
+    'The connection broke before the whole file had come. Nothing of it was taken.',
   ],
   [
     /^(Z_|ERR_)?.*(Z_DATA_ERROR|Z_BUF_ERROR|Z_MEM_ERROR)$/,
-    'The compressed file is damaged or cut off. Nothing of it was taken; it is tried again.',
+    'The compressed file is damaged or cut off. Nothing of it was taken.',
   ],
   [
     /^(HPE_|UND_ERR_(HEADERS_OVERFLOW|RES))/,

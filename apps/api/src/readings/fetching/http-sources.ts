@@ -86,7 +86,7 @@ export class HttpSources implements OnModuleDestroy {
       const response = await ask(address, { headers, mostRedirects, signal });
       clearTimeout(answerTimer);
       if (response.status !== 200) return await this.withoutBody(response, host);
-      const kept = await keepBody(response, file, { host, mostBytes, signal });
+      const kept = await keepBody(response, file, { host, mostBytes });
       const { headers: told } = response;
       const packed = told.has('content-encoding');
       return { ...kept, file, packed, etag: told.get('etag'), lastModified: told.get('last-modified') };

@@ -1,7 +1,6 @@
 import { createHash } from 'node:crypto';
-import { createWriteStream } from 'node:fs';
-import { Readable, Transform } from 'node:stream';
-import { pipeline } from 'node:stream/promises';
+import { open, type FileHandle } from 'node:fs/promises';
+import { Readable } from 'node:stream';
 import { SourceFault } from '../collector/source-fault';
 import { unpacked } from './unpacked';
 
@@ -15,8 +14,10 @@ export interface KeptBody {
 export interface BodyTerms {
   readonly host: string;
   readonly mostBytes: number;
-  readonly signal: AbortSignal;
 }
+
+/** Written at a time, bytes: with small writes a fast server would wait for the disk at every turn. */
+const AT_ONCE_BYTES = 1_000_000;
 
 const tooLong = ({ host, mostBytes }: BodyTerms): SourceFault =>
   new SourceFault(
@@ -34,18 +35,29 @@ export async function keepBody(response: Response, file: string, terms: BodyTerm
     await response.body?.cancel();
     throw tooLong(terms);
   }
+  const into = await open(file, 'w', 0o600);
+  try {
+    return await copy(response, into, terms);
+  } finally {
+    await into.close();
+  }
+}
+
+async function copy({ body }: Response, into: FileHandle, terms: BodyTerms): Promise<KeptBody> {
   const hash = createHash('sha256');
-  let bytes = 0;
-  const measure = new Transform({
-    transform(piece: Buffer, _, done) {
-      bytes += piece.length;
-      hash.update(piece);
-      if (bytes > terms.mostBytes) done(tooLong(terms));
-      else done(null, piece);
-    },
-  });
-  const body = response.body ? Readable.fromWeb(response.body) : Readable.from([]);
-  const into = createWriteStream(file, { mode: 0o600 });
-  await pipeline(body, unpacked(terms.host), measure, into, { signal: terms.signal });
+  let [bytes, held]: [number, Buffer[]] = [0, []];
+  let heldBytes = 0;
+  const write = async (): Promise<void> => {
+    const whole = Buffer.concat(held, heldBytes);
+    [held, heldBytes] = [[], 0];
+    hash.update(whole);
+    await into.appendFile(whole);
+  };
+  for await (const piece of unpacked(terms.host, body ? Readable.fromWeb(body) : Readable.from([]))) {
+    if ((bytes += piece.length) > terms.mostBytes) throw tooLong(terms);
+    held.push(piece);
+    if ((heldBytes += piece.length) >= AT_ONCE_BYTES) await write();
+  }
+  await write();
   return { bytes, sha256: hash.digest('hex') };
 }

@@ -9,24 +9,29 @@ const WEB_PAGE = /^\s*<(!doctype html|html|head|body|\?xml)/i;
  * A body as its text: a file that is packed itself (`mast.csv.gz`) unpacked, others as they are. A web page, such as a
  * portal's sign-in, is a `SourceFault`, for its lines would only be refused one by one.
  */
-export function unpacked(host: string): (body: AsyncIterable<Buffer>) => AsyncGenerator<Buffer> {
-  return async function* (body) {
-    const pieces = body[Symbol.asyncIterator]();
+export async function* unpacked(host: string, body: AsyncIterable<Uint8Array>): AsyncGenerator<Buffer> {
+  const pieces = body[Symbol.asyncIterator]();
+  try {
     const first = await pieces.next();
     if (first.done) return;
-    const start = Buffer.from(first.value);
+    const start = bufferOf(first.value);
     if (WEB_PAGE.test(start.toString('latin1', 0, 200)))
       throw new SourceFault(
         `${host}: It answers with a web page, not a file of readings. Look at the address.`,
       );
     const all = allOf(start, pieces);
     yield* isGzip(start) ? gunzipped(all) : all;
-  };
+  } finally {
+    await pieces.return?.();
+  }
 }
 
-async function* allOf(first: Buffer, pieces: AsyncIterator<Buffer>): AsyncGenerator<Buffer> {
+const bufferOf = ({ buffer, byteOffset, byteLength }: Uint8Array): Buffer =>
+  Buffer.from(buffer, byteOffset, byteLength);
+
+async function* allOf(first: Buffer, pieces: AsyncIterator<Uint8Array>): AsyncGenerator<Buffer> {
   yield first;
-  for (let next = await pieces.next(); !next.done; next = await pieces.next()) yield Buffer.from(next.value);
+  for (let next = await pieces.next(); !next.done; next = await pieces.next()) yield bufferOf(next.value);
 }
 
 function gunzipped(pieces: AsyncIterable<Buffer>): AsyncIterable<Buffer> {
