@@ -1,4 +1,4 @@
-import { calendarDays, dayAfter, dayIn, daysEndingWith, isDay } from './days';
+import { calendarDays, dayAfter, dayIn, daysEndingWith, daysFromTo, isDay } from './days';
 
 test('the days of a zone whose clocks change are 23 and 25 hours long', () => {
   const hours = ({ from, to }: { from: string; to: string }) =>
@@ -11,6 +11,7 @@ test('the days of a zone whose clocks change are 23 and 25 hours long', () => {
 test('a day is that of the zone', () => {
   expect(dayIn('2026-01-15T06:00:00Z', 'America/Boise')).toBe('2026-01-14');
   expect(dayAfter('2026-02-28', 1)).toBe('2026-03-01');
+  expect(daysFromTo('2026-02-28', '2026-03-02')).toBe(3);
 });
 
 test('the calendar does not move while a day in it is chosen', () => {

@@ -9,6 +9,10 @@ export const CALENDAR_DAYS = 35;
 export const dayAfter = (day: string, days: number): string =>
   new Date(Date.parse(`${day}T00:00:00Z`) + days * DAY_MS).toISOString().slice(0, 10);
 
+/** How many days lie from one to another, both included. */
+export const daysFromTo = (first: string, last: string): number =>
+  (Date.parse(`${last}T00:00:00Z`) - Date.parse(`${first}T00:00:00Z`)) / DAY_MS + 1;
+
 /** The day it is in a zone at an instant. */
 export const dayIn = (instant: string | number, zone: string): string =>
   toZonedInput(instant, zone).slice(0, 10);
@@ -27,7 +31,7 @@ export function daysEndingWith(day: string, days: number, zone: string): { from:
 
 /** The weeks of the calendar that hold a day, counted back from today, so that they do not move with each day chosen. */
 export function calendarDays(day: string, today: string): { from: string; to: string } {
-  const ago = (Date.parse(`${today}T00:00:00Z`) - Date.parse(`${day}T00:00:00Z`)) / DAY_MS;
+  const ago = daysFromTo(day, today) - 1;
   const to = dayAfter(today, -CALENDAR_DAYS * Math.max(0, Math.floor(ago / CALENDAR_DAYS)));
   return { from: dayAfter(to, 1 - CALENDAR_DAYS), to };
 }

@@ -10,7 +10,7 @@ import { dateAndTime } from '../../../lib/format/time';
 import { useRaw, useSetSpans } from '../api';
 import { bandsOf } from '../bands';
 import { daysEndingWith } from '../days';
-import { selectionOf, snapped, type Selection } from '../selection';
+import { NOTHING, selectionOf, snapped, type Selection } from '../selection';
 import type { RawReadings, Said, Tower } from '../types';
 import type { ReadingsChoice } from '../use-readings-choice';
 import { rawSentence } from '../words';
@@ -104,7 +104,10 @@ function RawPart({
         sensors={raw.sensors}
         quantity={quantity}
         hidden={hidden}
-        onQuantity={(wanted) => choice.change({ quantity: wanted })}
+        onQuantity={(wanted) => {
+          onSelect(NOTHING);
+          choice.change({ quantity: wanted });
+        }}
         onHide={hide}
       />
       {own.every(({ readings }) => readings === 0) ? (

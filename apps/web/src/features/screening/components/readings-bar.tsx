@@ -1,5 +1,5 @@
 import { Box, Flex } from '@chakra-ui/react';
-import { useNavigate } from 'react-router-dom';
+import { useLocation, useNavigate } from 'react-router-dom';
 import { paths } from '../../../app/paths';
 import { Button } from '../../../components/ui/button';
 import { Field } from '../../../components/ui/field';
@@ -17,6 +17,7 @@ interface ReadingsBarProps {
 /** Which tower and which days are shown, and the way to the next. */
 export function ReadingsBar({ towers, towerId, choice }: ReadingsBarProps) {
   const navigate = useNavigate();
+  const { search } = useLocation();
   const { day, today, days, change } = choice;
   const later = dayAfter(day, days);
   return (
@@ -25,7 +26,9 @@ export function ReadingsBar({ towers, towerId, choice }: ReadingsBarProps) {
         <Field label="Tower">
           <Select
             value={towerId}
-            onChange={({ target }) => void navigate(paths.towerReadings(Number(target.value)))}
+            onChange={({ target }) =>
+              void navigate({ pathname: paths.towerReadings(Number(target.value)), search })
+            }
           >
             {towers.map(({ id, name, retired }) => (
               <option key={id} value={id}>

@@ -20,11 +20,13 @@ interface SetSpansCardProps {
   towerId: number;
   zone: string;
   mayUndo: boolean;
+  /** Shows a span in the chart. */
+  onShow: (span: SetSpan) => void;
   onUndone: () => void;
 }
 
 /** What people have said of this tower's readings, who and why; what was undone stays on the record. */
-export function SetSpansCard({ towerId, zone, mayUndo, onUndone }: SetSpansCardProps) {
+export function SetSpansCard({ towerId, zone, mayUndo, onShow, onUndone }: SetSpansCardProps) {
   const spans = useSetSpans(towerId);
   const [asked, setAsked] = useState<SetSpan>();
   return (
@@ -49,6 +51,18 @@ export function SetSpansCard({ towerId, zone, mayUndo, onUndone }: SetSpansCardP
                   ),
                 },
                 { head: 'Why, and who', cell: (span) => <Why span={span} zone={zone} /> },
+                {
+                  head: 'Show',
+                  cell: (span) => (
+                    <Button
+                      size="sm"
+                      aria-label={`Show ${span.sensorName}, ${span.reason}`}
+                      onClick={() => onShow(span)}
+                    >
+                      Show
+                    </Button>
+                  ),
+                },
                 {
                   head: 'Now',
                   cell: (span) => (

@@ -1,9 +1,9 @@
 import { Stack } from '@chakra-ui/react';
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import type { Me } from '../../../lib/api/types';
 import { useNow } from '../../../lib/clock';
 import { useRefresh } from '../api';
-import { dayIn } from '../days';
+import { dayIn, daysFromTo } from '../days';
 import { NOTHING, selectedEnds, selectionOf, type Selection } from '../selection';
 import type { FlaggedSpan, Said, Tower } from '../types';
 import { SPANS, useReadingsChoice } from '../use-readings-choice';
@@ -16,8 +16,6 @@ import { ReworksCard } from './reworks-card';
 import { SetSpanDialog } from './set-span-dialog';
 import { SetSpansCard } from './set-spans-card';
 
-const DAY_MS = 86_400_000;
-
 interface TowerReadingsViewProps {
   towers: readonly Tower[];
   tower: Tower;
@@ -29,26 +27,29 @@ interface TowerReadingsViewProps {
 export function TowerReadingsView({ towers, tower, zone, me }: TowerReadingsViewProps) {
   const choice = useReadingsChoice(zone, useNow());
   const [selection, setSelection] = useState<Selection>(NOTHING);
+  const chart = useRef<HTMLDivElement>(null);
   const [said, setSaid] = useState<Said>();
   const refresh = useRefresh(tower.id);
   const ends = selectedEnds(selection, zone);
   const sensor = tower.sensors.find(({ id }) => id === selection.sensorId);
-  const show = (span: FlaggedSpan) => {
+  const show = (span: Pick<FlaggedSpan, 'sensorId' | 'from' | 'to'>) => {
     const own = tower.sensors.find(({ id }) => id === span.sensorId);
-    const days = (Date.parse(span.to) - Date.parse(span.from)) / DAY_MS;
+    const [first, last] = [dayIn(span.from, zone), dayIn(Date.parse(span.to) - 1, zone)];
+    const needed = daysFromTo(first < last ? first : last, last);
     setSelection(selectionOf(span.sensorId, span, zone));
     choice.change({
-      day: dayIn(Date.parse(span.to) - 1, zone),
-      days: SPANS.find((each) => each.days > days)?.days ?? 31,
+      day: last,
+      days: SPANS.find((each) => each.days >= needed)?.days ?? 31,
       ...(own && { quantity: own.quantity }),
     });
-    document.getElementById('readings')?.scrollIntoView({ block: 'start' });
+    chart.current?.scrollIntoView({ block: 'start' });
+    chart.current?.focus({ preventScroll: true });
   };
   return (
     <Stack gap="4">
       <ReadingsBar towers={towers} towerId={tower.id} choice={choice} />
       <CalendarCard towerId={tower.id} choice={choice} />
-      <div id="readings">
+      <div ref={chart} tabIndex={-1}>
         <RawCard
           {...{ tower, zone, choice, selection }}
           onSelect={setSelection}
@@ -57,7 +58,13 @@ export function TowerReadingsView({ towers, tower, zone, me }: TowerReadingsView
       </div>
       <ReworksCard towerId={tower.id} zone={zone} onEnded={refresh} />
       <FlagsCard towerId={tower.id} sensors={tower.sensors} zone={zone} choice={choice} onShow={show} />
-      <SetSpansCard towerId={tower.id} zone={zone} mayUndo={me.role === 'analyst'} onUndone={refresh} />
+      <SetSpansCard
+        towerId={tower.id}
+        zone={zone}
+        mayUndo={me.role === 'analyst'}
+        onShow={show}
+        onUndone={refresh}
+      />
       <CorrectionsCard
         sensors={tower.sensors}
         zone={zone}
