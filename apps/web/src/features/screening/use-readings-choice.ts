@@ -37,7 +37,7 @@ export function useReadingsChoice(zone: string, nowMs: number): ReadingsChoice {
           if (after.get('day') === today) after.delete('day');
           return after;
         },
-        { replace: true },
+        { replace: true, preventScrollReset: true },
       ),
   };
 }
