@@ -4,9 +4,11 @@ import type { Source } from '../../towers/models/source.model';
 import { SourcePositions } from '../../towers/source-positions';
 import { CsvReader, type ReadingContext } from '../parse/csv-reader';
 import { ImportRunner } from '../importing/import-runner';
+import { LineCutter } from '../importing/lines';
 import { decodeText } from '../parse/decode-text';
 import { HeaderError, type ParsedReadings } from '../parse/parsed-readings';
 import { linesOf } from '../parse/records';
+import type { RefusedRow } from '../refusal';
 import { ReadingsService } from '../readings.service';
 import { newLines, type NewLines, type ReadingOn } from './new-lines';
 import { addTo, type Tally } from './tally';
@@ -85,11 +87,19 @@ export class FileTaker {
   }
 }
 
-/** New lines as readings; the header is read again before them, so that they mean what they did. */
+/**
+ * New lines as readings; the header is read again before them, so that they mean what they did. A line that is no text
+ * is refused alone.
+ */
 function read({ header, lines, firstRowNo }: NewLines, context: ReadingContext): ParsedReadings {
-  const reader = new CsvReader(context);
+  const [reader, cutter] = [new CsvReader(context), new LineCutter(firstRowNo)];
   if (header !== '') reader.readLines(linesOf(decodeText(Buffer.from(header))), 1);
-  reader.readLines(linesOf(decodeText(lines)), firstRowNo);
+  const refused: RefusedRow[] = [];
+  for (const cut of [cutter.push(lines), cutter.end()]) {
+    reader.readLines(cut.lines, cut.firstRowNo);
+    refused.push(...cut.refused);
+  }
   if (!reader.hasHeader) throw new HeaderError('The file has no header line; send the column names first.');
-  return reader.take();
+  const taken = reader.take();
+  return { ...taken, refused: [...refused, ...taken.refused] };
 }

@@ -149,6 +149,23 @@ describe("the collector of loggers' files", () => {
     ]);
   });
 
+  it('refuses a line that is no text alone, in a file that goes on', async () => {
+    const file = path.join(folder, 'mast.csv');
+    writeFileSync(file, `\ufeff${HEADER}${line(60, -9.5, -7.7)}\n`);
+    await collect();
+    appendFileSync(
+      file,
+      Buffer.concat([Buffer.of(0xff, 0xfe, 0x0a), Buffer.from(`${line(50, -9.6, -7.6)}\n`)]),
+    );
+    await collect();
+    expect((await source()).lastResult).toBe('2 new readings, 1 row refused.');
+    const refused = await test.sql.all(
+      'SELECT row_no, code FROM refused_row r JOIN import i ON i.id = r.import_id WHERE tower_id = $1',
+      [towerId],
+    );
+    expect(refused).toEqual([{ row_no: 3, code: 'line-not-text' }]);
+  });
+
   it('goes on with the other files when one cannot be read', async () => {
     writeFileSync(path.join(folder, 'a.csv'), 'when,what\n1,2\n');
     writeFileSync(path.join(folder, 'b.csv'), `${HEADER}${line(60, -9.5, -7.7)}\n`);

@@ -32,7 +32,7 @@ describe('sources over HTTP', () => {
     admin = await signInAs(test, 'administrator');
     analyst = await signInAs(test, 'analyst');
     Object.assign(test.app.get(FetchLimits), { answerMs: 300, overallMs: 600, mostBytes: 300_000 });
-  });
+  }, 30_000);
   afterAll(async () => {
     await test.close();
     await Promise.all([server.close(), other.close()]);

@@ -27,10 +27,14 @@ const HEAD_BYTES = 4;
  */
 export class LineCutter {
   private rest: Buffer = NOTHING;
-  private nextRowNo = 1;
-  private atBeginning = true;
+  private atBeginning: boolean;
   /** Bytes of a too long line that were let go so far; 0 where the line at hand is none. */
   private letGo = 0;
+
+  /** @param nextRowNo the row of the file that comes first; from a later one on nothing is judged by its beginning */
+  constructor(private nextRowNo = 1) {
+    this.atBeginning = nextRowNo === 1;
+  }
 
   /** The lines that a further piece completes. */
   push(piece: Buffer): Lines {
