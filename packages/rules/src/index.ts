@@ -11,7 +11,7 @@ export type { Validation } from './definition/validate-rule';
 export * from './evaluation/measured-block';
 export * from './evaluation/block-series';
 export type * from './evaluation/evaluated-node';
-export { evaluate } from './evaluation/evaluate';
+export { evaluate, evaluator } from './evaluation/evaluate';
 export * from './evaluation/evidence';
 export { describeClause, describeCondition, describeGroup } from './explanation/describe';
 export { explain, sentencesOf } from './explanation/explain';

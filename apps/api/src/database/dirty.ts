@@ -70,6 +70,7 @@ export class DirtyStages implements OnModuleDestroy {
   /** By who holds them; kept in memory only, so that after a crash nothing is held. */
   private readonly held = new Map<object, Held>();
   private closing = false;
+  private onlyAsked = false;
 
   constructor(
     private readonly sql: Sql,
@@ -160,6 +161,11 @@ export class DirtyStages implements OnModuleDestroy {
     return done;
   }
 
+  /** From now on a commit calls nobody: whoever lives through a past step by step asks when a step is complete. */
+  waitToBeAsked(): void {
+    this.onlyAsked = true;
+  }
+
   /** Works out everything that waits, in the order of the stages. */
   async drainAll(): Promise<void> {
     for (const stage of STAGES) {
@@ -190,7 +196,7 @@ export class DirtyStages implements OnModuleDestroy {
   }
 
   private soon(stage: Stage): void {
-    if (this.closing || this.timers.has(stage)) return;
+    if (this.closing || this.onlyAsked || this.timers.has(stage)) return;
     const timer = setTimeout(() => {
       this.timers.delete(stage);
       this.drain(stage).catch((error: unknown) => {

@@ -88,7 +88,10 @@ describe('the single writer', () => {
       'WITH j AS (SELECT 5 AS v) INSERT INTO counter (v) SELECT v FROM j RETURNING id, v',
     );
     expect(made).toEqual([{ id: 2, v: 5 }]);
-    expect(() => store.sql.returning('INSERT INTO counter (v) VALUES (1) RETURNING id')).toThrow('WITH');
+    expect(await store.sql.returning('INSERT INTO counter (v) VALUES (1) RETURNING id')).toEqual([{ id: 3 }]);
+    await expect(store.sql.run('INSERT INTO counter (v) VALUES ($1)', [undefined])).rejects.toThrow(
+      '$1 has no value',
+    );
   });
 
   it('finishes the transaction under way before it closes', async () => {

@@ -66,6 +66,7 @@ export class DemoHistory {
     const end = order.spans.at(-1)?.to ?? 0;
     const total = order.spans.reduce((sum, { from, to }) => sum + to - from, 0);
     let done = 0;
+    this.pipeline.waitToBeAsked();
     for (const { from, to } of order.spans) {
       await order.loggers.skip(from);
       for (let t = from; t < to;) {

@@ -23,6 +23,11 @@ export class PipelineService implements OnModuleInit {
     return this.dirty.drainAll();
   }
 
+  /** Works out nothing from now on but when `drainAll` is called. */
+  waitToBeAsked(): void {
+    this.dirty.waitToBeAsked();
+  }
+
   /** How many blocks of a tower ended and wait. */
   async state(towerId: number): Promise<{ pending: number }> {
     return { pending: await this.dirty.pending(towerId, this.clock.now()) };

@@ -6,9 +6,24 @@ import type { EvaluatedNode, HeldFacts } from './evaluated-node';
 import { heldTruth, type HeldSeconds } from './held-for';
 import { measuredIn } from './measured-block';
 
-/** One evaluation: the series, what for, and the truths already worked out, so that nested held-for stays cheap. */
-class Evaluation {
+/** Truths by condition and block end. */
+class Remembered {
   private readonly truths = new Map<Condition, Map<number, Truth>>();
+
+  /** What was worked out before, else what `workOut` says. */
+  of(condition: Condition, t: number, workOut: () => Truth): Truth {
+    let known = this.truths.get(condition);
+    if (known === undefined) this.truths.set(condition, (known = new Map()));
+    let truth = known.get(t);
+    if (truth === undefined) known.set(t, (truth = workOut()));
+    return truth;
+  }
+}
+
+/** Evaluations of one series for one purpose, and the truths already worked out, so that held-for stays cheap. */
+class Evaluation {
+  private readonly truths = new Remembered();
+  private readonly nows = new Remembered();
 
   constructor(
     private readonly series: BlockSeries,
@@ -38,17 +53,17 @@ class Evaluation {
   }
 
   private truth(condition: Condition, t: number): Truth {
-    let known = this.truths.get(condition);
-    if (known === undefined) this.truths.set(condition, (known = new Map()));
-    let truth = known.get(t);
-    if (truth === undefined) {
+    return this.truths.of(condition, t, () => {
       const seconds = this.heldSeconds(condition, t);
-      known.set(t, (truth = seconds ? heldTruth(seconds) : this.now(condition, t)));
-    }
-    return truth;
+      return seconds ? heldTruth(seconds) : this.now(condition, t);
+    });
   }
 
   private now(condition: Condition, t: number): Truth {
+    return this.nows.of(condition, t, () => this.workOut(condition, t));
+  }
+
+  private workOut(condition: Condition, t: number): Truth {
     if ('measure' in condition)
       return clauseTruth(condition, measuredIn(this.series.at(t), condition.measure));
     const truths = partsOf(condition).map((part) => this.truth(part, t));
@@ -105,5 +120,18 @@ export function evaluate(
   tEnd: number,
   purpose: Purpose,
 ): EvaluatedNode {
-  return new Evaluation(series, purpose).node(condition, tEnd);
+  return evaluator(series, purpose)(condition, tEnd);
+}
+
+/**
+ * `evaluate` for many block ends of one series: what was worked out for one is remembered for the next.
+ *
+ * Units, validity and source: as `evaluate`.
+ */
+export function evaluator(
+  series: BlockSeries,
+  purpose: Purpose,
+): (condition: Condition, tEnd: number) => EvaluatedNode {
+  const evaluation = new Evaluation(series, purpose);
+  return (condition, tEnd) => evaluation.node(condition, tEnd);
 }

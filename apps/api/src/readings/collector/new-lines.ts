@@ -44,7 +44,7 @@ const SLICE = 1_000_000;
 export const LONGEST_LINE = 8_000_000;
 
 const bytesOf = async (file: FileHandle, from: number, length: number): Promise<Buffer> => {
-  const { buffer, bytesRead } = await file.read(Buffer.alloc(length), 0, length, from);
+  const { buffer, bytesRead } = await file.read(Buffer.allocUnsafe(length), 0, length, from);
   return buffer.subarray(0, bytesRead);
 };
 
@@ -62,8 +62,8 @@ export const hashUpTo = async (file: FileHandle, position: number, whole: boolea
 };
 
 /** The slice from a position; longer where no line ends in it, so that a long line is not stuck for ever. */
-const sliceOf = async (file: FileHandle, from: number): Promise<Buffer> => {
-  for (let length = SLICE; ; length *= 2) {
+const sliceOf = async (file: FileHandle, from: number, size: number): Promise<Buffer> => {
+  for (let length = Math.min(SLICE, size - from + 1); ; length *= 2) {
     const slice = await bytesOf(file, from, length);
     if (slice.length < length || slice.includes(NEWLINE)) return slice;
     if (length > LONGEST_LINE)
@@ -125,7 +125,7 @@ export async function newLines(
     const inode = on.inode ?? ino;
     const before = known && (await goesOn(file, { inode, size }, known, whole)) ? known : undefined;
     const { position: from, rowNo } = before ?? { position: 0, rowNo: 0 };
-    const slice = await sliceOf(file, from);
+    const slice = await sliceOf(file, from, size);
     const isLast = from + slice.length >= size;
     const end = takeUnfinished && isLast ? slice.length : slice.lastIndexOf(NEWLINE) + 1;
     const lines = slice.subarray(0, end);

@@ -21,11 +21,9 @@ describe('the evaluation of a night', () => {
   afterAll(() => test.close());
 
   const inputs = async () =>
-    (
-      await test.app
-        .get(DistrictRows, { strict: false })
-        .series([valley.districtId], 0, 2e9, new Set(MEASURE_NAMES))
-    ).get(valley.districtId)!;
+    (await test.app.get(DistrictRows, { strict: false }).series([valley.districtId], 0, 2e9)).get(
+      valley.districtId,
+    )!;
 
   it('is kept block by block with the truth of each condition', async () => {
     const rows = await test.sql.all<{ truths: string }>(

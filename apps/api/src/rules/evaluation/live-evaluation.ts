@@ -1,11 +1,10 @@
 import {
   blockSeries,
-  evaluate,
+  evaluator,
   NOTICE_KINDS,
   partsOf,
   type Condition,
   type EvaluatedNode,
-  type MeasureName,
   type NoticeKind,
 } from '@lidwatch/rules';
 import { Injectable } from '@nestjs/common';
@@ -15,7 +14,8 @@ import { groupBy } from '../../common/group-by';
 import { Sql } from '../../database/sql';
 import { UnitOfWork } from '../../database/unit-of-work';
 import { DistrictPlans, staleAfterS } from '../findings/district-plan';
-import { DistrictRows, type EvaluatedInput } from '../findings/district-rows';
+import { DistrictRows } from '../findings/district-rows';
+import type { EvaluatedInput } from '../findings/evaluated-input';
 import { RulesService, type RuleInForce } from '../rules.service';
 
 /** Only blocks that ended this recently are judged live; older ones were judged when they were new, s. */
@@ -102,7 +102,7 @@ export class LiveEvaluation {
     const judged = rules.map(({ districtId }) => districtId);
     const all = judged.flatMap((id) => ends.get(id)!);
     const after = Math.min(...all) - Math.max(...rules.map(longestHeldS)) - LOOK_BACK_S;
-    const series = await this.rows.series(judged, after, Math.max(...all), measuresOf(rules));
+    const series = await this.rows.series(judged, after, Math.max(...all));
     const evaluations = rules.map((rule) =>
       judge(rule, series.get(rule.districtId) ?? [], new Set(ends.get(rule.districtId))),
     );
@@ -132,22 +132,14 @@ export class LiveEvaluation {
   }
 }
 
-/** Every measure that some rules ask about. */
-function measuresOf(rules: readonly RuleInForce[]): Set<MeasureName> {
-  const names = (condition: Condition): MeasureName[] =>
-    'measure' in condition ? [condition.measure] : partsOf(condition).flatMap(names);
-  const parts = rules.flatMap(({ body }) => NOTICE_KINDS.flatMap((kind) => body[kind] ?? []));
-  return new Set(parts.flatMap(({ begin, end }) => [...names(begin), ...names(end)]));
-}
-
 /** What a rule says of some of a district's blocks, oldest first. */
 function judge(
   rule: RuleInForce,
   inputs: readonly EvaluatedInput[],
   ends: ReadonlySet<number>,
 ): (Omit<DistrictEvaluation, 'fresh' | 'timeZone'> & { rev: number })[] {
-  const begins = blockSeries(inputs.map(({ begin }) => begin));
-  const endings = blockSeries(inputs.map(({ end }) => end));
+  const begins = evaluator(blockSeries(inputs.map(({ begin }) => begin)), 'begin');
+  const endings = evaluator(blockSeries(inputs.map(({ end }) => end)), 'end');
   return inputs
     .filter(({ tEnd }) => ends.has(tEnd))
     .map(({ tEnd, rev, begin }) => {
@@ -155,10 +147,7 @@ function judge(
         NOTICE_KINDS.flatMap((kind) => {
           const part = rule.body[kind];
           if (!part) return [];
-          const found = {
-            begin: evaluate(part.begin, begins, tEnd, 'begin'),
-            end: evaluate(part.end, endings, tEnd, 'end'),
-          };
+          const found = { begin: begins(part.begin, tEnd), end: endings(part.end, tEnd) };
           return [[kind, found] as const];
         }),
       );

@@ -1,10 +1,19 @@
 import { isKnown, type Quantity } from '@lidwatch/atmosphere';
-import type { MeasuredBlock, MeasureName, Purpose } from '@lidwatch/rules';
+
 import { Injectable } from '@nestjs/common';
 import { Sql } from '../../database/sql';
+import { UnitOfWork } from '../../database/unit-of-work';
 import type { DistrictBlock } from './district-block';
 import type { StrengthAt } from './episode-minutes';
-import { measuresFromJson, measuresToJson, quantityOf } from './measures-json';
+import {
+  inputOf,
+  keyOf,
+  KeptInputs,
+  type BlockHead,
+  type EvaluatedInput,
+  type InputRow,
+} from './evaluated-input';
+import { measuresToJson, quantityOf } from './measures-json';
 
 const COLUMNS = [
   'district_id',
@@ -37,8 +46,10 @@ const WHERE = `FROM district_block
   WHERE district_id IN (SELECT value FROM json_each($1)) AND t_end > $2 AND t_end <= $3 ORDER BY t_end`;
 const ENDS = `SELECT district_id districtId, t_end tEnd ${WHERE}`;
 const STRENGTHS = `SELECT district_id districtId, t_end tEnd, spoke, strength_lo lo, strength_hi hi, reason ${WHERE}`;
-const SERIES = `SELECT district_id districtId, t_end tEnd, rev, block_s blockS, spoke, measures, end_spoke endSpoke,
-  end_measures endMeasures ${WHERE}`;
+const HEADS = `SELECT district_id districtId, t_end tEnd, rev ${WHERE}`;
+const INPUTS = `SELECT district_id districtId, t_end tEnd, rev, block_s blockS, spoke, measures, end_spoke endSpoke,
+  end_measures endMeasures FROM json_each($1) j CROSS JOIN district_block
+  ON district_id = j.value->>0 AND t_end = j.value->>1`;
 
 const end = (value: number | undefined): number | null => (Number.isFinite(value) ? value! : null);
 const one = (quantity: Quantity | undefined): number | null =>
@@ -64,12 +75,6 @@ function rowOf(block: DistrictBlock): (number | string | null)[] {
   ];
 }
 
-/** A district's block as it is read for evaluation: its revision, and a series' block for each purpose. */
-export interface EvaluatedInput extends Readonly<Record<Purpose, MeasuredBlock>> {
-  readonly tEnd: number;
-  readonly rev: number;
-}
-
 interface OfDistrict {
   districtId: number;
   tEnd: number;
@@ -82,19 +87,15 @@ interface StrengthRow extends OfDistrict {
   reason: string | null;
 }
 
-interface SeriesRow extends OfDistrict {
-  rev: number;
-  blockS: number;
-  spoke: string | null;
-  measures: string;
-  endSpoke: string | null;
-  endMeasures: string | null;
-}
-
 /** The statements by which district blocks are kept and read. */
 @Injectable()
 export class DistrictRows {
-  constructor(private readonly sql: Sql) {}
+  private readonly kept = new KeptInputs();
+
+  constructor(
+    private readonly sql: Sql,
+    private readonly work: UnitOfWork,
+  ) {}
 
   /** Writes blocks within the caller's transaction; gives those that are new or differ. */
   async write(blocks: readonly DistrictBlock[]): Promise<{ districtId: number; tEnd: number }[]> {
@@ -122,15 +123,25 @@ export class DistrictRows {
     return new Map([...found].map(([districtId, strengths]) => [districtId, new Map(strengths)]));
   }
 
-  /** Some districts' blocks that end in (after, until], oldest first, with the values of these measures only. */
+  /** Some districts' blocks that end in (after, until], oldest first. Each revision of a block is read once. */
   async series(
     districtIds: readonly number[],
     after: number,
     until: number,
-    measures: ReadonlySet<MeasureName>,
   ): Promise<Map<number, EvaluatedInput[]>> {
-    const rows = await this.sql.all<SeriesRow>(SERIES, [JSON.stringify(districtIds), after, until]);
-    return byDistrict(rows, (row) => inputOf(row, measures));
+    const heads = await this.sql.all<BlockHead>(HEADS, [JSON.stringify(districtIds), after, until]);
+    const wanted = heads.filter((head) => !this.kept.of(head));
+    const read = wanted.length > 0 ? await this.inputs(wanted) : undefined;
+    return byDistrict(heads, (head) => (read?.get(keyOf(head)) ?? this.kept.of(head))!);
+  }
+
+  /** What is read is remembered once it is committed: a revision that is rolled back may come again as another. */
+  private async inputs(wanted: readonly BlockHead[]): Promise<Map<string, EvaluatedInput>> {
+    const ends = wanted.map(({ districtId, tEnd }) => [districtId, tEnd]);
+    const rows = await this.sql.all<InputRow>(INPUTS, [JSON.stringify(ends)]);
+    const read = new Map(rows.map((row) => [keyOf(row), inputOf(row)]));
+    this.work.afterCommit(() => this.kept.add(read));
+    return read;
   }
 }
 
@@ -145,13 +156,4 @@ function byDistrict<Row extends OfDistrict, Found>(
     else found.set(row.districtId, [find(row)]);
   }
   return found;
-}
-
-function inputOf(row: SeriesRow, measures: ReadonlySet<MeasureName>): EvaluatedInput {
-  const { tEnd, rev } = row;
-  const common = { tEnd, blockSeconds: row.blockS };
-  const begin = { ...common, speaker: row.spoke, values: measuresFromJson(row.measures, measures) };
-  if (row.endMeasures === null) return { tEnd, rev, begin, end: begin };
-  const values = measuresFromJson(row.endMeasures, measures);
-  return { tEnd, rev, begin, end: { ...common, speaker: row.endSpoke, values } };
 }

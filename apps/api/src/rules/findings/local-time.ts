@@ -4,7 +4,19 @@ import type { LocalMoment } from '@lidwatch/rules';
 const MINUTE_S = 60;
 const DAY_S = 86_400;
 
-const offsetS = (timeZone: string, t: number): number => tzOffset(timeZone, new Date(t * 1000)) * MINUTE_S;
+/** So many offsets are remembered; to ask the system's calendar for one costs as much as a district's block. */
+const MOST_KEPT = 20_000;
+const kept = new Map<string, number>();
+
+function offsetS(timeZone: string, t: number): number {
+  const key = `${t} ${timeZone}`;
+  const known = kept.get(key);
+  if (known !== undefined) return known;
+  const offset = tzOffset(timeZone, new Date(t * 1000)) * MINUTE_S;
+  if (kept.size >= MOST_KEPT) kept.clear();
+  kept.set(key, offset);
+  return offset;
+}
 
 /** Month, day and hour in a zone at an instant (UTC epoch seconds). */
 export function localMoment(timeZone: string, t: number): LocalMoment {

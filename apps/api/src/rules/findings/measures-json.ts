@@ -1,10 +1,9 @@
 import { between, notKnown, type Quantity } from '@lidwatch/atmosphere';
-import { MEASURE_NAMES, type MeasuredValues, type MeasureName } from '@lidwatch/rules';
+import type { MeasuredValues, MeasureName } from '@lidwatch/rules';
 
 /** Bounds as they are kept: null for an open end, both null for not known, with the reason where there is one. */
 type StoredQuantity = [number | null, number | null, string?];
 
-const ALL: ReadonlySet<MeasureName> = new Set(MEASURE_NAMES);
 const NO_REASON = 'nothing was measured';
 /** Nine significant digits: far finer than any sensor, and without the tails that arithmetic leaves. */
 const DIGITS = 9;
@@ -39,14 +38,10 @@ export function measuresToJson(values: MeasuredValues): string {
   return JSON.stringify(stored);
 }
 
-/** The measured values that `measuresToJson` wrote, of all measures or of those wanted; others are left out. */
-export function measuresFromJson(text: string, wanted: ReadonlySet<MeasureName> = ALL): MeasuredValues {
+/** The measured values that `measuresToJson` wrote. */
+export function measuresFromJson(text: string): MeasuredValues {
   const stored = JSON.parse(text) as Partial<Record<MeasureName, StoredQuantity>>;
-  const values: { [Name in MeasureName]?: Quantity } = {};
-  for (const name of wanted) {
-    const kept = stored[name];
-    if (kept) values[name] = quantityOf(...kept);
-    else if (name in WITHOUT_FORECAST) values[name] = NO_FORECAST;
-  }
+  const values: { [Name in MeasureName]?: Quantity } = { ...WITHOUT_FORECAST };
+  for (const name in stored) values[name as MeasureName] = quantityOf(...stored[name as MeasureName]!);
   return values;
 }
