@@ -13,6 +13,7 @@ export interface BuiltService {
   log: () => string;
   ended: Promise<{ code: number | null; signal: string | null; stderr: string }>;
   kill: (signal: NodeJS.Signals) => void;
+  pid: number | undefined;
 }
 
 /** Starts the built service on a data folder with these settings, without the demo and on a port of its own. */
@@ -37,5 +38,5 @@ export function startBuilt(dataDir: string, environment: Record<string, string> 
     child.once('close', () => reject(new Error(`It ended before it listened: ${stderr}`)));
   });
   address.catch(() => undefined);
-  return { address, log: () => stdout, ended, kill: (signal) => void child.kill(signal) };
+  return { address, log: () => stdout, ended, kill: (signal) => void child.kill(signal), pid: child.pid };
 }

@@ -1,21 +1,22 @@
 import { Injectable, Logger, type OnModuleInit } from '@nestjs/common';
 import { Clock } from '../common/clock';
+import { ComputePool } from '../compute/compute-pool';
 import { DirtyStages, type DirtyRow } from '../database/dirty';
 import { UnitOfWork } from '../database/unit-of-work';
 import { expectedReadings, type TowerLayout } from '../towers/tower-layout';
 import { TowerLayouts } from '../towers/tower-layouts';
-import { blockFacts, type KeptMean } from './block-facts';
-import { findingsOf } from './findings';
+import type { KeptMean } from './block-facts';
 import { graceS } from './grace';
 import { hourMean, pm25SensorOf } from './hour-mean';
 import { Hours } from './hours';
-import { profileRow } from './profile-row';
+import { makeProfiles, makeProfilesTask } from './make-profiles.task';
+import type { profileRow } from './profile-row';
 import { ProfileStore, type MeansOfBlock } from './profile-store';
 
 /** Blocks worked out at a time. */
 const BATCH = 500;
-/** Blocks worked out before other requests get their turn. */
-const AT_ONCE = 100;
+/** So many are worked out here and now: the way to the compute thread would cost more. */
+const AT_ONCE = 24;
 
 interface Waiting extends MeansOfBlock {
   readonly row: DirtyRow;
@@ -26,8 +27,6 @@ interface Made extends Waiting {
   /** Undefined where the block holds no reading. */
   readonly profile: ReturnType<typeof profileRow> | undefined;
 }
-
-const pause = (): Promise<void> => new Promise((resolve) => setImmediate(resolve));
 
 /** Stage 2: makes a profile of every closed block whose means changed, and rolls its hour up. */
 @Injectable()
@@ -41,6 +40,7 @@ export class ProfilesStage implements OnModuleInit {
     private readonly layouts: TowerLayouts,
     private readonly work: UnitOfWork,
     private readonly clock: Clock,
+    private readonly pool: ComputePool,
   ) {}
 
   onModuleInit(): void {
@@ -51,26 +51,30 @@ export class ProfilesStage implements OnModuleInit {
     const rows = await this.dirty.newest(2, BATCH, this.clock.now());
     const closed = rows.length === 0 ? [] : await this.closedOf(rows);
     if (closed.length === 0) return 0;
-    const hours = await this.pm25Hours(closed);
-    const made: Made[] = [];
-    for (const [i, waiting] of closed.entries()) {
-      if (i % AT_ONCE === AT_ONCE - 1) await pause();
-      made.push(...this.make(waiting, hours[i]));
-    }
+    const made = await this.make(closed, await this.pm25Hours(closed));
     await this.work.run(() => this.write(made), 'bulk');
     return made.length;
   }
 
   /** A block that cannot be worked out is logged and keeps its mark; the others go on. */
-  private make(waiting: Waiting, pm25Hour: number | undefined): Made[] {
-    const { row, tower, means } = waiting;
-    try {
-      const facts = blockFacts(tower, row.t, means, pm25Hour);
-      return [{ ...waiting, profile: facts && profileRow(facts, findingsOf(facts, tower)) }];
-    } catch (error) {
-      this.log.error(`The block of tower ${tower.id} that ends at ${row.t} could not be worked out`, error);
+  private async make(closed: readonly Waiting[], hours: readonly (number | undefined)[]): Promise<Made[]> {
+    const towers = [...new Set(closed.map(({ tower }) => tower))];
+    const blocks = closed.map(({ row, means }, i) => ({
+      ...{ towerId: row.subject, tEnd: row.t, means },
+      pm25Hour: hours[i],
+    }));
+    const given = { towers, blocks };
+    const found =
+      blocks.length > AT_ONCE ? await this.pool.run(makeProfilesTask, given) : makeProfiles(given);
+    return closed.flatMap((waiting, i): Made[] => {
+      const each = found[i]!;
+      if ('row' in each) return [{ ...waiting, profile: each.row }];
+      const { subject, t } = waiting.row;
+      this.log.error(
+        `The block of tower ${subject} that ends at ${t} could not be worked out: ${each.fault}`,
+      );
       return [];
-    }
+    });
   }
 
   private async write(made: readonly Made[]): Promise<void> {

@@ -3,13 +3,7 @@ import { exactSql } from '../common/exact-decimal';
 import { Sql } from '../database/sql';
 import type { BlockMean } from './block-means';
 import { meanRow } from './mean-row';
-import type { Flag } from './series';
-
-/** A reading whose flags have changed. */
-export interface ChangedFlag extends Flag {
-  readonly sensorId: number;
-  readonly tEnd: number;
-}
+import type { ChangedFlag } from './series';
 
 const WRITE_FLAGS = `UPDATE reading SET quality = j.q, checks = j.c
   FROM (SELECT value->>0 s, value->>1 t, value->>2 q, value->>3 c FROM json_each($1)) j

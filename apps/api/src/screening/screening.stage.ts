@@ -1,33 +1,21 @@
 import { Injectable, type OnModuleInit } from '@nestjs/common';
-import type { ScreeningContext } from '@lidwatch/atmosphere';
 import { groupBy } from '../common/group-by';
+import { ComputePool } from '../compute/compute-pool';
 import { DirtyStages, type DirtyRow } from '../database/dirty';
 import { UnitOfWork } from '../database/unit-of-work';
-import { blockEndOf, type TowerLayout } from '../towers/tower-layout';
 import { TowerLayouts } from '../towers/tower-layouts';
-import { blockMean, type BlockMean } from './block-means';
 import { ReadingWindows, type Wanted } from './reading-windows';
-import { contextOf, screenStretch } from './screen-tower';
-import { ScreeningStore, type ChangedFlag } from './screening-store';
-import { firstAfter, type Flags, type Series, type SetSpan, type Stretch } from './series';
+import { reachOf, screenParts, screenPartsTask, type Found, type Part } from './screen-parts.task';
+import { contextOf } from './screen-tower';
+import { ScreeningStore } from './screening-store';
 import { stretchesOf } from './stretches';
 
 /** Blocks worked out at a time. */
 const BATCH = 500;
+/** So many are worked out here and now: the way to the compute thread would cost more. */
+const AT_ONCE = 24;
 const EVER = Number.MAX_SAFE_INTEGER;
 const HOUR_S = 3600;
-
-interface Part {
-  readonly tower: TowerLayout;
-  readonly stretch: Stretch;
-  readonly blocks: readonly number[];
-  readonly context: ScreeningContext;
-}
-
-interface Found {
-  readonly flags: ChangedFlag[];
-  readonly means: BlockMean[];
-}
 
 /** Stage 1: screens the readings that changed with all that they can influence, and averages their blocks. */
 @Injectable()
@@ -38,6 +26,7 @@ export class ScreeningStage implements OnModuleInit {
     private readonly store: ScreeningStore,
     private readonly layouts: TowerLayouts,
     private readonly work: UnitOfWork,
+    private readonly pool: ComputePool,
   ) {}
 
   onModuleInit(): void {
@@ -51,11 +40,8 @@ export class ScreeningStage implements OnModuleInit {
     const sensorIds = [...new Set(parts.flatMap(({ tower }) => tower.sensors.map(({ id }) => id)))];
     const spans = await this.windows.setSpans(sensorIds);
     const series = await this.windows.read(parts.flatMap(wantedOf));
-    let at = 0;
-    const found = parts.map((part) => {
-      const own = series.slice(at, (at += part.tower.sensors.length));
-      return screenPart(part, own, spans);
-    });
+    const given = { parts, series, spans };
+    const found = rows.length > AT_ONCE ? await this.pool.run(screenPartsTask, given) : screenParts(given);
     await this.work.run(() => this.write(rows, parts, found), 'bulk');
     return rows.length;
   }
@@ -98,39 +84,9 @@ export class ScreeningStage implements OnModuleInit {
   }
 }
 
-/** The readings whose flags a change within the part can alter, whole blocks of them. */
-const reachOf = ({ tower, stretch, context }: Part): Stretch => ({
-  t0: blockEndOf(stretch.t0 - context.afterS, tower.blockS) - tower.blockS,
-  t1: blockEndOf(stretch.t1 + context.beforeS, tower.blockS),
-});
-
-/** What must be read to judge those. */
+/** What must be read to judge what a part can alter. */
 const wantedOf = (part: Part): Wanted[] => {
   const { t0, t1 } = reachOf(part);
   const { beforeS, afterS } = part.context;
   return part.tower.sensors.map(({ id }) => ({ sensorId: id, t0: t0 - beforeS, t1: t1 + afterS }));
 };
-
-function screenPart(part: Part, series: readonly Series[], spans: readonly SetSpan[]): Found {
-  const { tower, blocks } = part;
-  const flags = screenStretch(tower, series, reachOf(part), spans);
-  const changed = series.flatMap((each, i) => changedFlags(each, flags[i]!));
-  const ends = new Set([...blocks, ...changed.map(({ tEnd }) => blockEndOf(tEnd, tower.blockS))]);
-  const means = tower.sensors.flatMap((sensor, i) =>
-    [...ends].flatMap((tEnd) => blockMean(tower, sensor, series[i]!, flags[i]!, tEnd) ?? []),
-  );
-  return { flags: changed, means };
-}
-
-function changedFlags(series: Series, flags: Flags): ChangedFlag[] {
-  if (flags.tEnd.length === 0) return [];
-  const shift = firstAfter(series.tEnd, flags.tEnd[0]! - 1);
-  const changed: ChangedFlag[] = [];
-  flags.tEnd.forEach((tEnd, i) => {
-    const [quality, checks] = [flags.quality[i]!, flags.checks[i]!];
-    if (quality !== series.quality[i + shift] || checks !== series.checks[i + shift]) {
-      changed.push({ sensorId: series.sensorId, tEnd, quality, checks });
-    }
-  });
-  return changed;
-}

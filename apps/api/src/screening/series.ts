@@ -17,6 +17,12 @@ export interface Flag {
   readonly checks: number;
 }
 
+/** A reading whose flags have changed. */
+export interface ChangedFlag extends Flag {
+  readonly sensorId: number;
+  readonly tEnd: number;
+}
+
 /** Screening of a stretch of a series; the arrays run in parallel. */
 export interface Flags {
   readonly tEnd: readonly number[];

@@ -4,6 +4,7 @@ import path from 'node:path';
 import { Global, Module } from '@nestjs/common';
 import { Test, type TestingModule } from '@nestjs/testing';
 import { Clock, SetClock } from '../common/clock';
+import { ComputePool } from '../compute/compute-pool';
 import { Settings } from '../config/settings';
 import { DatabaseModule } from '../database/database.module';
 import { DirtyStages } from '../database/dirty';
@@ -42,7 +43,7 @@ export interface TestTower {
 }
 
 const pieces = [
-  ...[TowerLayouts, ReadingsStore, ImportStore, ReadingTaker, ReadingsService],
+  ...[ComputePool, TowerLayouts, ReadingsStore, ImportStore, ReadingTaker, ReadingsService],
   ...[ReadingWindows, ScreeningStore, ScreeningStage],
   ...[ProfileStore, Hours, ProfilesStage],
 ];
