@@ -22,7 +22,7 @@ export function RetireSourceDialog({ source, onClose, onRetired }: RetireSourceD
   const meaning =
     source.kind === 'push'
       ? 'What the site pushes is read by the usual layout from now on. Keys go on working.'
-      : 'Nothing is collected from it any more, and its credentials are forgotten.';
+      : `Nothing is collected from it any more${source.hasSecret ? ', and its credentials are forgotten' : ''}.`;
   return (
     <Dialog
       open
