@@ -77,6 +77,8 @@ export const accessTable: Record<string, Access> = {
   'GET /api/towers/:id/flags': all,
   'GET /api/towers/:id/raw': all,
   'GET /api/towers/:id/reading': all,
+  'GET /api/towers/:id/limits': all,
+  'PUT /api/sensors/:id/limits': keepers,
   'GET /api/towers/:id/profile': all,
   'GET /api/towers/:id/profiles': all,
   'GET /api/towers/:id/pipeline': all,

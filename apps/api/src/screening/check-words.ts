@@ -1,8 +1,8 @@
-import { DEFAULT_LIMITS, DEFAULT_VERTICAL_LIMITS, type SensorLimits } from '@lidwatch/atmosphere';
+import { DEFAULT_VERTICAL_LIMITS, type SensorLimits } from '@lidwatch/atmosphere';
 import type { Check, Quality } from '@lidwatch/contracts';
 import { unitsByQuantity } from '../towers/quantities';
 import type { LayoutSensor } from '../towers/tower-layout';
-import { measuredQuantity } from './measured-quantity';
+import { limitsOf } from './kept-limits';
 
 const amount = (value: number, unit: string): string => `${String(value).replace('-', '−')} ${unit}`;
 const range = ({ lowest, highest }: { lowest: number; highest: number }, unit: string): string =>
@@ -15,7 +15,7 @@ function rangeWords({ physical, plausible }: SensorLimits, unit: string, quality
 
 /** What a check found, in plain words with the limits that hold for the sensor. */
 export function checkWords(check: Check, sensor: LayoutSensor, quality: Quality): string {
-  const limits = { ...DEFAULT_LIMITS[measuredQuantity[sensor.quantity]], ...sensor.limits } as SensorLimits;
+  const limits = limitsOf(sensor);
   const unit = unitsByQuantity[sensor.quantity];
   const [step] = limits.steps;
   const [steady] = limits.steadiness;

@@ -3,6 +3,8 @@ import { DistrictsModule } from '../districts/districts.module';
 import { TowersModule } from '../towers/towers.module';
 import { CalendarService } from './calendar.service';
 import { FlagsService } from './flags.service';
+import { LimitsController } from './limits.controller';
+import { LimitsService } from './limits.service';
 import { OverridesController } from './overrides.controller';
 import { OverridesService } from './overrides.service';
 import { RawService } from './raw.service';
@@ -16,7 +18,7 @@ import { TowerZones } from './tower-zones';
 /** Screening of readings, what people set about them, and their block means. */
 @Module({
   imports: [DistrictsModule, TowersModule],
-  controllers: [OverridesController, ScreeningController],
+  controllers: [OverridesController, ScreeningController, LimitsController],
   providers: [
     ReadingWindows,
     ScreeningStore,
@@ -26,6 +28,7 @@ import { TowerZones } from './tower-zones';
     FlagsService,
     RawService,
     ReadingDetailService,
+    LimitsService,
     TowerZones,
   ],
   exports: [ScreeningStore],

@@ -624,6 +624,38 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/towers/{id}/limits': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Limits.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/sensors/{id}/limits': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put: operations['Limits.set'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/uploads': {
     parameters: {
       query?: never;
@@ -2137,6 +2169,45 @@ export interface components {
       from: components['schemas']['ReadingOrigin'];
       /** @description The newest first */
       earlier: components['schemas']['EarlierValue'][];
+    };
+    LimitRange: {
+      lowest: number;
+      highest: number;
+    };
+    CheckLimits: {
+      /** @description What is expected here; beyond it: suspect */
+      plausible: components['schemas']['LimitRange'] | null;
+      /** @description A single reading further off than this: failed */
+      spike: number | null;
+      /** @description The very same value for so many hours: failed */
+      stuckHours: number | null;
+      /** @description Whether changes faster than usual are suspect */
+      fastChanges: boolean;
+      /** @description Whether hours without any change to speak of are suspect */
+      steadiness: boolean;
+    };
+    SensorLimits: {
+      sensorId: number;
+      sensorName: string;
+      unit: string;
+      /** @description What is possible; beyond it: failed, always */
+      physical: components['schemas']['LimitRange'];
+      limits: components['schemas']['CheckLimits'];
+      usual: components['schemas']['CheckLimits'];
+    };
+    LimitsInput: {
+      /** @description What is expected here; beyond it: suspect */
+      plausible: components['schemas']['LimitRange'] | null;
+      /** @description A single reading further off than this: failed */
+      spike: number | null;
+      /** @description The very same value for so many hours: failed */
+      stuckHours: number | null;
+      /** @description Whether changes faster than usual are suspect */
+      fastChanges: boolean;
+      /** @description Whether hours without any change to speak of are suspect */
+      steadiness: boolean;
+      /** @description Why; it is kept with your name */
+      reason: string;
     };
     SameImport: {
       importId: number;
@@ -3966,6 +4037,52 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['ReadingDetail'];
+        };
+      };
+    };
+  };
+  'Limits.list': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SensorLimits'][];
+        };
+      };
+    };
+  };
+  'Limits.set': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['LimitsInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SensorLimits'];
         };
       };
     };
