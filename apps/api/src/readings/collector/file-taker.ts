@@ -62,10 +62,14 @@ export class FileTaker {
   ): Promise<void> {
     const whole = new WholeFile(file, on);
     const from = { origin, name, sourceId: source.id };
-    addTo(
-      tally,
-      await this.imports.run({ towerId: source.towerId, origin: from, context, bytes: whole.bytes() }),
-    );
+    const imported = await this.imports.run({
+      towerId: source.towerId,
+      origin: from,
+      context,
+      bytes: whole.bytes(),
+    });
+    addTo(tally, imported);
+    for (const column of imported.ignoredColumns) tally.ignored.add(column);
     if (whole.unfinished) tally.unfinished += 1;
     await this.positions.keep(source, knownAs, await whole.after(header));
   }
@@ -73,9 +77,10 @@ export class FileTaker {
   private async takeLines(
     { source, origin, knownAs, name }: FileToTake,
     { after }: NewLines,
-    { rows, refused }: ParsedReadings,
+    { rows, refused, ignoredColumns }: ParsedReadings,
     tally: Tally,
   ): Promise<void> {
+    for (const column of ignoredColumns) tally.ignored.add(column);
     const keep = async (): Promise<void> => {
       if (rows.length + refused.length > 0) {
         const from = { origin, name, refused, sourceId: source.id };

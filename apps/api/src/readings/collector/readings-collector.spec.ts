@@ -134,10 +134,14 @@ describe("the collector of loggers' files", () => {
     const lines = Array.from({ length: 300 }, (_, i) => line(4000 - 10 * i, -9 - i / 100, -7.123, note));
     writeFileSync(file, `${HEADER.trim()},note\n${lines.join('\n')}\n${line(30, -9)}`);
     await collect();
-    expect((await source()).lastResult).toBe('600 new readings, 1 unfinished line waits.');
+    expect((await source()).lastResult).toBe(
+      '600 new readings, 1 unfinished line waits. No sensor has the column "note".',
+    );
     appendFileSync(file, `,-7,\n${line(20, 'broken', -7.5, '')}\n`);
     await collect();
-    expect((await source()).lastResult).toBe('3 new readings, 1 row refused.');
+    expect((await source()).lastResult).toBe(
+      '3 new readings, 1 row refused. No sensor has the column "note".',
+    );
     const imports = await test.sql.all(
       `SELECT i.name, i.new_count newCount, r.row_no rowNo FROM import i LEFT JOIN refused_row r ON r.import_id = i.id
        WHERE tower_id = $1 ORDER BY i.id`,

@@ -1,4 +1,4 @@
-import { Injectable, type BeforeApplicationShutdown, type OnModuleInit } from '@nestjs/common';
+import { Injectable, Logger, type BeforeApplicationShutdown, type OnModuleInit } from '@nestjs/common';
 import { Clock } from '../../common/clock';
 import { Problem } from '../../common/problem';
 import { JobsService } from '../../scheduler/jobs.service';
@@ -17,10 +17,13 @@ const LOOK_EVERY_S = 10;
 const SIDE_BY_SIDE = 4;
 /** Who asks for a collection waits for its end so long, ms; then it goes on without them. */
 const PATIENCE_MS = 15_000;
+/** A turn waits for its sources so long, ms: a file of years must not keep the other towers waiting. */
+const TURN_MS = 8_000;
 
 /** Collects towers' sources when their turn comes, or when somebody asks. Each is collected once at a time. */
 @Injectable()
 export class ReadingsCollector implements OnModuleInit, BeforeApplicationShutdown {
+  private readonly logger = new Logger(ReadingsCollector.name);
   private readonly underWay = new Map<number, Promise<string>>();
 
   constructor(
@@ -33,17 +36,17 @@ export class ReadingsCollector implements OnModuleInit, BeforeApplicationShutdow
   ) {}
 
   onModuleInit(): void {
-    this.jobs.register("collect loggers' files", LOOK_EVERY_S, () => this.collect('folder'));
-    this.jobs.register('collect files over HTTP', LOOK_EVERY_S, () => this.collect('http'));
+    this.jobs.register("collect loggers' files", LOOK_EVERY_S, () => this.turn('folder'));
+    this.jobs.register('collect files over HTTP', LOOK_EVERY_S, () => this.turn('http'));
   }
 
   async beforeApplicationShutdown(): Promise<void> {
     await Promise.allSettled(this.underWay.values());
   }
 
-  /** Collects every source of a kind whose turn it is; says how it went. */
+  /** Collects every source of a kind whose turn it is and that is not being collected; says how it went. */
   async collect(kind: Kind = 'folder'): Promise<string> {
-    const due = await this.turns.due(kind);
+    const due = (await this.turns.due(kind)).filter(({ id }) => !this.underWay.has(id));
     const results: string[] = [];
     const next = async (): Promise<void> => {
       for (let source = due.shift(); source; source = due.shift()) results.push(await this.once(source));
@@ -60,10 +63,17 @@ export class ReadingsCollector implements OnModuleInit, BeforeApplicationShutdow
     const source = await this.sources.inUse(id);
     if (source.kind === 'push')
       throw new Problem('not-possible-now', 'Nothing is collected here: the site sends its readings itself.');
-    let timer: NodeJS.Timeout | undefined;
-    const patience = new Promise<void>((resolve) => (timer = setTimeout(resolve, PATIENCE_MS)));
-    await Promise.race([this.once(source), patience]).finally(() => clearTimeout(timer));
+    await within(PATIENCE_MS, this.once(source));
     return this.sources.get(id);
+  }
+
+  /** A turn of the job: what takes long goes on by itself, and its source is passed over until it has ended. */
+  private async turn(kind: Kind): Promise<string> {
+    const collecting = this.collect(kind);
+    const result = await within(TURN_MS, collecting);
+    if (result !== undefined) return result;
+    collecting.catch((error: unknown) => this.logger.error(error));
+    return 'goes on';
   }
 
   private once(source: Source): Promise<string> {
@@ -86,4 +96,11 @@ export class ReadingsCollector implements OnModuleInit, BeforeApplicationShutdow
       end();
     }
   }
+}
+
+/** What a promise gives, or undefined once some time has gone by. */
+async function within<T>(ms: number, promise: Promise<T>): Promise<T | undefined> {
+  let timer: NodeJS.Timeout | undefined;
+  const late = new Promise<undefined>((resolve) => (timer = setTimeout(() => resolve(undefined), ms)));
+  return Promise.race([promise, late]).finally(() => clearTimeout(timer));
 }
