@@ -4,12 +4,14 @@ import type { ApiProblem } from '../../lib/api/problem';
 import type { Page } from '../../lib/api/types';
 import { LIVE_REFRESH_MS, useApi } from '../../lib/api/use-api';
 import type {
+  CheckLimits,
   FlaggedSpan,
   RawReadings,
   ReadingDetail,
   Rework,
   Said,
   Sensor,
+  SensorLimits,
   SetSpan,
   Tower,
   TowerCalendar,
@@ -95,6 +97,11 @@ export interface SpanToSet extends Ends {
   quality: Said;
   reason: string;
 }
+
+export const useLimits = (towerId: number) => useApi<SensorLimits[]>(`/api/towers/${towerId}/limits`);
+/** Sets the limits of a sensor's checks, with the reason. */
+export const setLimits = (sensorId: number, limits: CheckLimits & { reason: string }) =>
+  api.put<SensorLimits>(`/api/sensors/${sensorId}/limits`, limits);
 
 export const setSpan = (span: SpanToSet) => api.post<SetSpan>('/api/overrides', span);
 export const undoSpan = (id: number) => api.remove<SetSpan>(`/api/overrides/${id}`);

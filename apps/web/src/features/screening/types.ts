@@ -19,6 +19,8 @@ export type RawSeries = Shapes['RawSeries'];
 export type RawReading = Shapes['RawReading'];
 /** A span of a sensor that a person has set. */
 export type SetSpan = Shapes['Override'];
+export type SensorLimits = Shapes['SensorLimits'];
+export type CheckLimits = Shapes['CheckLimits'];
 export type Rework = Shapes['Rework'];
 export type ChangedFindings = Shapes['ChangedFindings'];
 /** What a person may say of readings: *failed* sets them aside, *valid* sets them right. */

@@ -10,6 +10,7 @@ import { SPANS, useReadingsChoice } from '../use-readings-choice';
 import { CalendarCard } from './calendar-card';
 import { CorrectionsCard } from './corrections-card';
 import { FlagsCard } from './flags-card';
+import { LimitsCard } from './limits-card';
 import { RawCard } from './raw-card';
 import { ReadingsBar } from './readings-bar';
 import { ReworksCard } from './reworks-card';
@@ -71,6 +72,7 @@ export function TowerReadingsView({ towers, tower, zone, me }: TowerReadingsView
         mayCorrect={me.role !== 'officer'}
         onCorrected={refresh}
       />
+      <LimitsCard towerId={tower.id} mayChange={me.role !== 'officer'} onChanged={refresh} />
       {said && ends && sensor && (
         <SetSpanDialog
           span={{ ...ends, said, sensorId: sensor.id, sensorName: sensor.name }}
