@@ -1,3 +1,4 @@
+import { QueryTypes } from 'sequelize';
 import { OPEN_READONLY } from 'sqlite3';
 import { openTestStore, signal, type TestStore } from '../testing/test-store';
 import { closeStore } from './close-store';
@@ -92,6 +93,14 @@ describe('the single writer', () => {
     await expect(store.sql.run('INSERT INTO counter (v) VALUES ($1)', [undefined])).rejects.toThrow(
       '$1 has no value',
     );
+  });
+
+  it('knows the columns of a table that has changed since they were asked for', async () => {
+    const columns = async () =>
+      (await store.sequelize.query('PRAGMA table_info(`log`)', { type: QueryTypes.SELECT })).length;
+    expect([await columns(), await columns()]).toEqual([2, 2]);
+    await store.sql.run('ALTER TABLE log ADD COLUMN note TEXT');
+    expect(await columns()).toBe(3);
   });
 
   it('finishes the transaction under way before it closes', async () => {

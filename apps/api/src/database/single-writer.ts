@@ -4,6 +4,7 @@ import { openHandles } from './handles';
 import { PlainLine } from './plain-line';
 import type { Answer, SqliteCall } from './sqlite-call';
 import { StoreHandles } from './store-handles';
+import { TableShapes } from './table-shapes';
 import { TransactionLine } from './transaction-line';
 
 type Line = PlainLine | TransactionLine;
@@ -15,6 +16,7 @@ type Closed = (error: Error | null) => void;
  */
 export function singleWriterDialect(onLongHold: LongHold): object {
   let store: Promise<StoreHandles> | undefined;
+  const shapes = new TableShapes();
 
   /** What sequelize takes for a sqlite3 connection. */
   class Database {
@@ -61,6 +63,7 @@ export function singleWriterDialect(onLongHold: LongHold): object {
     }
 
     private send(call: SqliteCall): this {
+      if (shapes.answers(call)) return this;
       this.line.then(
         (line) => line.send(call),
         (error: Error) => call.answer.call(undefined, error),

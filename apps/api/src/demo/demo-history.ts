@@ -1,6 +1,8 @@
 import { Injectable } from '@nestjs/common';
 import { Clock, SetClock } from '../common/clock';
+import { UnitOfWork } from '../database/unit-of-work';
 import { NoticeExpiry } from '../notices/notice-expiry';
+import { NoticeLogService } from '../notices/notice-log.service';
 import { PipelineService } from '../profiles/pipeline.service';
 import type { ProposalCard } from '../proposals/dto/proposal.dto';
 import { ReadingsCollector } from '../readings/collector/readings-collector';
@@ -59,6 +61,8 @@ export class DemoHistory {
     private readonly expiry: NoticeExpiry,
     private readonly decisions: DemoDecisions,
     private readonly delivery: DemoDelivery,
+    private readonly notices: NoticeLogService,
+    private readonly work: UnitOfWork,
   ) {}
 
   /** Lives through all spans, the last of which ends now. */
@@ -66,12 +70,13 @@ export class DemoHistory {
     const end = order.spans.at(-1)?.to ?? 0;
     const total = order.spans.reduce((sum, { from, to }) => sum + to - from, 0);
     let done = 0;
+    let quiet = true;
     this.pipeline.waitToBeAsked();
     for (const { from, to } of order.spans) {
       await order.loggers.skip(from);
       for (let t = from; t < to;) {
-        const next = Math.min(to, nextStep(t, end));
-        await this.step(next, order, lastDays(end));
+        const next = Math.min(to, nextStep(t, end, quiet));
+        quiet = await this.step(next, order, lastDays(end));
         done += next - t;
         t = next;
         order.onStep(t, done / total);
@@ -79,15 +84,18 @@ export class DemoHistory {
     }
   }
 
-  private async step(t: number, order: HistoryOrder, last: LastDays): Promise<void> {
+  /** Says whether all is quiet at its end: nothing waits for anybody and nothing is in force. */
+  private async step(t: number, order: HistoryOrder, last: LastDays): Promise<boolean> {
     await this.decideUntil(t, order);
     this.setClock(t);
     await order.loggers.write(t);
     this.setClock(Math.min(t + COLLECTED_AFTER_S, last.now));
-    await this.collector.collect();
+    await this.work.run(() => this.collector.collect());
     await this.pipeline.drainAll();
     await this.expiry.closeDue();
-    for (const card of await this.decisions.waiting(order.staff)) this.plan(card, order, last);
+    const waiting = await this.decisions.waiting(order.staff);
+    for (const card of waiting) this.plan(card, order, last);
+    return waiting.length === 0 && (await this.notices.inForce(this.clock.now())).length === 0;
   }
 
   /** The people's deeds that fall before an instant, in their order. */

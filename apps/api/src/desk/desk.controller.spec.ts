@@ -96,6 +96,23 @@ describe('the desk', () => {
     expect(body.stepMinutes).toBeGreaterThanOrEqual(216);
   });
 
+  it('loses no peak of a long history, and tells the lowest of each step', async () => {
+    await goBy(test, valley, [0.5, 5, 1]);
+    const { http } = await signInAs(test, 'analyst');
+    const query = `from=${iso(testNow - 300 * 86_400)}&to=${iso(testNow + 86_400)}`;
+    const { body } = await http.get(`/api/districts/${valley.districtId}/history?${query}`).expect(200);
+    expect(body.stepMinutes).toBe(240);
+    expect(body.points).toMatchObject([
+      {
+        within: expect.closeTo(5, 6),
+        lowest: expect.closeTo(0.5, 6),
+        strength: { atLeast: expect.closeTo(5, 6) },
+      },
+    ]);
+    expect(Date.parse(body.points[0].t) % (240 * 60_000)).toBe(0);
+    expect(Date.parse(body.points[0].strongestAt)).toBeLessThan(Date.parse(body.points[0].t));
+  });
+
   it.each([
     ['to before from', `from=${iso(testNow)}&to=${iso(testNow - 1)}`],
     ['no instants', 'from=yesterday&to=today'],

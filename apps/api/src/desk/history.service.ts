@@ -5,7 +5,7 @@ import { invalid } from '../common/validation';
 import { DistrictsService } from '../districts/districts.service';
 import { NoticeLogService } from '../notices/notice-log.service';
 import { showRange } from '../profiles/dto/range-value.dto';
-import { DistrictFindingsService, type HistoryPoint } from '../rules/findings/district-findings.service';
+import { DistrictHistoryService, type HistoryPoint } from '../rules/findings/district-history.service';
 import { RulesService } from '../rules/rules.service';
 import type { DistrictHistory, HistoryLimit, HistoryPointDto, HistoryQuery } from './dto/history.dto';
 import { nightsBetween } from './nights';
@@ -19,7 +19,7 @@ const STRENGTHS: readonly string[] = ['inversionStrengthC', 'strengthWithinTower
 export class HistoryService {
   constructor(
     private readonly districts: DistrictsService,
-    private readonly findings: DistrictFindingsService,
+    private readonly findings: DistrictHistoryService,
     private readonly rules: RulesService,
     private readonly notices: NoticeLogService,
   ) {}
@@ -28,7 +28,7 @@ export class HistoryService {
   async of(districtId: number, query: HistoryQuery): Promise<DistrictHistory> {
     const { timeZone, latitude, longitude } = await this.districts.get(districtId);
     const { from, to } = spanOf(query);
-    const { stepS, points } = await this.findings.history(districtId, from, to);
+    const { stepS, points } = await this.findings.of(districtId, from, to);
     const nights = nightsBetween(from, to, latitude, longitude);
     return {
       ...{ districtId, timeZone, from: toIso(from), to: toIso(to), stepMinutes: stepS / 60 },
@@ -73,7 +73,11 @@ function spanOf(query: HistoryQuery): { from: number; to: number } {
   return { from, to };
 }
 
-const showPoint = ({ tEnd, strengthC, withinC, sure, speakerId, reason }: HistoryPoint): HistoryPointDto => ({
-  ...{ t: toIso(tEnd), strength: showRange(strengthC), within: withinC, sure, speakerId },
-  ...(reason !== null && { reason }),
-});
+const showPoint = (point: HistoryPoint): HistoryPointDto => {
+  const { tEnd, strengthC, withinC, sure, speakerId, reason, step } = point;
+  return {
+    ...{ t: toIso(tEnd), strength: showRange(strengthC), within: withinC, sure, speakerId },
+    ...(reason !== null && { reason }),
+    ...(step && { lowest: step.lowestC, strongestAt: toIso(step.strongestAt) }),
+  };
+};

@@ -6,6 +6,7 @@ import { EvidenceService } from './evaluation/evidence.service';
 import { LiveEvaluation } from './evaluation/live-evaluation';
 import { DistrictBatches } from './findings/district-batches';
 import { DistrictFindingsService } from './findings/district-findings.service';
+import { DistrictHistoryService } from './findings/district-history.service';
 import { DistrictPlans } from './findings/district-plan';
 import { DistrictRows } from './findings/district-rows';
 import { DistrictStage } from './findings/district.stage';
@@ -21,7 +22,8 @@ import { RulesService } from './rules.service';
   providers: [
     ...[RulesService, LiveEvaluation, EvidenceService],
     ...[DistrictPlans, TowerBlockRows, DistrictRows, DistrictBatches, DistrictStage, DistrictFindingsService],
+    DistrictHistoryService,
   ],
-  exports: [RulesService, LiveEvaluation, EvidenceService, DistrictFindingsService],
+  exports: [RulesService, LiveEvaluation, EvidenceService, DistrictFindingsService, DistrictHistoryService],
 })
 export class RulesModule {}

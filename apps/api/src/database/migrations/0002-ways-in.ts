@@ -47,6 +47,10 @@ export const up: readonly string[] = [
   `DROP TABLE source_file_before`,
   `DROP TABLE source_before`,
 
+  // --- a district's history without its measures: what a chart of years reads --------------------------------------
+  `CREATE INDEX district_block_strength ON district_block(
+     district_id, t_end, rev, block_s, within_c, strength_lo, strength_hi, sure, speaker_id, spoke, reason)`,
+
   // --- forecasts, and what the day turned out to be -------------------------------------------------------------
   `CREATE TABLE forecast (
      id INTEGER PRIMARY KEY, district_id INTEGER NOT NULL REFERENCES district(id), for_day TEXT NOT NULL CHECK (for_day GLOB '????-??-??'),

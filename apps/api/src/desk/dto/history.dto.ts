@@ -18,7 +18,7 @@ export class HistoryQuery {
   to!: string;
 }
 
-/** One block of the history. */
+/** One block of the history, or the strongest of a step. */
 @ApiSchema({ name: 'HistoryPoint' })
 export class HistoryPointDto {
   @ApiProperty(instant) t!: string;
@@ -28,6 +28,13 @@ export class HistoryPointDto {
   @ApiProperty({ enum: ['true', 'false', 'not known'] }) sure!: Truth;
   @ApiProperty({ type: Number, nullable: true }) speakerId!: number | null;
   @ApiPropertyOptional() reason?: string;
+  @ApiPropertyOptional({
+    ...{ type: Number, nullable: true },
+    description: 'Where a point stands for the strongest block of a step: the least within the tower, °C',
+  })
+  lowest?: number | null;
+  @ApiPropertyOptional({ ...instant, description: 'When the strongest block of the step ended' })
+  strongestAt?: string;
 }
 
 /** A limit of the rule in force on the inversion's strength. */
@@ -53,7 +60,7 @@ export class DistrictHistory {
   @ApiProperty(instant) from!: string;
   @ApiProperty(instant) to!: string;
   @ApiProperty({
-    description: 'Minutes between points; more than a block where every block would be too many',
+    description: 'Minutes a point stands for; more than a block where every block would be too many',
   })
   stepMinutes!: number;
   @ApiProperty({ type: [HistoryPointDto] }) points!: HistoryPointDto[];

@@ -4,6 +4,7 @@ import type { StrengthPoint } from './strength-series';
 const ZONE = 'America/Denver';
 const at = (instant: string, y: number | null): StrengthPoint => ({
   x: new Date(instant).getTime(),
+  at: new Date(instant).getTime(),
   y,
   from: { t: instant, strength: {}, within: y, sure: 'true', speakerId: 1 },
 });

@@ -28,8 +28,8 @@ export function nightly(points: readonly StrengthPoint[], zone: string): Night[]
   const nights: Night[] = [];
   for (const point of points) {
     let night = nights.at(-1);
-    if (!night || point.x >= night.to) {
-      const from = noonBefore(point.x, zone);
+    if (!night || point.at >= night.to) {
+      const from = noonBefore(point.at, zone);
       const to = new TZDate(from.getTime(), zone);
       to.setDate(to.getDate() + 1);
       night = { from: from.getTime(), to: to.getTime(), strongest: null };

@@ -3,6 +3,8 @@ import type { DistrictHistory, HistoryPoint } from '../../lib/api/types';
 /** A point of the line: time in epoch ms, strength within the tower in °C, null where not known. */
 export interface StrengthPoint {
   x: number;
+  /** When it was measured: within the step that ends at `x`, where the point is the strongest of one. */
+  at: number;
   y: number | null;
   from: HistoryPoint;
 }
@@ -16,7 +18,16 @@ export interface Gap {
 
 /** The points as the chart draws them; 0 where no inversion was found, null where nothing is known. */
 export const strengthPoints = ({ points }: DistrictHistory): StrengthPoint[] =>
-  points.map((point) => ({ x: new Date(point.t).getTime(), y: point.within, from: point }));
+  points.map((point) => ({
+    x: new Date(point.t).getTime(),
+    at: new Date(point.strongestAt ?? point.t).getTime(),
+    y: point.within,
+    from: point,
+  }));
+
+/** Whether the points stand for steps of several blocks, each for its strongest. */
+export const isInSteps = ({ points }: DistrictHistory): boolean =>
+  points.some(({ strongestAt }) => strongestAt !== undefined);
 
 /** A newest block this old is not yet a gap: it takes its time to be closed and worked out. */
 const NEWEST_MS = 45 * 60_000;

@@ -3,6 +3,7 @@ import { RangeText } from '../ui/range-text';
 import type { DistrictHistory } from '../../lib/api/types';
 import { decimal } from '../../lib/format/number';
 import { dateAndTime } from '../../lib/format/time';
+import { isInSteps } from './strength-series';
 
 const Cell = chakra('td', {
   base: { px: '3', py: '1', textAlign: 'end', borderTopWidth: '1px', borderColor: 'line' },
@@ -11,8 +12,11 @@ const Head = chakra('th', {
   base: { px: '3', py: '1', textAlign: 'end', color: 'mute', bg: 'card', position: 'sticky', top: '0' },
 });
 
+const degrees = (value: number | null): string => (value === null ? 'not known' : decimal(value));
+
 /** The numbers behind the chart, every one of them. */
 export function StrengthTable({ history, name }: { history: DistrictHistory; name: string }) {
+  const inSteps = isInSteps(history);
   return (
     <Box
       maxH="340px"
@@ -26,7 +30,8 @@ export function StrengthTable({ history, name }: { history: DistrictHistory; nam
           <tr>
             <Head textAlign="start">Time ({history.timeZone})</Head>
             <Head>Strength °C</Head>
-            <Head>Within the tower °C</Head>
+            <Head>{inSteps ? 'Strongest within the tower °C' : 'Within the tower °C'}</Head>
+            {inSteps && <Head>Lowest within the tower °C</Head>}
             <Head>Sure</Head>
           </tr>
         </thead>
@@ -37,7 +42,8 @@ export function StrengthTable({ history, name }: { history: DistrictHistory; nam
               <Cell>
                 <RangeText value={point.strength} />
               </Cell>
-              <Cell>{point.within === null ? 'not known' : decimal(point.within)}</Cell>
+              <Cell>{degrees(point.within)}</Cell>
+              {inSteps && <Cell>{degrees(point.lowest ?? null)}</Cell>}
               <Cell>{point.sure === 'not known' ? 'not known' : point.sure === 'true' ? 'yes' : 'no'}</Cell>
             </tr>
           ))}

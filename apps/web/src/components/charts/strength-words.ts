@@ -3,7 +3,7 @@ import { counted, decimal } from '../../lib/format/number';
 import { rangeText } from '../../lib/format/range';
 import { dayAndTime, duration } from '../../lib/format/time';
 import { limitLines } from './limit-lines';
-import { gapsOf, strengthPoints } from './strength-series';
+import { gapsOf, isInSteps, strengthPoints } from './strength-series';
 
 /** The history in a few sentences: the strongest, how long above each limit, the notices, what is not known. */
 export function strengthWords(history: DistrictHistory, name: string, now: number): string {
@@ -13,12 +13,15 @@ export function strengthWords(history: DistrictHistory, name: string, now: numbe
   const strongest = known.reduce((best, point) => (point.y > best.y ? point : best));
   const unknownMinutes = gapsOf(history, now).reduce((sum, { from, to }) => sum + (to - from) / 60_000, 0);
   const above = limitLines(history.limits).map(({ y, label }) => {
-    const minutes = known.filter((point) => point.y >= y).length * history.stepMinutes;
+    const reached = known.filter((point) => point.y >= y).length;
+    const minutes = reached * history.stepMinutes;
+    if (isInSteps(history))
+      return `Reached ${decimal(y)} °C (${label}) in ${reached} of ${points.length} steps of ${duration(history.stepMinutes)}.`;
     return `At or above ${decimal(y)} °C (${label}) for ${duration(minutes)} in all.`;
   });
   return [
     strongest.y > 0
-      ? `Strongest ${rangeText(strongest.from.strength, { unit: '°C', style: 'words' })}, ${dayAndTime(strongest.x, history.timeZone)}.`
+      ? `Strongest ${rangeText(strongest.from.strength, { unit: '°C', style: 'words' })}, ${dayAndTime(strongest.at, history.timeZone)}.`
       : 'No surface inversion was found.',
     ...above,
     history.notices.length > 0

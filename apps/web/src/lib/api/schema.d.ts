@@ -2875,6 +2875,13 @@ export interface components {
       sure: 'true' | 'false' | 'not known';
       speakerId: number | null;
       reason?: string;
+      /** @description Where a point stands for the strongest block of a step: the least within the tower, °C */
+      lowest?: number | null;
+      /**
+       * Format: date-time
+       * @description When the strongest block of the step ended
+       */
+      strongestAt?: string;
     };
     HistoryLimit: {
       /** @enum {string} */
@@ -2899,7 +2906,7 @@ export interface components {
       from: string;
       /** Format: date-time */
       to: string;
-      /** @description Minutes between points; more than a block where every block would be too many */
+      /** @description Minutes a point stands for; more than a block where every block would be too many */
       stepMinutes: number;
       points: components['schemas']['HistoryPoint'][];
       limits: components['schemas']['HistoryLimit'][];

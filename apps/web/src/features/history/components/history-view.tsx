@@ -1,15 +1,16 @@
 import { Box, Stack } from '@chakra-ui/react';
 import { isNightly } from '../../../components/charts/nightly';
 import { StrengthHistory } from '../../../components/charts/strength-history';
+import { isInSteps } from '../../../components/charts/strength-series';
 import { Empty } from '../../../components/states/empty';
 import { Loaded } from '../../../components/states/loaded';
 import { Loading } from '../../../components/states/loading';
 import { Card } from '../../../components/ui/card';
 import { Muted, PartTitle } from '../../../components/ui/heading';
-import type { District } from '../../../lib/api/types';
+import type { District, DistrictHistory } from '../../../lib/api/types';
 import { useDistrictHistory } from '../../../lib/api/use-district-history';
 import { useNow } from '../../../lib/clock';
-import { dateAndTime } from '../../../lib/format/time';
+import { dateAndTime, duration } from '../../../lib/format/time';
 import { spanEnds } from '../spans';
 import { useHistoryChoice } from '../use-history-choice';
 import { CurrentProfile } from './current-profile';
@@ -70,7 +71,7 @@ function DistrictHistoryView({ districts, chosen, choice }: DistrictHistoryViewP
                 <Box color="mute" fontSize="sm">
                   {isNightly(data)
                     ? 'One bar each night, noon to noon: its strongest within the tower'
-                    : `One point each ${data.stepMinutes} min, within the tower`}
+                    : pointsInWords(data)}
                   ; framed: not known; dashed: the rule’s limits.
                 </Box>
               </>
@@ -82,3 +83,9 @@ function DistrictHistoryView({ districts, chosen, choice }: DistrictHistoryViewP
     </Stack>
   );
 }
+
+/** What one point of the line stands for. */
+const pointsInWords = (history: DistrictHistory): string =>
+  isInSteps(history)
+    ? `Each point the strongest of ${duration(history.stepMinutes)}, within the tower`
+    : `One point each ${history.stepMinutes} min, within the tower`;
