@@ -34,7 +34,9 @@ const HOURS = '* (SELECT block_s FROM tower WHERE id = $2) / 3600';
 const CHANGED = `WITH oldest AS (SELECT t_end, min(seq) seq FROM profile_past
     WHERE seq > $1 AND tower_id = $2 AND t_end > $3 AND t_end <= $4 GROUP BY t_end),
   pair AS (SELECT p.body->>'surface' before, coalesce(n.surface, 'not known') after,
-      p.body->>'within_c' beforeC, n.within_c afterC
+      p.body->>'within_c' beforeC, n.within_c afterC,
+      CASE p.body->>'surface' WHEN 'present' THEN p.body->>'sure' END wasSure,
+      CASE n.surface WHEN 'present' THEN n.sure END isSure
     FROM oldest JOIN profile_past p ON p.seq = oldest.seq
     LEFT JOIN profile n ON n.tower_id = $2 AND n.t_end = oldest.t_end
     WHERE (${was.join(', ')}) IS NOT (${is.join(', ')}))
@@ -43,6 +45,8 @@ const CHANGED = `WITH oldest AS (SELECT t_end, min(seq) seq FROM profile_past
     count(*) FILTER (WHERE before = 'absent' AND after = 'present') absentToPresent,
     count(*) FILTER (WHERE before <> 'not known' AND after = 'not known') toNotKnown,
     count(*) FILTER (WHERE before = 'not known' AND after <> 'not known') fromNotKnown,
+    count(*) FILTER (WHERE wasSure = 1 AND isSure = 0) toNotSure,
+    count(*) FILTER (WHERE wasSure = 0 AND isSure = 1) toSure,
     max(beforeC) FILTER (WHERE before = 'present') strongestBeforeC,
     max(afterC) FILTER (WHERE after = 'present') strongestAfterC,
     total(before = 'present') ${HOURS} inversionHoursBefore,

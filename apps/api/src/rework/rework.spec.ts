@@ -89,6 +89,22 @@ describe('what is worked out anew', () => {
     expect(last!.changes).toMatchObject({ blocksChanged: 1, toNotKnown: 1, strongestAfterC: null });
   });
 
+  it('says that an inversion is not sure any more', async () => {
+    const { body: limits } = await analyst.http.get(`/api/towers/${valley.towerIds[0]}/limits`).expect(200);
+    const [own] = limits as { sensorId: number; limits: object }[];
+    const input = { ...own!.limits, plausible: { lowest: 0, highest: 40 }, reason: 'summer station' };
+    await analyst.http.put(`/api/sensors/${own!.sensorId}/limits`).send(input).expect(200);
+    await finish();
+    expect((await reworks())[0]!.changes).toMatchObject({ toSure: 0, presentToAbsent: 0 });
+    expect((await reworks())[0]!.changes!.toNotSure).toBeGreaterThan(10);
+    await analyst.http
+      .put(`/api/sensors/${own!.sensorId}/limits`)
+      .send({ ...own!.limits, reason: 'no, a winter one' })
+      .expect(200);
+    await finish();
+    expect((await reworks())[0]!.changes!.toSure).toBeGreaterThan(10);
+  });
+
   it('follows a correction from an instant on', async () => {
     const from = iso(testNow + 2.5 * HOUR_S);
     const patch = { offset: 1.5, gain: 1, from, note: 'compared with the reference' };

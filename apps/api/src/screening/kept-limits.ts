@@ -43,7 +43,10 @@ function refuse({ physical }: SensorLimits, plausible: CheckLimitsDto['plausible
   if (plausible.lowest >= plausible.highest)
     throw invalid([{ field: 'plausible', text: 'The lowest must lie below the highest: exchange the two.' }]);
   if (plausible.lowest < physical.lowest || plausible.highest > physical.highest) {
-    const text = `Stay within what is possible, ${physical.lowest} to ${physical.highest}.`;
+    const [lowest, highest] = [physical.lowest, physical.highest].map((each) =>
+      String(each).replace('-', '−'),
+    );
+    const text = `Stay within what is possible, ${lowest} to ${highest}.`;
     throw invalid([{ field: 'plausible', text }]);
   }
 }

@@ -34,6 +34,8 @@ export class ChangedFindingsDto {
   @ApiProperty() absentToPresent!: number;
   @ApiProperty() toNotKnown!: number;
   @ApiProperty() fromNotKnown!: number;
+  @ApiProperty({ description: 'Inversions that were sure and are not any more' }) toNotSure!: number;
+  @ApiProperty({ description: 'Inversions that were not sure and now are' }) toSure!: number;
   @ApiProperty(celsius) strongestBeforeC!: number | null;
   @ApiProperty(celsius) strongestAfterC!: number | null;
   @ApiProperty() inversionHoursBefore!: number;

@@ -33,6 +33,8 @@ const movesOf = (changes: ChangedFindings): string[] =>
       ['absentToPresent', 'from none to inversion'],
       ['toNotKnown', 'to not known'],
       ['fromNotKnown', 'from not known'],
+      ['toNotSure', 'from sure to not sure'],
+      ['toSure', 'from not sure to sure'],
     ] as const
   )
     .filter(([key]) => changes[key] > 0)
@@ -45,7 +47,7 @@ export function changeSentences(changes: ChangedFindings): string[] {
   if (changes.blocksChanged === 0) return ['Nothing in the findings is different.'];
   const moves = movesOf(changes);
   const sentences = [
-    `${counted(changes.blocksChanged, 'block')} changed${moves.length > 0 ? `: ${moves.join(', ')}` : '; none changed between inversion, none and not known'}.`,
+    `${counted(changes.blocksChanged, 'block')} changed${moves.length > 0 ? `: ${moves.join(', ')}` : '; none changed between inversion, none and not known, or in how sure it is'}.`,
   ];
   if (changes.inversionHoursBefore > 0 || changes.inversionHoursAfter > 0) {
     const [before, after] = [hours(changes.inversionHoursBefore), hours(changes.inversionHoursAfter)];

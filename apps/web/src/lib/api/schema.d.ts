@@ -1318,6 +1318,10 @@ export interface components {
       absentToPresent: number;
       toNotKnown: number;
       fromNotKnown: number;
+      /** @description Inversions that were sure and are not any more */
+      toNotSure: number;
+      /** @description Inversions that were not sure and now are */
+      toSure: number;
       /** @description Within the tower, °C; null where none was present */
       strongestBeforeC: number | null;
       /** @description Within the tower, °C; null where none was present */
