@@ -2,7 +2,7 @@ import os from 'node:os';
 import type { ThreadCall } from './compute-task';
 
 /** Gives way to whatever answers requests. On Linux a priority belongs to the thread that sets it. */
-const NICE = 10;
+const NICE = 5;
 
 if (process.platform === 'linux') os.setPriority(0, NICE);
 

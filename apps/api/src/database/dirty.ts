@@ -31,10 +31,10 @@ export type StageHandler = () => Promise<number>;
 /** Changes that come within this time are worked out together, ms. */
 const GATHER_MS = 25;
 
-const MARK = `INSERT INTO dirty (stage, subject, t) SELECT $1, value->>0, value->>1 FROM json_each($2) WHERE true
+const MARK = `INSERT INTO dirty (stage, subject, t) SELECT $1, value->>0, value->>1 FROM jsonb_each($2) WHERE true
   ON CONFLICT DO UPDATE SET gen = gen + 1`;
 const SETTLE = `DELETE FROM dirty WHERE (stage, subject, t) IN (
-  SELECT d.stage, d.subject, d.t FROM json_each($2) j CROSS JOIN dirty d
+  SELECT d.stage, d.subject, d.t FROM jsonb_each($2) j CROSS JOIN dirty d
   ON d.stage = $1 AND d.subject = j.value->>0 AND d.t = j.value->>1 AND d.gen = j.value->>2)`;
 const UNMARK = `DELETE FROM dirty WHERE stage = $1 AND subject = $2 AND t > $3 AND t <= $4 AND gen = 1`;
 const NEWEST = `SELECT subject, t, gen FROM dirty WHERE stage = $1 AND t <= $2 AND NOT EXISTS (
@@ -45,7 +45,7 @@ const MARK_TOWER = `INSERT INTO dirty (stage, subject, t)
   WHERE b.sensor_id IN (SELECT id FROM sensor WHERE tower_id = $1) AND b.t_end > $2 AND b.t_end <= $3
   ON CONFLICT DO UPDATE SET gen = gen + 1`;
 const MARK_DISTRICTS = `INSERT INTO dirty (stage, subject, t)
-  SELECT DISTINCT 3, d.district_id, j.value->>1 FROM json_each($1) j JOIN (
+  SELECT DISTINCT 3, d.district_id, j.value->>1 FROM jsonb_each($1) j JOIN (
     SELECT district_id, tower_id FROM district_tower
     UNION SELECT id, floor_tower_id FROM district UNION SELECT id, bench_tower_id FROM district
     UNION SELECT id, pm25_tower_id FROM district) d ON d.tower_id = j.value->>0

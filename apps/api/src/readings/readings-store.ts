@@ -13,12 +13,12 @@ export interface InForce {
 }
 
 const IN_FORCE = `SELECT r.sensor_id sensorId, r.t_end tEnd, r.value, r.import_id importId, r.row_no rowNo
-  FROM json_each($1) j CROSS JOIN reading r ON r.sensor_id = j.value->>0 AND r.t_end = j.value->>1`;
+  FROM jsonb_each($1) j CROSS JOIN reading r ON r.sensor_id = j.value->>0 AND r.t_end = j.value->>1`;
 const WRITE = `INSERT INTO reading (sensor_id, t_end, value, import_id, row_no)
-  SELECT value->>0, value->>1, ${exactSql(1e6, 2, 4)}, $2, value->>3 FROM json_each($1) WHERE true
+  SELECT value->>0, value->>1, ${exactSql(1e6, 2, 4)}, $2, value->>3 FROM jsonb_each($1) WHERE true
   ON CONFLICT DO UPDATE SET value = excluded.value, import_id = excluded.import_id, row_no = excluded.row_no`;
 const KEEP_PAST = `INSERT INTO reading_past (sensor_id, t_end, until_at, value, import_id, row_no)
-  SELECT value->>0, value->>1, $2, ${exactSql(1e6, 2, 5)}, value->>3, value->>4 FROM json_each($1)`;
+  SELECT value->>0, value->>1, $2, ${exactSql(1e6, 2, 5)}, value->>3, value->>4 FROM jsonb_each($1)`;
 /** The statements that put readings into the store; each within the caller's transaction. */
 @Injectable()
 export class ReadingsStore {

@@ -6,11 +6,11 @@ import { meanRow } from './mean-row';
 import type { ChangedFlag } from './series';
 
 const WRITE_FLAGS = `UPDATE reading SET quality = j.q, checks = j.c
-  FROM (SELECT value->>0 s, value->>1 t, value->>2 q, value->>3 c FROM json_each($1)) j
+  FROM (SELECT value->>0 s, value->>1 t, value->>2 q, value->>3 c FROM jsonb_each($1)) j
   WHERE sensor_id = j.s AND t_end = j.t`;
 const MEAN = `value->>0, value->>1, ${exactSql(1e9, 2, 5)}, value->>3, value->>4`;
-const ADD_MEANS = `INSERT INTO block_mean (sensor_id, t_end, mean, n, quality) SELECT ${MEAN} FROM json_each($1)`;
-const WRITE_MEANS = `WITH j AS (SELECT value FROM json_each($1))
+const ADD_MEANS = `INSERT INTO block_mean (sensor_id, t_end, mean, n, quality) SELECT ${MEAN} FROM jsonb_each($1)`;
+const WRITE_MEANS = `WITH j AS (SELECT value FROM jsonb_each($1))
   INSERT INTO block_mean (sensor_id, t_end, mean, n, quality)
   SELECT ${MEAN} FROM j WHERE true
   ON CONFLICT DO UPDATE SET mean = excluded.mean, n = excluded.n, quality = excluded.quality

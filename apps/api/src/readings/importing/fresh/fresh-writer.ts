@@ -17,7 +17,7 @@ const ELSE = `SELECT
   OR EXISTS (SELECT 1 FROM override WHERE undone_at IS NULL AND sensor_id IN (SELECT value FROM json_each($1))
     AND t1 > $7 AND t0 <= $6) found`;
 const WRITE = `INSERT INTO reading (sensor_id, t_end, value, quality, checks, import_id, row_no)
-  SELECT value->>0, value->>1, ${exactSql(1e6, 2, 6)}, value->>3, value->>4, $2, value->>5 FROM json_each($1)`;
+  SELECT value->>0, value->>1, ${exactSql(1e6, 2, 6)}, value->>3, value->>4, $2, value->>5 FROM jsonb_each($1)`;
 
 /** Writes what an import's rows came to, within the caller's transaction. */
 @Injectable()
