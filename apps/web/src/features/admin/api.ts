@@ -1,13 +1,18 @@
 import { api, withQuery } from '../../lib/api/client';
 import type { Page, Role } from '../../lib/api/types';
 import { useApi } from '../../lib/api/use-api';
-import type { District, IngestKey, Measure, Office, Rule, Source, Tower, User } from './types';
+import type { District, IngestKey, Measure, Office, Rule, Source, Tower, Upload, User } from './types';
 
 export const useUsers = () => useApi<Page<User>>(withQuery('/api/users', { pageSize: 200 }));
 export const useTowers = () => useApi<Tower[]>('/api/towers');
 export const useTower = (id: number) => useApi<Tower>(`/api/towers/${id}`);
 export const useSources = (towerId: number) =>
   useApi<Source[]>(`/api/towers/${towerId}/sources`, { live: true });
+/** The last text file that was uploaded for a tower and taken in; undefined while asked, and where there is none. */
+export const useLastUpload = (towerId: number): Upload | undefined =>
+  useApi<Upload[]>(withQuery('/api/uploads', { towerId })).data?.find(
+    ({ state, kind }) => state === 'done' && kind === 'text',
+  );
 export const useKeys = (towerId: number) => useApi<IngestKey[]>(`/api/towers/${towerId}/keys`);
 export const useDistrictSettings = () => useApi<District[]>('/api/districts');
 export const useRules = (districtId: number | undefined) =>

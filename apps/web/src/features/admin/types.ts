@@ -7,6 +7,8 @@ export type User = Shapes['UserView'];
 export type Sensor = Shapes['Sensor'];
 export type Tower = Shapes['Tower'];
 export type Source = Shapes['Source'];
+/** A file that staff sent, with the layout it was read by. */
+export type Upload = Shapes['Upload'];
 export type IngestKey = Shapes['IngestKey'];
 export type District = Shapes['District'];
 /** A version of a district's rule, as data and in plain lines. */

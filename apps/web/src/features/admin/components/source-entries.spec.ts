@@ -1,5 +1,5 @@
 import type { Source } from '../types';
-import { entriesOf, pairsOf, toSource } from './source-entries';
+import { entriesOf, layoutEntriesOf, pairsOf, toSource } from './source-entries';
 
 const known = {
   kind: 'http',
@@ -46,6 +46,13 @@ describe('the entries of a source', () => {
     expect(toSource(typed)).not.toHaveProperty('url');
     expect(toSource({ ...typed, kind: 'http' })).toMatchObject({ url: 'https://x.example', token: 't' });
     expect(Object.keys(toSource({ ...typed, kind: 'push' })).sort()).toEqual(['kind', 'mapping']);
+  });
+
+  it('take over what an uploaded file has been read by', () => {
+    const timeColumns = [{ column: '1', part: 'day' }];
+    const layout = { separator: ';', timeColumns } as unknown as Source['mapping'];
+    const typed = { ...entriesOf(), ...layoutEntriesOf(layout) };
+    expect(toSource(typed, undefined, layout)).toMatchObject({ mapping: { separator: ';', timeColumns } });
   });
 
   it('read pairs a line, the last "=" dividing', () => {

@@ -31,6 +31,8 @@ export interface SourceEntries {
   missingHour: Mapping['missingHour'];
 }
 
+type PlaceEntries = 'kind' | 'path' | 'url' | 'auth' | 'username' | 'password' | 'token' | 'intervalSeconds';
+
 const linesOf = (pairs: Record<string, string> | undefined): string =>
   Object.entries(pairs ?? {})
     .map(([from, to]) => `${from} = ${to}`)
@@ -60,16 +62,9 @@ const NAMED: Record<string, string> = { '\t': 'tab' };
 const separatorOf = (typed: string): string =>
   Object.entries(NAMED).find(([, name]) => name === typed.trim().toLowerCase())?.[0] ?? typed;
 
-/** The entries to begin with: a known source's, or the usual ones. */
-export function entriesOf(source?: Source): SourceEntries {
-  const mapping: Partial<Mapping> = source?.mapping ?? {};
+/** What the form shows of a layout; the usual values where it says nothing. */
+export function layoutEntriesOf(mapping: Partial<Mapping>): Omit<SourceEntries, PlaceEntries> {
   return {
-    kind: source?.kind ?? 'folder',
-    path: source?.path ?? '',
-    url: source?.url ?? '',
-    auth: source?.auth ?? 'none',
-    ...{ username: '', password: '', token: '' },
-    intervalSeconds: source?.intervalSeconds ?? 60,
     format: mapping.format ?? 'wide',
     separator: NAMED[mapping.separator ?? ''] ?? mapping.separator ?? ',',
     decimal: mapping.decimal ?? '.',
@@ -89,8 +84,25 @@ export function entriesOf(source?: Source): SourceEntries {
   };
 }
 
-/** What is sent of the entries. What the form does not show of a known layout stays as it is. */
-export function toSource(typed: SourceEntries, before?: Source): object {
+/** The entries to begin with: a known source's, or the usual ones. */
+export function entriesOf(source?: Source): SourceEntries {
+  return {
+    kind: source?.kind ?? 'folder',
+    path: source?.path ?? '',
+    url: source?.url ?? '',
+    auth: source?.auth ?? 'none',
+    ...{ username: '', password: '', token: '' },
+    intervalSeconds: source?.intervalSeconds ?? 60,
+    ...layoutEntriesOf(source?.mapping ?? {}),
+  };
+}
+
+/**
+ * What is sent of the entries.
+ *
+ * @param layout the layout the entries came from: what the form does not show of it stays as it is
+ */
+export function toSource(typed: SourceEntries, before?: Source, layout = before?.mapping): object {
   const { kind, path, url, auth, username, password, token, intervalSeconds } = typed;
   const place = kind === 'folder' ? { path } : kind === 'http' ? { url, auth } : {};
   const secret = {
@@ -102,7 +114,7 @@ export function toSource(typed: SourceEntries, before?: Source): object {
     ...place,
     ...(kind === 'http' && secret),
     ...(kind !== 'push' && { intervalSeconds: Number(intervalSeconds) }),
-    mapping: { ...before?.mapping, ...layoutOf(typed) },
+    mapping: { ...layout, ...layoutOf(typed) },
     ...(before ? { version: before.version } : { kind }),
   };
 }

@@ -1,4 +1,5 @@
 import { Stack } from '@chakra-ui/react';
+import { useState } from 'react';
 import { ChoiceEntry, EntryForm, EntryGrid, TextEntry } from '../../../components/form';
 import { Button } from '../../../components/ui/button';
 import { useEntryForm } from '../../../lib/use-entry-form';
@@ -6,8 +7,9 @@ import { addSource, changeSource } from '../api';
 import type { Source } from '../types';
 import { CredentialEntries } from './credential-entries';
 import { intervalChoices } from './interval-choices';
+import { KnownLayout } from './known-layout';
 import { LayoutEntries } from './layout-entries';
-import { entriesOf, toSource, type SourceEntries } from './source-entries';
+import { entriesOf, layoutEntriesOf, toSource, type SourceEntries } from './source-entries';
 
 interface SourceFormProps {
   towerId: number;
@@ -27,14 +29,22 @@ const KINDS = [
 
 /** Adds or changes a source: where the readings come from, how often, and how they are laid out. */
 export function SourceForm({ towerId, source, mayUseHttp, onDone, onCancel }: SourceFormProps) {
+  const [layout, setLayout] = useState(source?.mapping);
   const entries = useEntryForm<SourceEntries, Source>({
     entries: entriesOf(source),
     perform: (typed) => {
-      const sent = toSource(typed, source);
+      const sent = toSource(typed, source, layout);
       return source ? changeSource(source.id, sent) : addSource(towerId, sent);
     },
     onDone,
   });
+  const takeLayout = (known: Source['mapping']) => {
+    setLayout(known);
+    entries.form.reset(
+      { ...entries.form.getValues(), ...layoutEntriesOf(known) },
+      { keepDefaultValues: true },
+    );
+  };
   const kind = entries.form.watch('kind');
   const intervalS = Number(entries.form.watch('intervalSeconds'));
   const kinds = mayUseHttp ? KINDS : KINDS.filter(({ value }) => value !== 'http');
@@ -51,7 +61,8 @@ export function SourceForm({ towerId, source, mayUseHttp, onDone, onCancel }: So
             <ChoiceEntry name="intervalSeconds" label="Look" choices={intervalChoices(kind, intervalS)} />
           )}
         </EntryGrid>
-        <LayoutEntries severalTimeColumns={source?.mapping.timeColumns !== undefined} />
+        <KnownLayout towerId={towerId} onTake={takeLayout} />
+        <LayoutEntries severalTimeColumns={layout?.timeColumns !== undefined} />
         {source && (
           <p>
             With a change the files are read anew from their beginnings. Readings that are known already stay

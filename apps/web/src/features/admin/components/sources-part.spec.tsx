@@ -14,6 +14,11 @@ const source = {
   ...{ failures: 0, failingSince: null, nextAt: '2026-01-16T01:02:00Z', version: 3 },
 } as unknown as Source;
 
+const upload = {
+  ...{ id: 2, name: 'january.csv', kind: 'text', state: 'done' },
+  mapping: { format: 'long', separator: ';', sensorColumn: 'which' },
+};
+
 interface Asked {
   method: string;
   path: string;
@@ -29,6 +34,7 @@ function show(role: string, sources: Source[], refusal?: object) {
       '/api/auth/me': { id: 1, role, name: 'Ada', email: 'ada@pellworth.example', districts: [] },
       '/api/towers/1/sources': sources,
       '/api/districts': [],
+      '/api/uploads?towerId=1': [upload],
     };
     const refused = refusal !== undefined && method === 'PATCH';
     const answer = refused ? refusal : method === 'GET' ? answers[path] : source;
@@ -61,6 +67,7 @@ it('leaves sources over HTTP to the administrator', async () => {
   fireEvent.click(screen.getByRole('button', { name: 'Add a source' }));
   const kinds = within(screen.getByLabelText('How do the readings come?')).getAllByRole('option');
   expect(kinds.map((each) => each.getAttribute('value'))).toEqual(['folder', 'push']);
+  expect(await screen.findByRole('button', { name: 'Take the layout of january.csv' })).toBeVisible();
 });
 
 it('keeps credentials that are not typed anew, and shows what is refused beside its field', async () => {
@@ -76,7 +83,14 @@ it('keeps credentials that are not typed anew, and shows what is refused beside 
   expect(sent()[0]!.body).not.toHaveProperty('password');
 });
 
-it('invites to add the first source', async () => {
-  show('administrator', []);
+it('invites to add the first source, laid out as the last uploaded file', async () => {
+  const { sent } = show('administrator', []);
   expect(await screen.findByText('No source yet')).toBeVisible();
+  fireEvent.click(screen.getByRole('button', { name: 'Add a source' }));
+  fireEvent.change(screen.getByLabelText(/File or folder/), { target: { value: 'mast' } });
+  fireEvent.click(await screen.findByRole('button', { name: 'Take the layout of january.csv' }));
+  expect(screen.getByLabelText(/Column with the sensor/)).toHaveValue('which');
+  fireEvent.click(screen.getByRole('button', { name: 'Add the source' }));
+  await waitFor(() => expect(sent()).toHaveLength(1));
+  expect(sent()[0]).toMatchObject({ body: { kind: 'folder', path: 'mast', mapping: upload.mapping } });
 });
