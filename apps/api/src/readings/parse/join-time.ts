@@ -1,3 +1,4 @@
+import { fullYear } from '../../towers/time-keeping/stamp';
 import type { TimePart } from '../../towers/time-keeping/time-parts';
 import type { TimeColumn } from './mapping';
 
@@ -11,15 +12,14 @@ const dayOfYear = (year: string, day: string): string => {
   return date.getUTCFullYear() === Number(year) ? date.toISOString().slice(4, 10) : '-00-00';
 };
 
-/** The full year; two digits are 1969 to 2068, as in POSIX strptime. */
-const yearOf = (parts: Parts): string => {
-  const short = parts['two-digit year'];
-  if (short === undefined) return parts.year ?? '';
-  return `${Number(short) < 69 ? '20' : '19'}${two(short)}`;
-};
+const yearOf = ({ year, 'two-digit year': short }: Parts): string =>
+  short === undefined ? (year ?? '') : String(fullYear(two(short)));
+
+/** Spreadsheets write a day without a time as its first midnight. */
+const MIDNIGHT = /[T ]0?0:00(?::00(?:\.0+)?)?(?:\s*AM)?$/i;
 
 const dateOf = (parts: Parts): string => {
-  if (parts.date !== undefined) return parts.date;
+  if (parts.date !== undefined) return parts.date.replace(MIDNIGHT, '');
   const year = yearOf(parts);
   const day = parts['day of year'];
   return day === undefined

@@ -51,10 +51,15 @@ class Watched extends Transform {
       if (this.head.equals(ZIP)) this.kind = 'workbook';
     }
     this.bytes += chunk.length;
+    if (this.bytes > LARGEST_TEXT + LARGEST_WORKBOOK) return done(tooLarge(this.kind));
+    if (this.isTooLarge) return done();
     this.hash.update(chunk);
-    const limit = this.kind === 'workbook' ? LARGEST_WORKBOOK : LARGEST_TEXT;
-    if (this.bytes > limit) done(tooLarge(this.kind));
-    else done(null, chunk);
+    done(null, chunk);
+  }
+
+  /** What comes beyond the limit is not kept; it is let pass for a while, since who still sends hears no answer. */
+  get isTooLarge(): boolean {
+    return this.bytes > (this.kind === 'workbook' ? LARGEST_WORKBOOK : LARGEST_TEXT);
   }
 
   digest(): string {
@@ -94,6 +99,7 @@ export class UploadFiles {
     const watched = new Watched();
     try {
       await pipeline(body, watched, createWriteStream(file));
+      if (watched.isTooLarge) throw tooLarge(watched.kind);
     } catch (error) {
       await rm(file, { force: true });
       throw faultOf(error);

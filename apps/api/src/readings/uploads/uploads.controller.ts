@@ -51,8 +51,7 @@ export class UploadsController {
     @Req() request: Request,
     @CurrentUser() by: SignedIn,
   ): Promise<UploadDto> {
-    const declared = Number(request.headers['content-length']);
-    return this.uploads.receive(query, request, Number.isFinite(declared) ? declared : undefined, by);
+    return this.uploads.receive(query, request, by);
   }
 
   /** Lists the newest uploads. */

@@ -1,4 +1,4 @@
-import type { Readable } from 'node:stream';
+import type { IncomingMessage } from 'node:http';
 import { Injectable, type OnModuleInit } from '@nestjs/common';
 import type { SignedIn } from '../../auth/signed-in';
 import { Clock } from '../../common/clock';
@@ -33,23 +33,25 @@ export class UploadsService implements OnModuleInit {
   }
 
   /** Keeps a file that a request brings. */
-  async receive(
-    query: UploadQuery,
-    body: Readable,
-    declaredBytes: number | undefined,
-    by: SignedIn,
-  ): Promise<UploadDto> {
+  async receive(query: UploadQuery, request: IncomingMessage, by: SignedIn): Promise<UploadDto> {
     const tower = await this.layouts.of(query.towerId);
     if (tower.retiredAt !== null) {
       throw new Problem('not-possible-now', `The tower "${tower.name}" is retired and takes no readings.`);
     }
-    if ((declaredBytes ?? 0) > LARGEST_TEXT) {
+    const { 'content-length': declared, 'content-type': type = '' } = request.headers;
+    if (type.startsWith('multipart/')) {
+      throw new Problem(
+        'bad-request',
+        'Send the file itself as the body of the request, not as part of a form.',
+      );
+    }
+    if (Number(declared ?? 0) > LARGEST_TEXT) {
       throw new Problem(
         'too-large',
         `A file may have up to ${LARGEST_TEXT / 1e6} MB. Split it by time, and send the parts.`,
       );
     }
-    const { part, ...file } = await this.files.receive(body);
+    const { part, ...file } = await this.files.receive(request);
     try {
       if (file.bytes === 0)
         throw new Problem('invalid', 'The file is empty. Choose the one that holds the readings.');

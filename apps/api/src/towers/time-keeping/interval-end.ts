@@ -1,3 +1,4 @@
+import { quoted } from '../../common/quoted';
 import { readStamp, type Stamp, type StampForm } from './stamp';
 import {
   instantOf,
@@ -26,8 +27,14 @@ export interface TimeKeeping {
 
 /** No reading of this trade is older: earlier dates are a logger that lost its clock. */
 export const EARLIEST_S = Date.UTC(1990, 0, 1) / 1000;
-/** Readings may run ahead of the service's clock by this much, s, before the logger's clock is held to be wrong. */
-export const AHEAD_S = 86_400;
+const LEAST_AHEAD_S = 15 * 60;
+
+/**
+ * How far a stamp may run ahead of the service's clock, s: a quarter of an hour, or one and a half of the logger's
+ * intervals. A reading from further ahead would be taken for the weather of an hour that has not been; it is refused,
+ * kept as it came, and seen as a trouble of the tower's clock.
+ */
+export const aheadS = (intervalS: number): number => Math.max(LEAST_AHEAD_S, 1.5 * intervalS);
 
 /** The end of the interval that an instant marks, UTC epoch seconds. */
 export function endOfInterval(instantS: number, stamp: StampMeaning, intervalS: number): number {
@@ -36,8 +43,8 @@ export function endOfInterval(instantS: number, stamp: StampMeaning, intervalS: 
 }
 
 /**
- * From a stamp's text to the END of its interval, UTC epoch seconds; or why not. Only instants from 1990 to one day
- * after `nowS` are plausible.
+ * From a stamp's text to the END of its interval, UTC epoch seconds; or why not. Only instants from 1990 to
+ * shortly after `nowS` (`aheadS`) are plausible.
  */
 export function intervalEnd(text: string, time: TimeKeeping, nowS: number): number | TimeRefusal {
   const stamp = readStamp(text, time.form);
@@ -62,11 +69,19 @@ export function endOfStamp(
 ): number | TimeRefusal {
   const instant = instantOf(stamp, time.clock, choice);
   if (typeof instant !== 'number') return instant;
-  if (instant >= EARLIEST_S && instant <= nowS + AHEAD_S)
-    return endOfInterval(instant, time.stamp, time.intervalS);
-  const side = instant < EARLIEST_S ? 'lies before 1990' : 'lies more than a day in the future';
-  return {
-    code: 'time-not-plausible',
-    why: `the time "${text.trim()}" ${side}; set the logger's clock and send the rows again with the right time.`,
-  };
+  const shown = quoted(text.trim());
+  if (instant < EARLIEST_S)
+    return {
+      code: 'time-not-plausible',
+      why: `the time ${shown} lies before 1990; set the logger's clock and send the rows again with the right time.`,
+    };
+  const ahead = instant - nowS;
+  if (ahead > aheadS(time.intervalS)) {
+    const far = ahead > 86_400 ? 'more than a day' : `${Math.round(ahead / 60)} min`;
+    return {
+      code: 'time-ahead',
+      why: `the time ${shown} lies ${far} in the future; set the logger's clock or this tower's zone, and send the rows again with the right time.`,
+    };
+  }
+  return endOfInterval(instant, time.stamp, time.intervalS);
 }

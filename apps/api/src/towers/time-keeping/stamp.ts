@@ -1,7 +1,10 @@
 import { quoted } from '../../common/quoted';
 import type { TimeRefusal } from './time-refusal';
 
-/** How a source writes its time stamps. `iso` also takes a slash-separated date whose year stands first. */
+/**
+ * How a source writes its time stamps. `iso` also takes slashes or points in a date whose year stands first, and digits
+ * alone; the forms with the year last also take two digits for it, and a month by its English name.
+ */
 export const stampForms = [
   'iso',
   'day/month/year',
@@ -21,11 +24,13 @@ export interface Stamp {
 }
 
 const ISO =
-  /^(\d{4})[-/](\d{1,2})[-/](\d{1,2})[T ]\s*(\d{1,2}):(\d{2})(?::(\d{2})(?:[.,](\d+))?)?\s*(Z|UTC|[+-]\d{2}(?::?\d{2})?)?$/i;
+  /^(\d{4})[-/.](\d{1,2})[-/.](\d{1,2})[T ]\s*(\d{1,2}):(\d{2})(?::(\d{2})(?:[.,](\d+))?)?\s*(Z|UTC|GMT|[+-]\d{2}(?::?\d{2})?)?$/i;
+/** Digits alone: date and clock (a date and an hour, too), as many loggers and archives write them. */
 const COMPACT =
-  /^(\d{4})(\d{2})(\d{2})[T ]?(\d{2})(\d{2})(?:(\d{2})(?:[.,](\d+))?)?\s*(Z|UTC|[+-]\d{2}(?::?\d{2})?)?$/i;
+  /^(\d{4})(\d{2})(\d{2})[T ]?(\d{2})(?::?(\d{2})(?::?(\d{2})(?:[.,](\d+))?)?)?\s*(Z|UTC|GMT|[+-]\d{2}(?::?\d{2})?)?$/i;
 const THREE_PARTS =
-  /^(\d{1,2})[-/.](\d{1,2})[-/.](\d{4})[T ,]\s*(\d{1,2}):(\d{2})(?::(\d{2})(?:[.,](\d+))?)?\s*(AM|PM)?$/i;
+  /^(\d{1,2}|[a-z]{3})[-/. ](\d{1,2}|[a-z]{3})[-/., ]\s?(\d{4}|\d{2})[T ,]\s*(\d{1,2}):(\d{2})(?::(\d{2})(?:[.,](\d+))?)?\s*(AM|PM)?$/i;
+const MONTHS = ['jan', 'feb', 'mar', 'apr', 'may', 'jun', 'jul', 'aug', 'sep', 'oct', 'nov', 'dec'];
 const EPOCH = /^\d{9,10}(?:\.\d+)?$/;
 const EPOCH_MS = /^\d{12,13}$/;
 
@@ -47,7 +52,7 @@ const unreadable = (text: string, form: StampForm): TimeRefusal => ({
 
 /** Offset from UTC in seconds from `Z`, `UTC`, `+02`, `-0700` or `-07:00`; undefined beyond 18 h. */
 export function offsetSeconds(text: string): number | undefined {
-  if (/^(Z|UTC)$/i.test(text)) return 0;
+  if (/^(Z|UTC|GMT)$/i.test(text)) return 0;
   const parts = /^([+-])(\d{2})(?::?(\d{2}))?$/.exec(text);
   if (!parts) return undefined;
   const minutes = Number(parts[2]) * 60 + Number(parts[3] ?? 0);
@@ -67,12 +72,20 @@ const fraction = (digits: string | undefined): number => (digits ? Math.round(Nu
 
 const readIso = (parts: RegExpExecArray): Stamp | undefined => {
   const [, y, mo, d, h, mi, s, part, zone] = parts;
-  const shownS = shown(Number(y), Number(mo), Number(d), Number(h), Number(mi), Number(s ?? 0));
+  const shownS = shown(Number(y), Number(mo), Number(d), Number(h), Number(mi ?? 0), Number(s ?? 0));
   if (shownS === undefined) return undefined;
   if (!zone) return { shownS: shownS + fraction(part) };
   const offsetS = offsetSeconds(zone);
   return offsetS === undefined ? undefined : { shownS: shownS + fraction(part), offsetS };
 };
+
+/** A month by its number or its English name; NaN for neither. */
+const monthOf = (text: string): number =>
+  /^\d/.test(text) ? Number(text) : MONTHS.indexOf(text.toLowerCase()) + 1 || NaN;
+
+/** Two digits are 1969 to 2068, as in POSIX strptime. */
+export const fullYear = (digits: string): number =>
+  digits.length > 2 ? Number(digits) : Number(digits) + (Number(digits) < 69 ? 2000 : 1900);
 
 const readThreeParts = (parts: RegExpExecArray, form: StampForm): Stamp | undefined => {
   const [, first, second, y, h, mi, s, part, half] = parts;
@@ -82,7 +95,7 @@ const readThreeParts = (parts: RegExpExecArray, form: StampForm): Stamp | undefi
     if (hour < 1 || hour > 12) return undefined;
     hour = (hour % 12) + (half.toUpperCase() === 'PM' ? 12 : 0);
   }
-  const shownS = shown(Number(y), Number(mo), Number(d), hour, Number(mi), Number(s ?? 0));
+  const shownS = shown(fullYear(y!), monthOf(mo!), Number(d), hour, Number(mi), Number(s ?? 0));
   return shownS === undefined ? undefined : { shownS: shownS + fraction(part) };
 };
 

@@ -1,5 +1,6 @@
 import type { SensorQuantity } from '../../../towers/quantities';
 import { suits, type ForeignUnit } from '../../../towers/units';
+import { quoted } from '../../../common/quoted';
 import { readNumber } from '../number-cell';
 import type { FoundHeader } from './find-header';
 import { guessSensor, quantityIn, unitIn, type KnownSensor } from './guess-sensor';
@@ -63,15 +64,16 @@ export function findColumns(
 ): FoundColumn[] {
   const taken = new Set<string>();
   return header.names.flatMap((name, index): FoundColumn[] => {
-    if (used.includes(index)) return [];
+    if (used.includes(index) || name === '') return [];
     const cells = header.data.map((row) => row.cells[index] ?? '');
     const samples = [...new Set(cells.filter((cell) => cell !== ''))].slice(0, SAMPLES);
-    const guess = guessSensor(name, sensors);
+    const title = header.titles[index]!;
+    const guess = guessSensor(title, sensors);
     const isTaken = guess !== undefined && taken.has(guess.name);
     if (guess) taken.add(guess.name);
     const sensor = guess && !isTaken ? guess.name : null;
-    const quantity = guess?.quantity ?? quantityIn(name);
-    const said = [name, ...header.between.map((row) => row.cells[index] ?? '')].map(unitIn).find(Boolean);
+    const quantity = guess?.quantity ?? quantityIn(title);
+    const said = [title, ...header.between.map((row) => row.cells[index] ?? '')].map(unitIn).find(Boolean);
     const spread = spreadOf(cells, decimal, marks);
     const bySize = quantity ? unitBySize(quantity, spread) : null;
     const unit = said !== undefined && quantity !== undefined && suits(said, quantity) ? said : bySize;
@@ -85,53 +87,8 @@ export function findColumns(
       const note = `Values up to ${Math.round(spread.high)}: no air is that warm in °C. °F is likely; please say.`;
       return [{ ...base, note, unitOpen: true }];
     }
-    const note = isOdd ? `Values up to ${Math.round(spread.high)}: look whether this is °F.` : null;
+    const called = title === name ? null : `Called ${quoted(title)} in the file.`;
+    const note = isOdd ? `Values up to ${Math.round(spread.high)}: look whether this is °F.` : called;
     return [{ ...base, note, unitOpen: isOdd }];
   });
-}
-
-/** The columns of a long table: which names the sensor, which holds the value. */
-export interface LongColumns {
-  readonly sensorColumn: string;
-  readonly valueColumn: string;
-  /** The sensors as the file writes them. */
-  readonly written: readonly string[];
-}
-
-const FEW = 60;
-const MOSTLY = 0.9;
-
-/** Whether a table is long: few names in one column, numbers in just one other, the time coming again and again. */
-export function findLong(
-  header: FoundHeader,
-  used: readonly number[],
-  decimal: '.' | ',',
-): LongColumns | undefined {
-  const places = header.names.map((_, place) => place).filter((place) => !used.includes(place));
-  const cellsAt = (place: number): string[] =>
-    header.data.map((row) => row.cells[place] ?? '').filter(Boolean);
-  const isNumeric = (place: number): boolean => {
-    const cells = cellsAt(place);
-    return (
-      cells.filter((cell) => typeof readNumber(cell, decimal) === 'number').length >= MOSTLY * cells.length
-    );
-  };
-  const numeric = places.filter((place) => cellsAt(place).length > 0 && isNumeric(place));
-  const named = places.filter((place) => {
-    const distinct = new Set(cellsAt(place));
-    return !numeric.includes(place) && distinct.size >= 2 && distinct.size <= FEW;
-  });
-  const times = header.data.map((row) => used.map((place) => row.cells[place]).join(' '));
-  const comeAgain = new Set(times).size <= times.length / 2 + 1;
-  const value =
-    numeric.length === 1
-      ? numeric[0]
-      : numeric.find((place) => /value|wert|valor/i.test(header.names[place]!));
-  const sensor = named.find((place) => /sensor|channel|name|param/i.test(header.names[place]!)) ?? named[0];
-  if (value === undefined || sensor === undefined || !comeAgain) return undefined;
-  return {
-    sensorColumn: header.names[sensor]!,
-    valueColumn: header.names[value]!,
-    written: [...new Set(cellsAt(sensor))],
-  };
 }

@@ -14,14 +14,14 @@ const CLEAR = 0.9;
 const ENOUGH = 0.5;
 
 /**
- * The separator that cuts most lines into the same number of cells, two at least. Undefined where none does: then the
- * file is no table.
+ * The separators that cut most lines into the same number of cells, two at least, the likeliest first. None: the file is
+ * no table. Which one is right is seen by where a time can be read.
  */
-export function findSeparator(sample: FileSample): Cut | undefined {
+export function findCuts(sample: FileSample): Cut[] {
   const cuts = SEPARATORS.map((separator) => {
     const rows = rowsBy(sample, separator);
     const common = mostFrequent(rows.map(({ cells }) => cells.length));
     return { separator, rows, cells: common?.value ?? 0, share: common?.share ?? 0 };
   }).filter(({ cells, share }) => cells >= 2 && share >= ENOUGH);
-  return cuts.find(({ share }) => share >= CLEAR) ?? cuts.sort((a, b) => b.share - a.share)[0];
+  return cuts.sort((a, b) => Number(b.share >= CLEAR) - Number(a.share >= CLEAR));
 }

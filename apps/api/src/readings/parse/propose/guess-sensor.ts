@@ -9,32 +9,40 @@ export interface KnownSensor {
 }
 
 const FOOT_M = 0.3048;
+const CENTIMETRE_M = 0.01;
 const CLOSE_M = 0.5;
 
 /** The first that fits counts. */
 const QUANTITY_WORDS: readonly (readonly [SensorQuantity, RegExp])[] = [
-  ['pm2.5', /pm\s*_?2[._]?5/i],
-  ['wind direction', /\bdir|direction|\bwd|azimuth/i],
+  ['pm2.5', /pm\s*2[._ ]?5/i],
+  ['wind direction', /dir(?:ec|\b|[^a-z]|$)|\bwd|azimuth/i],
   ['wind speed', /wind|speed|\bws|anemo/i],
-  ['relative humidity', /humid|\brh|\bhum\b/i],
+  ['relative humidity', /humid|(?:^|[^a-z])rh|hum\b/i],
   ['dew point', /dew|\btd\b/i],
   ['wet bulb', /wet/i],
   ['station pressure', /press|baro|\bbp\b/i],
-  ['air temperature', /temp|\bair\s*t\b|(?:^|[^a-z])ta?(?:[_ ]|\d|$)/i],
+  ['air temperature', /temp|tmp|air\s*t|(?:^|[^a-z])t(?:a|c|air|amb)?(?:[ ]|\d|$)/i],
 ];
 
-/** What is made of readings rather than read: deviations, extremes, flags, differences. */
-const DERIVED =
-  /std|stdev|\bsd\b|dev\b|deviation|\bmax|\bmin\b|minimum|flag|\bqc\b|quality|gradient|richardson|delta|battery|count/i;
+/** What is made of readings rather than read (deviations, extremes, flags, differences), or is not of the air outside. */
+const OTHER = new RegExp(
+  [
+    'std|stdev|\\bsd\\b|dev\\b|deviation|\\bmax|\\bmin\\b|minimum|flag|\\bqc\\b|quality|gradient|richardson|delta|count|gust|error',
+    'soil|ground|surface|skin|snow|water|wetness|leaf|panel|ptemp|logger|batt|box|enclosure|case|body|internal|virtual|sonic|potential',
+    'vapou?r|vpd|sea|\\bslp|\\bmsl|altim|qnh|qff|road|dome|sensor t|solar|radiation',
+  ].join('|'),
+  'i',
+);
 
 const plain = (text: string): string => text.toLowerCase().replace(/[^a-z0-9]/g, '');
 
-/** The height in a column's name, m: "Temp 10 m", "T_33ft", "t2", "T60". */
+/** The height in a column's name, m: "Temp 10 m", "T_33ft", "t2", "T60", "T200cm". */
 export function heightIn(name: string): number | undefined {
-  const said = /(\d+(?:[.,]\d+)?)\s*_?(m|meters?|metres?|ft|feet)(?![a-z])/i.exec(name);
+  const said = /(\d+(?:[.,]\d+)?)\s*_?(cm|m|meters?|metres?|ft|feet)(?![a-z])/i.exec(name);
   if (said) {
     const value = Number(said[1]!.replace(',', '.'));
-    return /^f/i.test(said[2]!) ? value * FOOT_M : value;
+    const unit = said[2]!.toLowerCase();
+    return unit === 'cm' ? value * CENTIMETRE_M : unit.startsWith('f') ? value * FOOT_M : value;
   }
   const bare = /(?:^|[a-z_ ])(\d+(?:\.\d+)?)$/i.exec(name.replace(/\s*[([].*?[)\]]/g, '').trim());
   return bare ? Number(bare[1]) : undefined;
@@ -43,7 +51,7 @@ export function heightIn(name: string): number | undefined {
 /** The quantity that a column's name speaks of. */
 export function quantityIn(name: string): SensorQuantity | undefined {
   const spaced = name.replace(/_/g, ' ');
-  return DERIVED.test(spaced) ? undefined : QUANTITY_WORDS.find(([, words]) => words.test(spaced))?.[0];
+  return OTHER.test(spaced) ? undefined : QUANTITY_WORDS.find(([, words]) => words.test(spaced))?.[0];
 }
 
 /** The sensor a column seems to be: by its name, or by quantity and height; undefined where that is not clear. */
@@ -64,8 +72,8 @@ export function guessSensor(name: string, sensors: readonly KnownSensor[]): Know
 
 /** Words for units that are converted, as they stand in headers. */
 const UNIT_WORDS: readonly (readonly [ForeignUnit, RegExp])[] = [
-  ['°F', /°\s*f\b|deg\.?\s*f\b|fahrenheit|[([]\s*f\s*[)\]]/i],
-  ['K', /kelvin|[([]\s*k\s*[)\]]/i],
+  ['°F', /°\s*f\b|deg(?:rees)?\.?\s*f\b|fahrenheit|[([]\s*f\s*[)\]]|(?:^| )f$|te?mpf\b/i],
+  ['K', /kelvin|[([]\s*k\s*[)\]]|(?:^|\d m |temp )k$/i],
   ['mph', /\bmph\b|mi\/h/i],
   ['km/h', /\bkm\/?h\b|\bkph\b/i],
   ['kn', /\bkn\b|\bkts?\b|knots?/i],
@@ -78,4 +86,4 @@ const UNIT_WORDS: readonly (readonly [ForeignUnit, RegExp])[] = [
 
 /** The foreign unit that a header, or the line of units below it, names. */
 export const unitIn = (text: string): ForeignUnit | undefined =>
-  UNIT_WORDS.find(([, words]) => words.test(text))?.[0];
+  UNIT_WORDS.find(([, words]) => words.test(text.replace(/_/g, ' ')))?.[0];

@@ -31,7 +31,7 @@ describe('what a file seems to be', () => {
     ]);
     expect(mapping).toMatchObject({
       ...{ separator: ',', decimal: '.', headerRow: 1, firstDataRow: 2, timeColumn: 'Date', timeForm: 'iso' },
-      missing: ['-999', 'NaN'],
+      missing: ['NaN', 'NAN', '-999'],
       columns: {
         'Air Temperature (2 m)': 't2',
         'Air Temperature (60 m) [deg F]': 't60',

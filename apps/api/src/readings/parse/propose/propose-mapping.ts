@@ -1,11 +1,12 @@
 import { DEFAULT_MAPPING, type Mapping } from '../mapping';
 import { HeaderError } from '../parsed-readings';
-import { findColumns, findLong, type FoundColumn, type LongColumns } from './find-columns';
+import { findColumns, type FoundColumn } from './find-columns';
 import { findHeader, type FoundHeader } from './find-header';
+import { findLong, type LongColumns } from './find-long';
 import { findMarks } from './find-marks';
-import { findSeparator, type Cut } from './find-separator';
+import { findCuts, type Cut } from './find-separator';
 import { findTime, type FoundTime } from './find-time';
-import { guessSensor, unitIn, type KnownSensor } from './guess-sensor';
+import type { KnownSensor } from './guess-sensor';
 import type { Question } from './questions';
 import type { FileSample } from './sample';
 
@@ -27,6 +28,8 @@ export interface FoundLayout {
   readonly questions: readonly Question[];
 }
 
+/** Not a number by its own words. */
+const ALWAYS = ['NaN', 'NAN'];
 const COMMA = /^[+-]?\d*,\d+$/;
 const POINT = /^[+-]?\d*\.\d+$/;
 
@@ -97,20 +100,20 @@ const unitQuestion = (columns: readonly FoundColumn[]): Question[] => {
 const layoutOf = (
   long: LongColumns | undefined,
   columns: readonly FoundColumn[],
-  sensors: readonly KnownSensor[],
 ): Pick<Mapping, 'format' | 'columns' | 'units' | 'sensorColumn' | 'valueColumn'> => {
   const { sensorColumn, valueColumn } = DEFAULT_MAPPING;
   if (long) {
-    const guesses = long.written.map((name) => [name, guessSensor(name, sensors)?.name] as const);
-    const units = long.written.map((name) => [name, unitIn(name)] as const);
     return {
       format: 'long',
       ...{ sensorColumn: long.sensorColumn, valueColumn: long.valueColumn },
-      columns: Object.fromEntries(guesses.filter(([, sensor]) => sensor !== undefined)) as Record<
-        string,
-        string
-      >,
-      units: Object.fromEntries(units.filter(([, unit]) => unit !== undefined)) as Mapping['units'],
+      columns: Object.fromEntries(
+        long.written.flatMap(({ name, sensor }) => (sensor === undefined ? [] : [[name, sensor]])),
+      ),
+      units: Object.fromEntries(
+        long.written.flatMap(({ name, sensor, unit }) =>
+          sensor === undefined || unit === undefined ? [] : [[name, unit]],
+        ),
+      ),
     };
   }
   return {
@@ -125,6 +128,26 @@ const layoutOf = (
   };
 };
 
+/** The file cut in the way in which it says the time. */
+function tableOf(sample: FileSample): { cut: Cut; header: FoundHeader; time: FoundTime } {
+  const cuts = findCuts(sample);
+  if (cuts.length === 0) {
+    throw new HeaderError(
+      'The file is no table: most of its lines cannot be cut into the same number of cells. ' +
+        'Save it as CSV, with a column for the time and one for each sensor.',
+    );
+  }
+  for (const cut of cuts) {
+    const header = findHeader(cut);
+    const time = findTime(header);
+    if (time) return { cut, header, time };
+  }
+  throw new HeaderError(
+    'No column of the file holds times that can be read. Write a date and a time of day in each row, such as ' +
+      '2026-01-31 05:10:00, or day, month, year and time in columns of their own.',
+  );
+}
+
 /**
  * Looks at a file's sample and proposes how to read it. Nothing is decided that the file does not show: what stays open
  * comes as a note or a question.
@@ -132,21 +155,8 @@ const layoutOf = (
  * @throws HeaderError where the file is no table, or says no time.
  */
 export function proposeMapping(sample: FileSample, tower: ForTower): FoundLayout {
-  const cut = findSeparator(sample);
-  if (!cut) {
-    throw new HeaderError(
-      'The file is no table: most of its lines cannot be cut into the same number of cells. ' +
-        'Save it as CSV, with a column for the time and one for each sensor.',
-    );
-  }
-  const header = findHeader(cut);
+  const { cut, header, time } = tableOf(sample);
   const decimal = decimalOf(cut, header);
-  const time = findTime(header);
-  if (!time) {
-    throw new HeaderError(
-      'No column of the file holds times that can be read. Write them as 2026-01-31 05:10:00, or as day, month and year apart.',
-    );
-  }
   const places = header.names.map((_, place) => place).filter((place) => !time.used.includes(place));
   const marks = findMarks(
     places.map((place) => header.data.map((row) => row.cells[place] ?? '')),
@@ -154,8 +164,8 @@ export function proposeMapping(sample: FileSample, tower: ForTower): FoundLayout
   );
   const markTexts = new Set(marks.map(({ text }) => text));
   const columns = findColumns(header, time.used, tower.sensors, decimal, markTexts);
-  const long = findLong(header, time.used, decimal);
-  const layout = layoutOf(long, columns, tower.sensors);
+  const long = findLong(header, time.used, tower.sensors, decimal);
+  const layout = layoutOf(long, columns);
   const notes = [
     ...(header.headerRow === 0 ? ['The file has no header: its columns are called by their numbers.'] : []),
     ...(header.headerRow > 1
@@ -178,9 +188,10 @@ export function proposeMapping(sample: FileSample, tower: ForTower): FoundLayout
       },
       ...{ timeColumn: time.timeColumn ?? DEFAULT_MAPPING.timeColumn, timeForm: time.timeForm },
       ...(time.timeColumns ? { timeColumns: time.timeColumns } : {}),
-      missing: marks.map(({ text }) => text),
+      ...(time.stamp ? { stamp: time.stamp } : {}),
+      missing: [...new Set([...ALWAYS, ...marks.map(({ text }) => text)])],
     },
-    ...{ columnNames: header.names, columns, written: long?.written ?? [] },
+    ...{ columnNames: header.names, columns, written: long?.written.map(({ name }) => name) ?? [] },
     notes,
     questions: [...dayQuestion(time, firstTime), ...unitQuestion(columns)],
   };
