@@ -171,7 +171,8 @@ export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
       const importId = running.importId ?? (await this.begin(running));
       if (!(await this.fresh.isAlone(layout, importId, fresh))) return false;
       await this.fresh.write(layout, importId, fresh, running);
-      const taken = { ...NOTHING_COUNTED, new: read.rows.tEnd.length, refused: read.refused.length };
+      const [all, repeated] = [read.rows.tEnd.length, fresh.repeated];
+      const taken = { ...NOTHING_COUNTED, new: all - repeated, repeated, refused: read.refused.length };
       await this.taker.keep(importId, read.rows, read.refused, taken, running.counts.refused);
       running.importId = importId;
       running.counts = sumOf(running.counts, taken);

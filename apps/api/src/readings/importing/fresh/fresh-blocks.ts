@@ -52,7 +52,8 @@ export class FreshBlocks {
     if (this.epoch <= passedUntil) this.beginAfter(this.front());
     const first = rows.reduce((t, { tEnd }) => Math.min(t, tEnd), Infinity);
     this.begin(first);
-    if (!this.isLater(first) || !this.take(rows)) {
+    const repeated = this.isLater(first) ? this.take(rows) : undefined;
+    if (repeated === undefined) {
       this.beginAfter(
         Math.max(
           this.front(),
@@ -73,7 +74,7 @@ export class FreshBlocks {
     this.lastEnd = Math.max(this.lastEnd, blockEndOf(front, this.tower.blockS));
     const heldAfterT = Math.max(this.heldFrom(), afterT - this.marginS);
     const fresh: Fresh = {
-      epoch: this.epoch,
+      ...{ epoch: this.epoch, repeated },
       ...{ ...rowsOf, ...found, near, waitingEnds: this.nowWaiting(afterT, untilT) },
       ...{ done: { afterT, untilT }, held: { afterT: heldAfterT, untilT: this.lastEnd } },
     };
@@ -116,11 +117,16 @@ export class FreshBlocks {
     return this.doneUntil === this.firstDone || first - this.context.afterS > this.doneUntil;
   }
 
-  private take(rows: readonly ParsedReading[]): boolean {
+  /** Takes rows; how many were repeated, undefined where one is out of order or cannot be kept exactly. */
+  private take(rows: readonly ParsedReading[]): number | undefined {
     const bySensor = new Map(this.series.map((series) => [series.sensorId, series]));
-    return rows.every(
-      (row) => millionths(row.value) !== null && bySensor.get(row.sensorId)?.add(row) === true,
-    );
+    let repeated = 0;
+    for (const row of rows) {
+      const added = millionths(row.value) === null ? undefined : bySensor.get(row.sensorId)?.add(row);
+      if (added === 'repeated') repeated += 1;
+      else if (added !== 'added') return undefined;
+    }
+    return repeated;
   }
 
   /** The end of the last block that later rows cannot alter and that counts as closed. */

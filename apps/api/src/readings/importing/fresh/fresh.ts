@@ -6,6 +6,8 @@
 export interface Fresh {
   /** Counts how often it was begun anew: after rows that went the usual way only a later one may be written. */
   readonly epoch: number;
+  /** Rows that say the one before once more. */
+  readonly repeated: number;
   /** Readings as JSON rows [sensor, end, millionths, quality, checks, row number], by sensor and time. */
   readonly readings: string;
   /** Flags, as JSON rows [sensor, end, quality, checks], of readings that were written before; those not 0. */

@@ -18,15 +18,17 @@ export class OwnSeries implements Series {
     this.sensorId = id;
   }
 
-  /** Adds a later reading; says false, adding nothing, where it is none. */
-  add({ tEnd, value, rowNo }: ParsedReading): boolean {
-    if (tEnd <= (this.tEnd.at(-1) ?? -Infinity)) return false;
+  /** Adds a later reading; the last one once more is passed over, any other is out of order and not added. */
+  add({ tEnd, value, rowNo }: ParsedReading): 'added' | 'repeated' | 'out of order' {
+    const last = this.tEnd.length - 1;
+    if (last >= 0 && tEnd <= this.tEnd[last]!)
+      return tEnd === this.tEnd[last] && value === this.value[last] ? 'repeated' : 'out of order';
     this.tEnd.push(tEnd);
     this.value.push(value);
     this.rowNo.push(rowNo);
     this.quality.push(0);
     this.checks.push(0);
-    return true;
+    return 'added';
   }
 
   /** How many readings in the store end in (afterT, …]. */
