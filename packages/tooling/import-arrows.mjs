@@ -44,7 +44,7 @@ const FLOORS = [
   ['office', 'towers', 'districts'],
   ['readings', 'screening', 'profiles'],
   ['rules'],
-  ['subscribers', 'notices'],
+  ['subscribers', 'notices', 'freshness'],
   ['proposals'],
   ['delivery', 'desk', 'public-status', 'health'],
   ['demo'],

@@ -10,6 +10,7 @@ import { DeliveryModule } from './delivery/delivery.module';
 import { DemoModule } from './demo/demo.module';
 import { DeskModule } from './desk/desk.module';
 import { DistrictsModule } from './districts/districts.module';
+import { FreshnessModule } from './freshness/freshness.module';
 import { HealthModule } from './health/health.module';
 import { LoggingModule } from './http/logging.module';
 import { WebFilesModule } from './http/web-files.module';
@@ -53,6 +54,7 @@ import { UsersModule } from './users/users.module';
     OfficeModule,
     OutboxModule,
     SubscribersModule,
+    FreshnessModule,
     NoticesModule,
     ProposalsModule,
     DeskModule,

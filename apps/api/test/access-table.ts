@@ -73,6 +73,7 @@ export const accessTable: Record<string, Access> = {
   'POST /api/overrides': analyst,
   'DELETE /api/overrides/:id': analyst,
   'GET /api/reworks': all,
+  'GET /api/troubles': all,
   'GET /api/towers/:id/calendar': all,
   'GET /api/towers/:id/flags': all,
   'GET /api/towers/:id/raw': all,

@@ -31,8 +31,10 @@ export class MailWriter {
     personId,
     lang,
     createdAt,
+    isToStaff,
   }: OutboundMessage): SendMailOptions {
     const manageUrl = this.links.urlOf(personId);
+    const way = isToStaff ? {} : this.wayToLeave(personId);
     return {
       from: this.settings.smtp.from,
       to: address,
@@ -41,14 +43,21 @@ export class MailWriter {
       ...(html !== null && { html: html.replaceAll(MANAGE_URL, manageUrl) }),
       messageId: `<${messageId}@${this.host}>`,
       date: new Date(createdAt * 1000),
-      list: { unsubscribe: { url: this.links.leaveUrlOf(personId), comment: 'leave' } },
+      ...way,
       headers: {
-        'List-Unsubscribe-Post': 'List-Unsubscribe=One-Click',
+        ...way.headers,
         'Auto-Submitted': 'auto-generated',
         'Content-Language': lang,
       },
       disableFileAccess: true,
       disableUrlAccess: true,
+    };
+  }
+
+  private wayToLeave(personId: number): Pick<SendMailOptions, 'list'> & { headers?: Record<string, string> } {
+    return {
+      list: { unsubscribe: { url: this.links.leaveUrlOf(personId), comment: 'leave' } },
+      headers: { 'List-Unsubscribe-Post': 'List-Unsubscribe=One-Click' },
     };
   }
 }

@@ -11,6 +11,8 @@ export interface OutboundMessage {
   readonly contactId: number;
   readonly personId: number;
   readonly address: string;
+  /** To somebody who works here, at their account's e-mail: a mail about the work, which nobody subscribed to. */
+  readonly isToStaff: boolean;
   readonly lang: string;
   readonly subject: string | null;
   readonly text: string;

@@ -12,8 +12,9 @@ export interface Result {
 }
 
 const MESSAGE = `SELECT o.id, o.message_id messageId, o.channel, o.topic, o.contact_id contactId, c.person_id personId,
-  c.address, o.payload_id payloadId, o.created_at createdAt, o.attempts
+  coalesce(u.email, c.address) address, c.user_id IS NOT NULL isToStaff, o.payload_id payloadId, o.created_at createdAt, o.attempts
   FROM json_each($1) j CROSS JOIN outbox o ON o.id = j.value CROSS JOIN contact c ON c.id = o.contact_id
+    LEFT JOIN user u ON u.id = c.user_id
   ORDER BY o.priority DESC, o.next_at, o.id`;
 
 const PAYLOAD = `SELECT id payloadId, lang, subject, text, html FROM payload WHERE id IN (SELECT value FROM json_each($1))`;
@@ -25,10 +26,11 @@ const CLAIM = `UPDATE outbox SET state = 'sending', attempts = attempts + 1
 
 /** Of what was claimed, closes what must not go out any more: too late, silenced, or to somebody who left. */
 const CLOSE = `WITH claimed AS (
-    SELECT o.id, o.not_after < $1 late, c.stopped_at IS NOT NULL OR c.address IS NULL gone,
+    SELECT o.id, o.not_after < $1 late, c.stopped_at IS NOT NULL OR coalesce(u.email, c.address) IS NULL
+      OR u.retired_at IS NOT NULL gone,
       o.revision < coalesce(t.silent_before, 0) silent
     FROM json_each($2) j CROSS JOIN outbox o ON o.id = j.value CROSS JOIN contact c ON c.id = o.contact_id
-      LEFT JOIN outbox_topic t ON t.topic = o.topic)
+      LEFT JOIN user u ON u.id = c.user_id LEFT JOIN outbox_topic t ON t.topic = o.topic)
   UPDATE outbox SET settled_at = $1, attempts = attempts - 1,
     state = CASE WHEN claimed.late THEN 'expired' ELSE 'suppressed' END,
     detail = CASE WHEN claimed.late THEN 'it was too late to send it' WHEN claimed.gone THEN 'the recipient left or stopped'
@@ -126,12 +128,16 @@ export class OutboxQueue {
   /** The words are read once for the many messages that share them. */
   private async messages(ids: number[]): Promise<OutboundMessage[]> {
     type Words = Pick<OutboundMessage, 'lang' | 'subject' | 'text' | 'html'>;
-    type Row = Omit<OutboundMessage, keyof Words> & { payloadId: number };
+    type Row = Omit<OutboundMessage, keyof Words | 'isToStaff'> & { payloadId: number; isToStaff: 0 | 1 };
     const rows = await this.sql.all<Row>(MESSAGE, [JSON.stringify(ids)]);
     const wanted = [...new Set(rows.map(({ payloadId }) => payloadId))];
     const payloads = await this.sql.all<Words & { payloadId: number }>(PAYLOAD, [JSON.stringify(wanted)]);
     const words = new Map(payloads.map(({ payloadId, ...rest }) => [payloadId, rest]));
-    return rows.map(({ payloadId, ...row }) => ({ ...row, ...words.get(payloadId)! }));
+    return rows.map(({ payloadId, isToStaff, ...row }) => ({
+      ...row,
+      isToStaff: isToStaff === 1,
+      ...words.get(payloadId)!,
+    }));
   }
 
   private async stopContacts(stopped: (string | number)[][], now: number): Promise<void> {

@@ -136,9 +136,9 @@ export class OutboxService {
     const rows = await this.sql.all<
       Omit<OutboxRow, 'to' | 'lastAt'> & { address: string | null; at: number | null }
     >(
-      `SELECT o.id, o.channel, c.address, o.state, o.attempts, o.detail,
+      `SELECT o.id, o.channel, coalesce(u.email, c.address) address, o.state, o.attempts, o.detail,
          coalesce(o.settled_at, (SELECT max(a.at) FROM attempt a WHERE a.outbox_id = o.id)) at
-       FROM outbox o JOIN contact c ON c.id = o.contact_id WHERE ${where}
+       FROM outbox o JOIN contact c ON c.id = o.contact_id LEFT JOIN user u ON u.id = c.user_id WHERE ${where}
        ORDER BY o.revision DESC, o.id LIMIT $4 OFFSET $5`,
       [topic, state, channel, pageSize, offsetOf(query)],
     );

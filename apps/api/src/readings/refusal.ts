@@ -2,6 +2,7 @@
 export const refusalCodes = [
   'time-not-readable',
   'time-not-plausible',
+  'time-ahead',
   'time-happens-twice',
   'time-does-not-exist',
   'value-not-a-number',

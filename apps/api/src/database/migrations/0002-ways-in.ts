@@ -66,7 +66,8 @@ export const up: readonly string[] = [
   `CREATE TABLE tower_trouble (
      id INTEGER PRIMARY KEY, tower_id INTEGER NOT NULL REFERENCES tower(id),
      kind TEXT NOT NULL CHECK (kind IN ('late','silent','clock ahead','clock shifted','source failing')),
-     since_t INTEGER NOT NULL, seen_at INTEGER NOT NULL, text TEXT NOT NULL, told_at INTEGER, ended_at INTEGER) STRICT`,
+     since_t INTEGER NOT NULL, seen_at INTEGER NOT NULL, text TEXT NOT NULL, told_at INTEGER, mail_revision INTEGER, clear_since INTEGER,
+     ended_at INTEGER, end_told_at INTEGER) STRICT`,
   `CREATE UNIQUE INDEX tower_trouble_open ON tower_trouble(tower_id, kind) WHERE ended_at IS NULL`,
 
   // --- readings that a check or a person spoke of: few of many ---------------------------------------------------

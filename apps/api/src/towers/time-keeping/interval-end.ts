@@ -69,18 +69,17 @@ export function endOfStamp(
 ): number | TimeRefusal {
   const instant = instantOf(stamp, time.clock, choice);
   if (typeof instant !== 'number') return instant;
-  const shown = quoted(text.trim());
   if (instant < EARLIEST_S)
     return {
       code: 'time-not-plausible',
-      why: `the time ${shown} lies before 1990; set the logger's clock and send the rows again with the right time.`,
+      why: `the time ${quoted(text.trim())} lies before 1990; set the logger's clock and send the rows again with the right time.`,
     };
   const ahead = instant - nowS;
   if (ahead > aheadS(time.intervalS)) {
     const far = ahead > 86_400 ? 'more than a day' : `${Math.round(ahead / 60)} min`;
     return {
       code: 'time-ahead',
-      why: `the time ${shown} lies ${far} in the future; set the logger's clock or this tower's zone, and send the rows again with the right time.`,
+      why: `the time ${quoted(text.trim())} lies ${far} in the future; set the logger's clock or this tower's zone, and send the rows again with the right time.`,
     };
   }
   return endOfInterval(instant, time.stamp, time.intervalS);

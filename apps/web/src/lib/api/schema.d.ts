@@ -896,6 +896,22 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/troubles': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Troubles.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/notices': {
     parameters: {
       query?: never;
@@ -1578,6 +1594,10 @@ export interface components {
         | 'minute'
         | 'hhmm';
     };
+    RowsLeftOut: {
+      column: string;
+      values: string[];
+    };
     Mapping: {
       /**
        * @default wide
@@ -1611,6 +1631,10 @@ export interface components {
       missing?: string[];
       /** @description Header → sensor name, where they differ */
       columns?: Record<string, never>;
+      /** @description Take only what columns names; else what is called as a sensor, too */
+      onlyNamed?: boolean;
+      /** @description Rows passed over, such as a day's summary */
+      leaveOut?: components['schemas']['RowsLeftOut'][];
       /** @description Column (wide) or sensor as written (long) → its unit, where it is not the sensor's own: °F, K, 0–1, mph, km/h, kn, Pa, kPa, mmHg, inHg, mg/m³ */
       units?: Record<string, never>;
       /** @default sensor */
@@ -2254,7 +2278,7 @@ export interface components {
     };
     Question: {
       /** @enum {string} */
-      id: 'repeated-hour' | 'missing-hour' | 'day-or-month-first' | 'unit';
+      id: 'repeated-hour' | 'missing-hour' | 'day-or-month-first' | 'unit' | 'rows-off-the-step';
       text: string;
       choices: components['schemas']['Choice'][];
       examples: string[];
@@ -2426,6 +2450,36 @@ export interface components {
       lang?: 'en' | 'es';
       districtSlugs?: string[];
       kinds?: ('advisory' | 'burnBan')[];
+    };
+    Trouble: {
+      id: number;
+      towerId: number;
+      towerName: string;
+      /** @enum {string} */
+      kind: 'late' | 'silent' | 'clock ahead' | 'clock shifted' | 'source failing';
+      /** @description What is wrong and what to look at, in sentences */
+      text: string;
+      /**
+       * Format: date-time
+       * @description Since when, as far as the data tell
+       */
+      since: string;
+      /**
+       * Format: date-time
+       * @description When the service saw it
+       */
+      seenAt: string;
+      /**
+       * Format: date-time
+       * @description When mail about it was queued for the analysts
+       */
+      toldAt: string | null;
+      /** @description Analysts whose mail server took the mail */
+      mailsAccepted: number;
+      /** @description Analysts to whom mail still waits or could not be given */
+      mailsNotAccepted: number;
+      /** Format: date-time */
+      endedAt: string | null;
     };
     NoticeBrief: {
       id: number;
@@ -4535,6 +4589,28 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+    };
+  };
+  'Troubles.list': {
+    parameters: {
+      query?: {
+        /** @description true: only what is not over */
+        open?: boolean;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Trouble'][];
+        };
       };
     };
   };
