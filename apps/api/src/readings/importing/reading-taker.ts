@@ -16,8 +16,8 @@ export interface TakenRows {
   readonly refused: readonly RefusedRow[];
 }
 
-/** Rows of one transaction: short enough that people's writes get in between. */
-export const CHUNK_ROWS = 5_000;
+/** Rows of one transaction: short enough that people's writes and other requests get in between. */
+export const CHUNK_ROWS = 2_000;
 /** Refused rows of one import that are kept; further ones are counted. */
 export const MOST_REFUSED_KEPT = 100_000;
 
