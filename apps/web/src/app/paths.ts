@@ -13,6 +13,11 @@ export const paths = {
   officer: '/officer',
   proposal: (id: number | ':id' = ':id') => `/proposals/${id}`,
   history: '/history',
+  readings: '/readings',
+  importFile: (towerId?: number) =>
+    towerId === undefined ? '/readings/import' : `/readings/import?tower=${towerId}`,
+  upload: (id: number | ':id' = ':id') => `/readings/import/${id}`,
+  importResult: (id: number | ':id' = ':id') => `/readings/imports/${id}`,
   towerReadings: (id: number | ':id' = ':id') => `/readings/towers/${id}`,
   notices: '/notices',
   notice: (id: number | ':id' = ':id') => `/notices/${id}`,

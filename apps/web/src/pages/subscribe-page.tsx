@@ -6,11 +6,12 @@ import { useLanguage } from '../components/public/use-language';
 import { LookForTheLink } from '../features/subscriptions/components/look-for-the-link';
 import { SubscribeForm, type SubscribeEntries } from '../features/subscriptions/components/subscribe-form';
 import { SUBSCRIPTION_WORDS } from '../features/subscriptions/words';
-import { usePublicDistricts } from '../lib/api/use-public-districts';
+import { usePublicDistricts, usePublicOffice } from '../lib/api/use-public-districts';
 
 /** Where residents ask to be told next time; the district they came from is ticked already. */
 export function SubscribePage() {
   const lang = useLanguage();
+  const office = usePublicOffice();
   const words = SUBSCRIPTION_WORDS[lang];
   const { data: districts, error } = usePublicDistricts();
   const [search] = useSearchParams();
@@ -27,7 +28,7 @@ export function SubscribePage() {
     setSent(true);
   };
   return (
-    <PublicFrame title={sent ? words.sentTitle : words.title}>
+    <PublicFrame title={sent ? words.sentTitle : words.title} office={office}>
       <div className="public-body">
         {sent ? (
           <LookForTheLink

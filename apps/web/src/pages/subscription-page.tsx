@@ -9,19 +9,20 @@ import { LeavePart } from '../features/subscriptions/components/leave-part';
 import { MyContacts } from '../features/subscriptions/components/my-contacts';
 import { MyWishes } from '../features/subscriptions/components/my-wishes';
 import { SUBSCRIPTION_WORDS } from '../features/subscriptions/words';
-import { usePublicDistricts } from '../lib/api/use-public-districts';
+import { usePublicDistricts, usePublicOffice } from '../lib/api/use-public-districts';
 
 /** A subscriber's own page, by the link in each message: see, change, leave. */
 export function SubscriptionPage() {
   const { token = '' } = useParams();
   const lang = useLanguage();
+  const office = usePublicOffice();
   const words = SUBSCRIPTION_WORDS[lang];
   const { data: view, error } = useSubscription(token);
   const { data: districts } = usePublicDistricts();
   const [left, setLeft] = useState(false);
   const again = <Link to={inLanguage('/subscribe', lang)}>{words.again}</Link>;
   return (
-    <PublicFrame title={left ? words.leftTitle : words.mineTitle}>
+    <PublicFrame title={left ? words.leftTitle : words.mineTitle} office={office}>
       <div className="public-body">
         <h1>{left ? words.leftTitle : words.mineTitle}</h1>
         {left && (

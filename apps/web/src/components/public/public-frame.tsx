@@ -27,12 +27,12 @@ export function PublicFrame({
 }) {
   const lang = useLanguage();
   const words = WORDS[lang];
-  usePageTitle(title);
+  usePageTitle(title, office);
   return (
     <div className="public">
       <header className="public-bar">
         <Link className="public-home" to={inLanguage('/', lang)}>
-          {office ?? 'Lidwatch'}
+          {office ?? words.districts}
         </Link>
         <nav aria-label={words.tools}>
           <LanguageSwitch lang={lang} />

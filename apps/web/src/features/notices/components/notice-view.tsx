@@ -8,6 +8,7 @@ import { Card } from '../../../components/ui/card';
 import { PartTitle } from '../../../components/ui/heading';
 import { Message } from '../../../components/ui/message';
 import type { Me, NoticeDetail } from '../../../lib/api/types';
+import { underWayWords } from '../delivery-words';
 import { isInForce } from '../notice-state';
 import { DeliveryPart } from './delivery-part';
 import { EndDialog } from './end-dialog';
@@ -31,7 +32,7 @@ export function NoticeView({ notice, me, zone, onAnswer }: NoticeViewProps) {
     <Stack gap="4">
       {arrived?.justDone && (
         <Message tone="done" title={arrived.justDone === 'begin' ? 'It is issued.' : 'It is ended.'}>
-          Mail and texts are on their way; below you see them go.
+          {underWayWords(notice.delivery)}
         </Message>
       )}
       <Flex gap="2" data-screen-only>
