@@ -25,9 +25,12 @@ const PATIENCE_MS = 15_000;
 const FIRST_LINK = /https?:\/\/\S*\/welcome\/[\w-]+/;
 const UP = /Ctrl-C stops it all/;
 
-/** Starts the built product as `npm start` does, empty, in a folder and on ports of its own. */
-export async function startProduct() {
-  const folder = mkdtempSync(path.join(os.tmpdir(), 'lidwatch-journey-'));
+/**
+ * Starts the built product as `npm start` does, on ports of its own and in a new folder, or in one that it was stopped
+ * in before (`stop({ keep: true })`).
+ */
+export async function startProduct({ folder: kept } = {}) {
+  const folder = kept ?? mkdtempSync(path.join(os.tmpdir(), 'lidwatch-journey-'));
   const [port, page, smtp, sms] = [await freePort(), await freePort(), await freePort(), await freePort()];
   const child = spawn(process.execPath, ['--import', endWithParent, path.join(root, 'scripts/start.mjs')], {
     env: {
@@ -41,19 +44,19 @@ export async function startProduct() {
   let said = '';
   for (const stream of [child.stdout, child.stderr])
     stream.setEncoding('utf8').on('data', (text) => (said += text));
-  const stop = async () => {
+  const stop = async ({ keep = false } = {}) => {
     if (child.exitCode === null && child.signalCode === null) {
       child.kill('SIGINT');
       const timer = setTimeout(() => child.kill('SIGKILL'), PATIENCE_MS);
       await once(child, 'close');
       clearTimeout(timer);
     }
-    rmSync(folder, { recursive: true, force: true });
+    if (!keep) rmSync(folder, { recursive: true, force: true });
   };
   try {
     await until(
       'the product is up and has said its first link',
-      () => FIRST_LINK.test(said) && UP.test(said),
+      () => UP.test(said) && (kept !== undefined || FIRST_LINK.test(said)),
       120_000,
     );
   } catch (error) {
@@ -64,7 +67,8 @@ export async function startProduct() {
     url: `http://localhost:${port}`,
     inbox: `http://127.0.0.1:${page}`,
     loggerDir: path.join(folder, 'data/loggers'),
-    firstLink: FIRST_LINK.exec(said)[0],
+    folder,
+    firstLink: FIRST_LINK.exec(said)?.[0],
     said: () => said,
     stop,
   };
