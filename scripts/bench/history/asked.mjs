@@ -6,6 +6,8 @@ const iso = (t) => new Date(t * 1000).toISOString();
 /** What the screens ask for, by the figure it counts to. */
 export function asked(places, now, years) {
   const span = (days, ago = 0) => `from=${iso(now - (ago + days) * DAY_S)}&to=${iso(now - ago * DAY_S)}`;
+  const day = (t) => iso(t).slice(0, 10);
+  const days = (length, ago) => `from=${day(now - (ago + length) * DAY_S)}&to=${day(now - ago * DAY_S)}`;
   const each = (urlOf) => places.map((place, i) => urlOf(place, (i * 37) % (years * 365 - 400 || 1)));
   return {
     desk: ['/api/desk'],
@@ -17,7 +19,7 @@ export function asked(places, now, years) {
     ],
     profile: each(({ towerId }) => `/api/towers/${towerId}/profile`),
     notices: ['/api/notices?page=1', '/api/proposals'],
-    calendar: each(({ towerId }, ago) => `/api/towers/${towerId}/calendar?${span(90, ago)}`),
+    calendar: each(({ towerId }, ago) => `/api/towers/${towerId}/calendar?${days(90, ago)}`),
     flags: each(({ towerId }, ago) => `/api/towers/${towerId}/flags?${span(30, ago)}`),
     raw: each(({ towerId }, ago) => `/api/towers/${towerId}/raw?${span(30, ago)}`),
   };

@@ -25,7 +25,7 @@ const own = (name, place) => {
 };
 
 /** Copies the first place's fortnight, oldest first, into the fortnights before, and for other places into its own. */
-async function copy(database, { table, owner, ids }, [first, ...others], fortnights) {
+async function copy(database, { table, owner, ids }, [first, ...others], { fortnights, newest }) {
   const columns = (await promised(database, 'all', `PRAGMA table_info(${table})`)).map(({ name }) => name);
   const template = ids(first);
   for (const place of [first, ...others]) {
@@ -43,18 +43,18 @@ async function copy(database, { table, owner, ids }, [first, ...others], fortnig
         database,
         'run',
         `INSERT INTO ${table} (${columns.join(', ')}) SELECT ${values.join(', ')}
-         FROM json_each($shifts) k CROSS JOIN ${table} t ON t.${owner} = $from AND t.t_end > $after`,
-        { $to: to, $from: template[i], $shifts: JSON.stringify(shifts), $after: await after(database) },
+         FROM json_each($shifts) k CROSS JOIN ${table} t ON t.${owner} = $from AND t.t_end > $after AND t.t_end <= $until`,
+        {
+          $to: to,
+          $from: template[i],
+          $shifts: JSON.stringify(shifts),
+          $after: newest - FORTNIGHT_S,
+          $until: newest,
+        },
       );
     }
     await promised(database, 'exec', 'COMMIT');
   }
-}
-
-/** The beginning of the template: what was copied before it is not copied again. */
-async function after(database) {
-  const [row] = await promised(database, 'all', 'SELECT max(t_end) newest FROM district_block');
-  return row.newest - FORTNIGHT_S;
 }
 
 /**
@@ -68,7 +68,8 @@ export async function fillStore(file, places, fortnights) {
     'exec',
     'PRAGMA journal_mode = OFF; PRAGMA synchronous = OFF; PRAGMA cache_size = -400000; PRAGMA locking_mode = EXCLUSIVE',
   );
-  for (const each of TABLES) await copy(database, each, places, fortnights);
+  const [{ newest }] = await promised(database, 'all', 'SELECT max(t_end) newest FROM district_block');
+  for (const each of TABLES) await copy(database, each, places, { fortnights, newest });
   await promised(database, 'exec', 'PRAGMA optimize');
   const [{ n }] = await promised(database, 'all', 'SELECT count(*) n FROM reading');
   await promised(database, 'close');
