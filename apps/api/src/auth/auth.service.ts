@@ -6,7 +6,7 @@ import { UserDistricts } from '../users/user-districts';
 import { UsersService } from '../users/users.service';
 import type { Me } from './dto/me.dto';
 import type { SignIn } from './dto/sign-in.dto';
-import { again, Attempts, fromAddress, onAccount } from './passwords/attempts';
+import { again, Attempts, fromAddress, onAccount, onAccountFrom } from './passwords/attempts';
 import { PasswordHasher } from './passwords/password-hasher';
 import { SessionService } from './sessions/session.service';
 import { SignedInPeople } from './sessions/signed-in-people';
@@ -68,11 +68,12 @@ export class AuthService {
 
   /** Who an e-mail and a password sent from an address belong to; undefined when they do not belong together. */
   async check({ email, password }: SignIn, address: string): Promise<SignedIn | undefined> {
-    await this.attempts.begin(onAccount(email), fromAddress(address));
+    await this.attempts.begin(onAccountFrom(email, address), onAccount(email), fromAddress(address));
     const user = await this.users.findByEmail(email.trim());
     const right = await this.hasher.matches(user?.retiredAt === null ? user.passwordHash : null, password);
     if (!user || !right) return undefined;
-    await this.attempts.forget(onAccount(email));
+    await this.attempts.forget(onAccountFrom(email, address));
+    await this.attempts.takeBack(onAccount(email));
     await this.attempts.takeBack(fromAddress(address));
     return this.people.find(await this.people.owner(user.id));
   }

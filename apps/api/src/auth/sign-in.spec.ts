@@ -1,5 +1,6 @@
 import type { Agent } from 'supertest';
 import { AuthService } from './auth.service';
+import { Attempts, onAccount } from './passwords/attempts';
 import { makeUser, signInAs, testPassword } from '../testing/people';
 import { makeDistrict } from '../testing/places';
 import { createTestApp, testNow, type TestApp } from '../testing/test-app';
@@ -78,13 +79,25 @@ describe('signing in', () => {
     expect(answers[0]?.body.code).toBe('sign-in-failed');
   });
 
-  it('refuses more attempts on one account for a quarter of an hour', async () => {
+  it('refuses more attempts on one account from one address for a quarter of an hour', async () => {
     const { email } = await makeUser(test, 'analyst');
     for (let k = 0; k < 8; k++) await signIn(email, wrongPassword).expect(401);
     const refused = await signIn(email, testPassword).expect(429);
     expect(refused.body.detail).toBe('There were too many attempts. Try again in 15 min.');
     test.clock.advance(15 * 60);
     await signIn(email, testPassword).expect(200);
+  });
+
+  it('lets the owner in while somebody guesses from elsewhere, unless it is from everywhere', async () => {
+    const { email } = await makeUser(test, 'analyst');
+    const auth = test.app.get(AuthService, { strict: false });
+    const guess = (address: string) => auth.check({ email, password: wrongPassword }, address);
+    for (let k = 0; k < 8; k++) expect(await guess('192.0.2.7')).toBeUndefined();
+    await expect(guess('192.0.2.7')).rejects.toMatchObject({ code: 'too-many-attempts' });
+    await signIn(email, testPassword).expect(200);
+    const attempts = test.app.get(Attempts, { strict: false });
+    for (let k = 8; k < 100; k++) await attempts.begin(onAccount(email));
+    await signIn(email, testPassword).expect(429);
   });
 
   it('counts attempts that are made side by side', async () => {

@@ -13,11 +13,21 @@ export interface Counted {
 
 const windowS = 15 * 60;
 
-/** Attempts on one account: enough for a person who mistypes, few enough against guessing. */
-export const onAccount = (email: string): Counted => ({
-  key: `account ${email.trim().toLowerCase()}`,
+const accountOf = (email: string): string => email.trim().toLowerCase();
+
+/**
+ * Attempts on one account from one address: enough for a person who mistypes, few enough against guessing. Whoever
+ * guesses locks out their own address, not the account's owner.
+ */
+export const onAccountFrom = (email: string, address: string): Counted => ({
+  key: `account ${accountOf(email)} from ${address}`,
   most: 8,
 });
+/**
+ * Attempts on one account from everywhere: far more than one address can make, so that it takes a dozen of them to
+ * keep the owner out, and still few against guessing from many (common practice; OWASP Authentication Cheat Sheet).
+ */
+export const onAccount = (email: string): Counted => ({ key: `account ${accountOf(email)}`, most: 100 });
 /** Attempts from one address, which a whole office may share. */
 export const fromAddress = (address: string): Counted => ({ key: `address ${address}`, most: 40 });
 /** Passwords asked again of somebody signed in. */
