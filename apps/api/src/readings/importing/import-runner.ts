@@ -128,8 +128,8 @@ export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
       }
       return await this.end(running, 'done', ignoredColumns);
     } finally {
-      await file.close();
       this.fresh.letGo(running);
+      await file.close();
     }
   }
 
@@ -168,13 +168,12 @@ export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
     const { job, layout } = running;
     return this.work.run(async () => {
       if ((await this.layouts.of(job.towerId)) !== layout) return false;
-      const importId = running.importId ?? (await this.begin(running));
+      const importId = (running.importId ??= await this.begin(running));
       if (!(await this.fresh.isAlone(layout, importId, fresh))) return false;
       await this.fresh.write(layout, importId, fresh, running);
       const [all, repeated] = [read.rows.tEnd.length, fresh.repeated];
       const taken = { ...NOTHING_COUNTED, new: all - repeated, repeated, refused: read.refused.length };
       await this.taker.keep(importId, read.rows, read.refused, taken, running.counts.refused);
-      running.importId = importId;
       running.counts = sumOf(running.counts, taken);
       return true;
     }, job.lane ?? 'bulk');

@@ -157,6 +157,13 @@ describe('readings that an import writes worked out', () => {
     await ingest(mast, rowsOf(mast, other));
     await importLines(mast.towerId, lines);
     expectSame(await tablesOf(mast), usual);
+    const states = await test.sql.all('SELECT origin, state FROM import WHERE tower_id = $1 ORDER BY id', [
+      mast.towerId,
+    ]);
+    expect(states).toEqual([
+      { origin: 'push', state: 'done' },
+      { origin: 'upload', state: 'done' },
+    ]);
   });
 
   it('are those of the usual way where others come while they are written, and the stages run', async () => {
