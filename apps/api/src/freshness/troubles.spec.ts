@@ -118,6 +118,25 @@ describe('troubles of towers', () => {
     await pass(60, [0, 1, 2]);
   });
 
+  it('tell of a clock that was put back by an hour, and that it was put right', async () => {
+    const put = async (byS: number, steps: number): Promise<void> => {
+      for (let i = 0; i < steps; i++) {
+        await pass(10, [0, 1]);
+        const now = test.clock.now();
+        const air = inversion(2.5, now).map((each) => each + (byS ? 0.3 : 0));
+        await valley.give(2, now + byS, air);
+      }
+      await pass(10, [0, 1]);
+    };
+    await put(0, 10);
+    await put(-3600, 6);
+    const [trouble] = await open();
+    expect(trouble).toMatchObject({ kind: 'clock shifted', towerId: valley.towerIds[2] });
+    expect(trouble!.text).toContain('exactly an hour behind');
+    await put(0, 8);
+    expect(await open()).toEqual([]);
+  });
+
   it('tell of a clock that is ahead: such rows are refused and count for nothing', async () => {
     const admin = await signInAs(test, 'administrator');
     const towerId = valley.towerIds[1]!;

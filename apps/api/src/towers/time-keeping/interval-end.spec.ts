@@ -42,6 +42,7 @@ const REFUSED: readonly (readonly [string, string, string])[] = [
   ['UTC', '2026-01-10 05:60', 'time-not-readable'],
   ['UTC', '2026-01-10 24:01', 'time-not-readable'],
   ['UTC', '2026-01-10 05:00 +25:00', 'time-not-readable'],
+  ['UTC', '2026-01-10 05:00 +14:30', 'time-not-readable'],
   ['UTC', '1899-12-30 00:00', 'time-not-plausible'],
   ['UTC', '2026-12-02 00:01', 'time-ahead'],
   ['UTC', '2026-12-01 00:16', 'time-ahead'],

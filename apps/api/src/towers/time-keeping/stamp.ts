@@ -50,13 +50,14 @@ const unreadable = (text: string, form: StampForm): TimeRefusal => ({
       : `the time ${quoted(text)} cannot be read; ${cure[form]}.`,
 });
 
-/** Offset from UTC in seconds from `Z`, `UTC`, `+02`, `-0700` or `-07:00`; undefined beyond 18 h. */
+/** Offset from UTC in seconds from `Z`, `UTC`, `+02`, `-0700` or `-07:00`; undefined beyond 14 h, which no
+ * place on Earth has. */
 export function offsetSeconds(text: string): number | undefined {
   if (/^(Z|UTC|GMT)$/i.test(text)) return 0;
   const parts = /^([+-])(\d{2})(?::?(\d{2}))?$/.exec(text);
   if (!parts) return undefined;
   const minutes = Number(parts[2]) * 60 + Number(parts[3] ?? 0);
-  if (minutes > 18 * 60 || Number(parts[3] ?? 0) > 59) return undefined;
+  if (minutes > 14 * 60 || Number(parts[3] ?? 0) > 59) return undefined;
   return (parts[1] === '-' ? -60 : 60) * minutes;
 }
 
