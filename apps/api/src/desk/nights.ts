@@ -25,9 +25,10 @@ export function sunTimes(
 /** The nights that touch [from, to]; those without a sunset or a sunrise are left out. */
 export function nightsBetween(from: number, to: number, latitude: number, longitude: number): Night[] {
   const nights: Night[] = [];
+  let tomorrow = sunTimes(from - DAY_S, latitude, longitude);
   for (let noon = from - DAY_S; noon < to + DAY_S; noon += DAY_S) {
-    const today = sunTimes(noon, latitude, longitude);
-    const tomorrow = sunTimes(noon + DAY_S, latitude, longitude);
+    const today = tomorrow;
+    tomorrow = sunTimes(noon + DAY_S, latitude, longitude);
     if (today && tomorrow && today.set < to && tomorrow.rise > from) {
       nights.push({ from: today.set, to: tomorrow.rise });
     }

@@ -67,9 +67,11 @@ export class DistrictHistoryService {
       [blockS, ...STEPS_S].find((each) => each >= blockS && (to - from) / each <= MOST_POINTS) ??
       STEPS_S.at(-1)!;
     if (stepS === blockS) return { stepS, points: (await this.sql.all<Row>(BLOCKS, span)).map(pointOf) };
-    const lowest = await this.sql.all<{ step: number; lowestC: number | null }>(LOWEST, [...span, stepS]);
+    const [strongest, lowest] = await Promise.all([
+      this.sql.all<StepRow>(STRONGEST, [...span, stepS]),
+      this.sql.all<{ step: number; lowestC: number | null }>(LOWEST, [...span, stepS]),
+    ]);
     const lowestOf = new Map(lowest.map(({ step, lowestC }) => [step, lowestC]));
-    const strongest = await this.sql.all<StepRow>(STRONGEST, [...span, stepS]);
     const points = strongest.map(({ step, ...row }) => ({
       ...pointOf(row),
       tEnd: (step + 1) * stepS,
