@@ -105,6 +105,14 @@ describe('held for', () => {
     });
   });
 
+  test('says how long it has held where that is longer than asked', () => {
+    const held = (row: (number | null)[]) =>
+      evaluate(heldHour(), strengths(row), endOf(row.length), 'begin').held;
+    expect(held([1, 3, 3, 3, 3, 3, 3])).toMatchObject({ trueMinutes: 60, unbrokenMinutes: 90 });
+    expect(held([3, 3, 3, 3, 3, 3])).toMatchObject({ unbrokenMinutes: 90, unbrokenOrMore: true });
+    expect(held([1, 3, 3, 3, 3])).not.toHaveProperty('unbrokenMinutes');
+  });
+
   test('says that the record starts with a change of tower', () => {
     const node = evaluate(heldHour(), strengths([3, 3, 3], ['mill', 'bench', 'bench']), endOf(3), 'begin');
     expect(node.held).toMatchObject({

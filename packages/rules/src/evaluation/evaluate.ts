@@ -35,7 +35,11 @@ class Evaluation {
     const now = this.now(condition, t);
     const seconds = this.heldSeconds(condition, t);
     const verdict = seconds
-      ? { truth: heldTruth(seconds), now, held: this.facts(seconds, t) }
+      ? {
+          truth: heldTruth(seconds),
+          now,
+          held: { ...this.facts(seconds, t), ...this.unbroken(condition, seconds, t) },
+        }
       : { truth: now, now };
     if ('measure' in condition) {
       const { measure, op, value } = condition;
@@ -88,6 +92,19 @@ class Evaluation {
     };
   }
 
+  /** How long the condition has been true up to t without a break, where it held and that is longer than asked. */
+  private unbroken(condition: Condition, { neededSeconds, trueSeconds }: HeldSeconds, t: number) {
+    if (trueSeconds < neededSeconds) return {};
+    const run = this.series.runAt(t)?.from ?? t;
+    const blocks = this.series.within(run, t);
+    let i = blocks.length - 1;
+    let from = t;
+    for (; i >= 0 && blocks[i]!.tEnd === from && this.now(condition, blocks[i]!.tEnd) === 'true'; i -= 1)
+      from = blocks[i]!.coversFrom;
+    if (t - from <= neededSeconds) return {};
+    return { unbrokenMinutes: (t - from) / 60, ...(i < 0 && { unbrokenOrMore: true as const }) };
+  }
+
   private facts(held: HeldSeconds, t: number): HeldFacts {
     const short = held.recordSeconds < held.neededSeconds;
     return {
@@ -126,7 +143,7 @@ export function evaluate(
 /**
  * `evaluate` for many block ends of one series: what was worked out for one is remembered for the next.
  *
- * Units, validity and source: as `evaluate`.
+ * Units: tEnd in UTC epoch seconds. Valid: as `evaluate`. Source: as `evaluate`.
  */
 export function evaluator(
   series: BlockSeries,

@@ -10,6 +10,10 @@ export interface HeldFacts {
   readonly trueMinutes: number;
   readonly falseMinutes: number;
   readonly notKnownMinutes: number;
+  /** How long it has been true without a break up to the block, where that is longer than was asked. */
+  readonly unbrokenMinutes?: number;
+  /** Only where it was true since the record begins, so that it may have held for longer. */
+  readonly unbrokenOrMore?: true;
   /** Why the record is shorter than asked; absent when it is not. */
   readonly recordStartsAfter?: Run['after'] | 'nothing on record';
 }

@@ -24,6 +24,13 @@ export class HeldFactsDto implements HeldFacts {
   @ApiProperty() trueMinutes!: number;
   @ApiProperty() falseMinutes!: number;
   @ApiProperty() notKnownMinutes!: number;
+  @ApiPropertyOptional({ description: 'Minutes it has been true without a break, where longer than asked' })
+  unbrokenMinutes?: number;
+  @ApiPropertyOptional({
+    type: Boolean,
+    description: 'It was true since the record begins, perhaps for longer',
+  })
+  unbrokenOrMore?: true;
   @ApiPropertyOptional({ enum: ['change of tower', 'start of record', 'nothing on record'] })
   recordStartsAfter?: NonNullable<HeldFacts['recordStartsAfter']>;
 }

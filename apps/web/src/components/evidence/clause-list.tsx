@@ -91,7 +91,8 @@ function HeldFor({ node: { held } }: { node: EvaluatedNode }) {
   if (!held) return null;
   return (
     <Box color="mute" fontSize="sm" fontWeight="400" textAlign="end">
-      held {duration(held.trueMinutes)}
+      held {held.unbrokenOrMore && 'at least '}
+      {duration(held.unbrokenMinutes ?? held.trueMinutes)}
       {held.notKnownMinutes > 0 && `, ${duration(held.notKnownMinutes)} not known`}
     </Box>
   );

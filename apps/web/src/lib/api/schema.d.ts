@@ -2596,6 +2596,10 @@ export interface components {
       trueMinutes: number;
       falseMinutes: number;
       notKnownMinutes: number;
+      /** @description Minutes it has been true without a break, where longer than asked */
+      unbrokenMinutes?: number;
+      /** @description It was true since the record begins, perhaps for longer */
+      unbrokenOrMore?: boolean;
       /** @enum {string} */
       recordStartsAfter?: 'change of tower' | 'start of record' | 'nothing on record';
     };
