@@ -56,6 +56,22 @@ describe('tables of other shapes', () => {
     ]);
   });
 
+  it('are taken without what a person left out: columns, written names, and rows by a word', () => {
+    const leaveOut = [{ column: 'class', values: ['X'] }];
+    const wide = read(['time,class,T,t60', '2025-01-01 00:10,D,1,2', '2025-01-02 00:00,X,3,4'], {
+      onlyNamed: true,
+      columns: { T: 't10' },
+      leaveOut,
+    });
+    expect(wide).toEqual({ rows: [[1, '2025-01-01T00:10', 1]], refused: [] });
+    const long = read(
+      ['time,sensor,value', '2025-01-01 00:10,T,1', '2025-01-01 00:10,t60,2', '2025-01-01 00:10,new,3'],
+      { format: 'long', onlyNamed: true, columns: { T: 't10' } },
+    );
+    expect(long.rows).toEqual([[1, '2025-01-01T00:10', 1]]);
+    expect(long.refused.map(({ code }) => code)).toEqual(['sensor-not-known']);
+  });
+
   it('are read by the day of the year, and a day the year does not have is refused', () => {
     const timeColumns = [
       { column: 'y', part: 'year' },

@@ -1,5 +1,5 @@
 import { longHeader, wideHeader, type LongHeader, type WideHeader } from './header';
-import type { Mapping } from './mapping';
+import { sensorNameOf, type Mapping } from './mapping';
 import { readNumber } from './number-cell';
 import type { ParsedReadings } from './parsed-readings';
 import { recordsOf, type CsvRecord } from './records';
@@ -95,6 +95,7 @@ export class CsvReader {
       this.refuse(record, undefined, cellsDoNotMatch(record.cells.length, header.cells));
       return;
     }
+    if (header.leaveOut.some(({ place, values }) => values.has(record.cells[place]!.trim()))) return;
     const tEnd = this.times.read(this.timeOf(record, header.time));
     if (typeof tEnd !== 'number') this.refuse(record, this.timeName, tEnd);
     else if (this.wide) this.readWide(record, this.wide, tEnd);
@@ -124,12 +125,13 @@ export class CsvReader {
   private readLong(record: CsvRecord, header: LongHeader, tEnd: number): void {
     const { mapping, sensorIds } = this.given;
     const named = record.cells[header.sensor]!.trim();
-    const sensorId = sensorIds.get(mapping.columns[named] ?? named);
+    const sensorId = sensorIds.get(sensorNameOf(mapping, named) ?? '');
     if (sensorId !== undefined) {
       const place = { sensorId, tEnd, unit: mapping.units?.[named] };
       this.takeCell(record, mapping.valueColumn, place, record.cells[header.value]!);
       return;
     }
+    if (sensorIds.has(named)) return;
     const why = `this tower has no sensor ${quoted(named)}; correct the name, map it, or add the sensor first.`;
     this.refuse(record, mapping.sensorColumn, { code: 'sensor-not-known', why });
   }

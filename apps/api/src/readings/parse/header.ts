@@ -1,5 +1,5 @@
 import { HeaderError } from './parsed-readings';
-import type { Mapping } from './mapping';
+import { sensorNameOf, type Mapping } from './mapping';
 import type { ForeignUnit } from '../../towers/units';
 import { quoted } from '../../common/quoted';
 
@@ -9,7 +9,14 @@ export interface WideHeader {
   /** Where the time stands; several places where it stands in several columns. */
   readonly time: readonly number[];
   readonly sensors: readonly WideColumn[];
+  readonly leaveOut: readonly LeftOutRows[];
   readonly ignored: string[];
+}
+
+/** Rows that are passed over: those with one of these texts in a place. */
+export interface LeftOutRows {
+  readonly place: number;
+  readonly values: ReadonlySet<string>;
 }
 
 /** A column of a wide file that is a sensor's. */
@@ -26,6 +33,7 @@ export interface LongHeader {
   readonly time: readonly number[];
   readonly sensor: number;
   readonly value: number;
+  readonly leaveOut: readonly LeftOutRows[];
   readonly ignored: string[];
 }
 
@@ -61,6 +69,9 @@ const checked = (cells: readonly string[]): string[] => {
 const times = (header: readonly string[], { timeColumn, timeColumns }: Mapping): number[] =>
   (timeColumns?.map(({ column }) => column) ?? [timeColumn]).map((column) => place(header, column));
 
+const leftOut = (header: readonly string[], { leaveOut = [] }: Mapping): LeftOutRows[] =>
+  leaveOut.map(({ column, values }) => ({ place: place(header, column), values: new Set(values) }));
+
 /** Finds the columns of a wide file. Columns that no sensor of the tower has are ignored, and said. */
 export function wideHeader(
   cells: readonly string[],
@@ -70,7 +81,7 @@ export function wideHeader(
   const header = checked(cells);
   const time = times(header, mapping);
   const sensors = header.flatMap((column, index): WideColumn[] => {
-    const sensorId = sensorIds.get(mapping.columns[column] ?? column);
+    const sensorId = sensorIds.get(sensorNameOf(mapping, column) ?? '');
     if (time.includes(index) || sensorId === undefined) return [];
     place(header, column);
     return [{ index, column, sensorId, unit: mapping.units?.[column] }];
@@ -84,7 +95,10 @@ export function wideHeader(
     );
   }
   const used = new Set([...time, ...sensors.map((s) => s.index)]);
-  return { cells: header.length, time, sensors, ignored: header.filter((_, i) => !used.has(i)) };
+  return {
+    ...{ cells: header.length, time, sensors, leaveOut: leftOut(header, mapping) },
+    ignored: header.filter((_, i) => !used.has(i)),
+  };
 }
 
 /** Finds the columns of a long file. */
@@ -93,7 +107,7 @@ export function longHeader(cells: readonly string[], mapping: Mapping): LongHead
   const time = times(header, mapping);
   const [sensor, value] = [place(header, mapping.sensorColumn), place(header, mapping.valueColumn)];
   const ignored = header.filter((_, i) => !time.includes(i) && i !== sensor && i !== value);
-  return { cells: header.length, time, sensor, value, ignored };
+  return { cells: header.length, time, sensor, value, leaveOut: leftOut(header, mapping), ignored };
 }
 
 function refuseSameSensor(sensors: readonly WideColumn[]): void {

@@ -10,6 +10,12 @@ export interface TimeColumn {
   readonly part: TimePart;
 }
 
+/** Rows that are no readings, such as a day's summary: those with one of these texts in a column. */
+export interface RowsLeftOut {
+  readonly column: string;
+  readonly values: readonly string[];
+}
+
 /**
  * How a source's files are laid out. *wide*: a time column and a column per sensor. *long*: a time column, a sensor
  * column and a value column, one reading a row.
@@ -30,6 +36,10 @@ export interface Mapping {
   readonly missing: readonly string[];
   /** Header → sensor name, where they differ. */
   readonly columns: Readonly<Record<string, string>>;
+  /** Takes only what `columns` names; otherwise what is called as a sensor is taken, too. */
+  readonly onlyNamed?: boolean;
+  /** Rows that are passed over. */
+  readonly leaveOut?: readonly RowsLeftOut[];
   /** Header (wide) or sensor as written (long) → its unit, where it is not the sensor's own. */
   readonly units?: Readonly<Record<string, ForeignUnit>>;
   /** long only */
@@ -60,6 +70,10 @@ export const DEFAULT_MAPPING: Mapping = {
   sensorColumn: 'sensor',
   valueColumn: 'value',
 };
+
+/** The sensor that a column (wide) or a written name (long) is set to; undefined: none. */
+export const sensorNameOf = ({ columns, onlyNamed }: Mapping, written: string): string | undefined =>
+  Object.hasOwn(columns, written) ? columns[written] : onlyNamed ? undefined : written;
 
 /** A stored mapping with what it leaves out filled in. */
 export function readMapping(stored: string | undefined): Mapping {

@@ -23,7 +23,7 @@ export class MappingChecks {
       }
     }
     for (const [column, unit] of Object.entries(mapping.units ?? {})) {
-      const sensor = inUse.get(mapping.columns?.[column] ?? column);
+      const sensor = inUse.get(mapping.columns?.[column] ?? '');
       if (!foreignUnitNames.includes(unit)) {
         const text = `The unit "${String(unit)}" is not known. Choose one of ${foreignUnitNames.join(', ')}.`;
         errors.push({ field: `mapping.units.${column}`, text });

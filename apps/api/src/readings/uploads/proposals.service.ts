@@ -5,9 +5,10 @@ import { TowerLayouts } from '../../towers/tower-layouts';
 import type { TowerLayout } from '../../towers/tower-layout';
 import { NotTextError } from '../parse/decode-text';
 import { HeaderError } from '../parse/parsed-readings';
-import { fits } from '../parse/propose/fits';
-import { proposeMapping, type ForTower } from '../parse/propose/propose-mapping';
-import { readMapping } from '../parse/mapping';
+import { keepMapping } from '../parse/propose/keep-mapping';
+import { proposeMapping, type ForTower, type FoundLayout } from '../parse/propose/propose-mapping';
+import { readMapping, type Mapping } from '../parse/mapping';
+import type { Question } from '../parse/propose/questions';
 import type { ProposalDto } from './dto/proposal.dto';
 import { noteOf } from './encoding';
 import { UploadFiles } from './upload-files';
@@ -32,6 +33,14 @@ const formulaNotes = ({ sheets, sheet }: UploadedText): string[] => {
     : [`${formulas} cells are formulas: the results the spreadsheet last had are read.`];
 };
 
+/** What the last file's mapping does not answer: units of columns that it takes as they are, rows it does not leave out. */
+const stillOpen = ({ questions, columns }: FoundLayout, { units = {}, leaveOut }: Mapping): Question[] =>
+  questions.filter(
+    ({ id }) =>
+      (id === 'unit' && columns.some(({ name, unitOpen }) => unitOpen && units[name] === undefined)) ||
+      (id === 'rows-off-the-step' && leaveOut === undefined),
+  );
+
 /** How an uploaded file seems to be laid out. */
 @Injectable()
 export class ProposalsService {
@@ -48,8 +57,10 @@ export class ProposalsService {
     const tower = await this.layouts.of(upload.towerId);
     return this.readable(upload, async () => {
       const text = await this.texts.look(upload, sheet);
-      const found = proposeMapping(text.sample, forTower(tower));
-      const kept = await this.keptMapping(upload, found.columnNames, text);
+      const [about, before] = [forTower(tower), await this.uploads.keptMapping(upload.towerId)];
+      const found = proposeMapping(text.sample, about);
+      const names = about.sensors.map(({ name }) => name);
+      const kept = before && keepMapping(readMapping(before), found, text.sample, names);
       const mapping = {
         ...(kept ?? found.mapping),
         ...(text.sheet === undefined ? {} : { sheet: text.sheet }),
@@ -65,7 +76,9 @@ export class ProposalsService {
         written: [...found.written],
         sheets: text.sheets?.filter(({ rows }) => rows > 0).map(({ name }) => name) ?? null,
         notes: [...noteOf(text.encoding), ...formulaNotes(text), ...found.notes],
-        questions: kept ? [] : (structuredClone(found.questions) as ProposalDto['questions']),
+        questions: structuredClone(
+          kept ? stillOpen(found, kept) : found.questions,
+        ) as ProposalDto['questions'],
         sampleLines: text.sample.head.slice(0, SHOWN_LINES).map((line) => line.slice(0, SHOWN_CHARACTERS)),
       };
     });
@@ -87,12 +100,5 @@ export class ProposalsService {
         throw new Problem('invalid', error.message);
       throw error;
     }
-  }
-
-  private async keptMapping(upload: StoredUpload, names: readonly string[], { sample }: UploadedText) {
-    const kept = await this.uploads.keptMapping(upload.towerId);
-    if (kept === undefined) return undefined;
-    const mapping = readMapping(kept);
-    return fits(mapping, sample, names) ? mapping : undefined;
   }
 }

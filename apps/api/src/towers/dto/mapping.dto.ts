@@ -4,6 +4,7 @@ import {
   ArrayMaxSize,
   ArrayMinSize,
   IsArray,
+  IsBoolean,
   IsIn,
   IsInt,
   IsObject,
@@ -37,6 +38,19 @@ export class TimeColumnInput {
   @ApiProperty({ enum: timeParts })
   @IsIn(timeParts, { message: `part must be one of ${timeParts.join(', ')}` })
   part!: TimePart;
+}
+
+/** Rows that are passed over: those with one of these texts in a column. */
+@ApiSchema({ name: 'RowsLeftOut' })
+export class RowsLeftOutInput {
+  @ApiProperty() @IsString() @Length(1, 200) column!: string;
+
+  @ApiProperty({ type: [String] })
+  @IsArray()
+  @ArrayMinSize(1)
+  @ArrayMaxSize(20)
+  @IsString({ each: true })
+  values!: string[];
 }
 
 /** How a source's data is laid out; what is left out takes the usual value. */
@@ -104,6 +118,22 @@ export class MappingInput {
   @IsOptional()
   @IsObject()
   columns?: Record<string, string>;
+
+  @ApiPropertyOptional({ description: 'Take only what columns names; else what is called as a sensor, too' })
+  @IsOptional()
+  @IsBoolean()
+  onlyNamed?: boolean;
+
+  @ApiPropertyOptional({
+    type: () => [RowsLeftOutInput],
+    description: "Rows passed over, such as a day's summary",
+  })
+  @IsOptional()
+  @IsArray()
+  @ArrayMaxSize(5)
+  @ValidateNested({ each: true })
+  @Type(() => RowsLeftOutInput)
+  leaveOut?: RowsLeftOutInput[];
 
   @ApiPropertyOptional({
     type: Object,

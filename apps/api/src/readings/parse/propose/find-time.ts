@@ -96,7 +96,8 @@ const SEQUENCES: readonly (readonly (TimePart | undefined)[])[] = [
 ];
 const TIME_WORDS = /time|date|stamp|utc|gmt|zeit|datum|fecha|hora|heure/i;
 
-const textOf = ({ cells }: SampleRow, { used, timeColumns }: Candidate): string =>
+/** The text of a row's time. */
+export const textOf = ({ cells }: SampleRow, { used, timeColumns }: Candidate): string =>
   timeColumns
     ? joinTime(
         used.map((place) => cells[place]!),

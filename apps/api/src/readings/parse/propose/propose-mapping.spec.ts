@@ -1,3 +1,4 @@
+import { keepMapping } from './keep-mapping';
 import { proposeMapping, type ForTower } from './propose-mapping';
 
 const air = (heightM: number) => ({ name: `t${heightM}`, quantity: 'air temperature' as const, heightM });
@@ -119,6 +120,45 @@ describe('what a file seems to be', () => {
       expect.objectContaining({ id: 'unit', text: 'Are the temperatures in "t2" °C or °F?' }),
     ]);
     expect(mapping.units).toEqual({});
+  });
+
+  it('asks whether rows that a word marks and that lie off the step are readings', () => {
+    const { questions } = propose(
+      steps(48, 60, (t, i) =>
+        i % 24 === 23 ? `${iso(t).slice(0, 10)} 23:59,X,-1` : `${iso(t)},${'DEF'[i % 3]},-9.5`,
+      ),
+    );
+    expect(questions).toEqual([
+      expect.objectContaining({
+        id: 'rows-off-the-step',
+        choices: [
+          expect.objectContaining({ value: '{"leaveOut":[{"column":"2","values":["X"]}]}' }),
+          expect.objectContaining({ value: '{"leaveOut":[]}' }),
+        ],
+      }),
+    ]);
+  });
+
+  it('keeps the last mapping where nothing in the file speaks against it', () => {
+    const dated = (day: number) =>
+      steps(10, 10, (t) => `${two(day)}/01/2026 ${iso(t).slice(11)},-9.5`.replace(/23:|00:/, '22:'));
+    const sample = (day: number) => ({ head: ['when,t2', ...dated(day)], further: [] });
+    const open = proposeMapping(sample(9), mast);
+    const kept = {
+      ...open.mapping,
+      timeForm: 'day/month/year',
+      repeatedHour: 'in-order',
+      missing: ['x'],
+    } as const;
+    const names = mast.sensors.map(({ name }) => name);
+    expect(keepMapping(kept, open, sample(9), names)).toMatchObject({
+      timeForm: 'day/month/year',
+      missing: ['x', 'NaN', 'NAN'],
+    });
+    expect(keepMapping(kept, open, sample(9), names)).not.toHaveProperty('repeatedHour');
+    expect(keepMapping(kept, open, sample(9), ['t10'])).toMatchObject({ columns: {} });
+    const wrong = { ...kept, timeForm: 'month/day/year' } as const;
+    expect(keepMapping(wrong, proposeMapping(sample(31), mast), sample(31), names)).toBeUndefined();
   });
 
   it('refuses what is no table, and a table without times', () => {

@@ -5,6 +5,7 @@ import { findHeader, type FoundHeader } from './find-header';
 import { findLong, type LongColumns } from './find-long';
 import { findMarks } from './find-marks';
 import { findCuts, type Cut } from './find-separator';
+import { findSummaries, type FoundSummaries } from './find-summaries';
 import { findTime, type FoundTime } from './find-time';
 import type { KnownSensor } from './guess-sensor';
 import type { Question } from './questions';
@@ -92,6 +93,27 @@ const unitQuestion = (columns: readonly FoundColumn[]): Question[] => {
         { value: '°F', text: '°F, convert them' },
       ],
       examples: open.flatMap(({ samples }) => samples).slice(0, 3),
+    },
+  ];
+};
+
+const SHOWN = 80;
+
+const summaryQuestion = (found: FoundSummaries | undefined): Question[] => {
+  if (!found) return [];
+  const { column, values, rows, example } = found;
+  return [
+    {
+      id: 'rows-off-the-step',
+      text: `Rows with "${values[0]}" in column "${column}" lie off the step of all the others (${rows} in the sample). Are they readings?`,
+      choices: [
+        {
+          value: JSON.stringify({ leaveOut: [{ column, values }] }),
+          text: 'No, such as a summary of the day: leave them out',
+        },
+        { value: JSON.stringify({ leaveOut: [] }), text: 'Yes, take them' },
+      ],
+      examples: [example.slice(0, SHOWN)],
     },
   ];
 };
@@ -189,10 +211,15 @@ export function proposeMapping(sample: FileSample, tower: ForTower): FoundLayout
       ...{ timeColumn: time.timeColumn ?? DEFAULT_MAPPING.timeColumn, timeForm: time.timeForm },
       ...(time.timeColumns ? { timeColumns: time.timeColumns } : {}),
       ...(time.stamp ? { stamp: time.stamp } : {}),
+      onlyNamed: true,
       missing: [...new Set([...ALWAYS, ...marks.map(({ text }) => text)])],
     },
     ...{ columnNames: header.names, columns, written: long?.written.map(({ name }) => name) ?? [] },
     notes,
-    questions: [...dayQuestion(time, firstTime), ...unitQuestion(columns)],
+    questions: [
+      ...dayQuestion(time, firstTime),
+      ...unitQuestion(columns),
+      ...summaryQuestion(findSummaries(header, time)),
+    ],
   };
 }

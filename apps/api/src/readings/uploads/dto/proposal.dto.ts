@@ -14,6 +14,7 @@ const questionIds = [
   'missing-hour',
   'day-or-month-first',
   'unit',
+  'rows-off-the-step',
 ] as const satisfies readonly Question['id'][];
 
 /** Something about a file that only a person can say. */
