@@ -16,6 +16,7 @@ export interface ReadWithBytes {
 export class FileInThread {
   private readonly id = randomUUID();
   private begun = false;
+  private last: Promise<unknown> = Promise.resolve();
 
   constructor(
     private readonly pool: ComputePool,
@@ -46,7 +47,14 @@ export class FileInThread {
     if (this.begun) await this.pool.run(closeFileTask, this.id);
   }
 
-  private async read(piece: Buffer | undefined, how: HowToRead): Promise<ReadWithBytes> {
+  /** A piece is handed over when the one before is done: the pool may take two that wait in either order. */
+  private read(piece: Buffer | undefined, how: HowToRead): Promise<ReadWithBytes> {
+    const read = this.last.then(() => this.readNow(piece, how));
+    this.last = read;
+    return read;
+  }
+
+  private async readNow(piece: Buffer | undefined, how: HowToRead): Promise<ReadWithBytes> {
     const begin = this.begun ? undefined : this.toRead;
     this.begun = true;
     const read = await this.pool.run(readPieceTask, { id: this.id, begin, piece, how });
