@@ -8,6 +8,14 @@ export const staffRoutes: RouteObject[] = [
     element: <RoleGate roles={['analyst', 'administrator']} />,
     children: [
       { path: paths.desk, lazy: async () => ({ Component: (await import('../pages/desk-page')).DeskPage }) },
+      {
+        path: paths.importFile(),
+        lazy: async () => ({ Component: (await import('../pages/import-file-page')).ImportFilePage }),
+      },
+      {
+        path: paths.upload(),
+        lazy: async () => ({ Component: (await import('../pages/upload-page')).UploadPage }),
+      },
     ],
   },
   {
@@ -29,6 +37,14 @@ export const staffRoutes: RouteObject[] = [
       {
         path: paths.history,
         lazy: async () => ({ Component: (await import('../pages/history-page')).HistoryPage }),
+      },
+      {
+        path: paths.readings,
+        lazy: async () => ({ Component: (await import('../pages/readings-page')).ReadingsPage }),
+      },
+      {
+        path: paths.importResult(),
+        lazy: async () => ({ Component: (await import('../pages/import-page')).ImportPage }),
       },
       {
         path: paths.towerReadings(),

@@ -11,12 +11,20 @@ export interface Place {
 
 const NOTICES: Place = { to: paths.notices, name: 'Notices', icon: 'notices' };
 const HISTORY: Place = { to: paths.history, name: 'History', icon: 'history' };
+const READINGS: Place = { to: paths.readings, name: 'Readings', icon: 'readings' };
 const RULES: Place = { to: paths.rules, name: 'Rules', icon: 'rules' };
 const DESK: Place = { to: paths.desk, name: 'Desk', icon: 'desk' };
 
 /** Where each role may go, its own work first. */
 export const placesOf: Record<Role, readonly Place[]> = {
-  analyst: [DESK, NOTICES, HISTORY, RULES],
-  officer: [{ to: paths.officer, name: 'Decisions', icon: 'decisions' }, NOTICES, HISTORY],
-  administrator: [{ to: paths.admin, name: 'Administration', icon: 'admin' }, DESK, NOTICES, HISTORY, RULES],
+  analyst: [DESK, NOTICES, HISTORY, READINGS, RULES],
+  officer: [{ to: paths.officer, name: 'Decisions', icon: 'decisions' }, NOTICES, HISTORY, READINGS],
+  administrator: [
+    { to: paths.admin, name: 'Administration', icon: 'admin' },
+    DESK,
+    NOTICES,
+    HISTORY,
+    READINGS,
+    RULES,
+  ],
 };

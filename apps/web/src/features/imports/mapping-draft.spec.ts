@@ -1,0 +1,32 @@
+import { answered, marksOf, setSensor, setTwice, setUnit, sensorOf, unitOf } from './mapping-draft';
+import type { Mapping, Question } from './types';
+
+const mapping: Mapping = { columns: { A: 't2', B: 't10' }, units: { A: '°F' } };
+const question = (id: Question['id']): Question => ({ id, text: '', choices: [], examples: [] });
+
+describe('correcting how a file is read', () => {
+  it('sets a column to a sensor, and leaves it out with its unit', () => {
+    expect(sensorOf(setSensor(mapping, 'C', 't60'), 'C')).toBe('t60');
+    const left = setSensor(mapping, 'A', '');
+    expect([sensorOf(left, 'A'), unitOf(left, 'A')]).toEqual([undefined, undefined]);
+    expect(unitOf(setUnit(mapping, 'A', ''), 'A')).toBeUndefined();
+  });
+
+  it('names a sensor that two columns are set to', () => {
+    expect(setTwice(mapping)).toEqual([]);
+    expect(setTwice(setSensor(mapping, 'C', 't2'))).toEqual(['t2']);
+  });
+
+  it('takes answers', () => {
+    expect(answered(mapping, question('repeated-hour'), 'in-order', []).repeatedHour).toBe('in-order');
+    expect(answered(mapping, question('missing-hour'), 'later', []).missingHour).toBe('later');
+    const day = answered(mapping, question('day-or-month-first'), '{"timeForm":"day/month/year"}', []);
+    expect(day.timeForm).toBe('day/month/year');
+    expect(unitOf(answered(mapping, question('unit'), '°F', ['B']), 'B')).toBe('°F');
+    expect(unitOf(answered(mapping, question('unit'), '°C', ['A']), 'A')).toBeUndefined();
+  });
+
+  it('reads marks as they are typed', () => {
+    expect(marksOf(' -999  NaN ')).toEqual(['-999', 'NaN']);
+  });
+});
