@@ -1,4 +1,13 @@
-import { answered, marksOf, setSensor, setTwice, setUnit, sensorOf, unitOf } from './mapping-draft';
+import {
+  answered,
+  chooseSensor,
+  marksOf,
+  setSensor,
+  setTwice,
+  setUnit,
+  sensorOf,
+  unitOf,
+} from './mapping-draft';
 import type { Mapping, Question } from './types';
 
 const mapping: Mapping = { columns: { A: 't2', B: 't10' }, units: { A: '°F' } };
@@ -15,6 +24,15 @@ describe('correcting how a file is read', () => {
   it('names a sensor that two columns are set to', () => {
     expect(setTwice(mapping)).toEqual([]);
     expect(setTwice(setSensor(mapping, 'C', 't2'))).toEqual(['t2']);
+  });
+
+  it('takes the unit that stood in the file when a person names a column, where it can be that', () => {
+    const air = { name: 't60', quantity: 'air temperature' };
+    expect(unitOf(chooseSensor(mapping, 'Low [°F]', air, '°F'), 'Low [°F]')).toBe('°F');
+    expect(unitOf(chooseSensor(mapping, 'A', air, null), 'A')).toBe('°F');
+    const wind = { name: 'wind', quantity: 'wind speed' };
+    expect(unitOf(chooseSensor(mapping, 'A', wind, '°F'), 'A')).toBeUndefined();
+    expect(sensorOf(chooseSensor(mapping, 'A', undefined, '°F'), 'A')).toBeUndefined();
   });
 
   it('takes answers', () => {

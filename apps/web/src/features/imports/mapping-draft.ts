@@ -1,4 +1,5 @@
 import type { Mapping, Question } from './types';
+import { UNITS } from './words';
 
 const without = <T>(record: Readonly<Record<string, T>> | undefined, key: string): Record<string, T> =>
   Object.fromEntries(Object.entries(record ?? {}).filter(([name]) => name !== key));
@@ -24,6 +25,22 @@ export const setUnit = (mapping: Mapping, column: string, unit: string): Mapping
   ...mapping,
   units: { ...without(units(mapping), column), ...(unit === '' ? {} : { [column]: unit }) },
 });
+
+/**
+ * What a person chose a column to be: it then comes in the unit that stood in the file, where the sensor can come in
+ * that, else in the one set before, else in the sensor's own. No sensor: the column is left out.
+ */
+export function chooseSensor(
+  mapping: Mapping,
+  column: string,
+  sensor: { name: string; quantity: string } | undefined,
+  unitFound: string | null,
+): Mapping {
+  if (!sensor) return setSensor(mapping, column, '');
+  const fits = (unit: string | null | undefined) => Boolean(unit && UNITS[sensor.quantity]?.includes(unit));
+  const unit = [unitFound, unitOf(mapping, column)].find(fits);
+  return setUnit(setSensor(mapping, column, sensor.name), column, unit ?? '');
+}
 
 /** Puts an answer into the mapping; `open` are the columns a question about units is about. */
 export function answered(

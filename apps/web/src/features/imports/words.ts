@@ -65,3 +65,19 @@ export const timeInWords = ({ timeColumn, timeColumns }: Mapping): string =>
   timeColumns && timeColumns.length > 0
     ? `columns ${timeColumns.map(({ column, part }) => `${column} (${part})`).join(', ')}`
     : `column ${timeColumn ?? 'time'}`;
+
+/** How a file is written, apart from its time column: "Cells are cut by semicolons, decimals by commas. …" */
+export function layoutInWords(mapping: Mapping): string {
+  const cut = SEPARATORS.find(({ value }) => value === (mapping.separator ?? ','));
+  const form = TIME_FORMS.find(({ value }) => value === (mapping.timeForm ?? 'iso'));
+  const marks = mapping.missing ?? [];
+  return [
+    `${mapping.sheet === undefined ? `Cells are cut by: ${cut?.label.toLowerCase() ?? mapping.separator}` : `Sheet ${mapping.sheet}`}; decimal mark: ${mapping.decimal === ',' ? 'comma' : 'point'}.`,
+    mapping.timeColumns
+      ? ''
+      : `Times are written ${form?.label.replace(/^./, (letter) => letter.toLowerCase())}.`,
+    marks.length === 0 ? '' : `No reading: ${marks.join(', ')}.`,
+  ]
+    .filter((sentence) => sentence !== '')
+    .join(' ');
+}

@@ -11,6 +11,7 @@ export interface FoundColumn {
   readonly name: string;
   readonly samples: readonly string[];
   readonly sensor: string | null;
+  /** What the file or the size of the values says; of a column nobody could name, too, for who names it. */
   readonly unit: ForeignUnit | null;
   /** Something to look at, as a sentence. */
   readonly note: string | null;
@@ -76,7 +77,7 @@ export function findColumns(
     const said = [title, ...header.between.map((row) => row.cells[index] ?? '')].map(unitIn).find(Boolean);
     const spread = spreadOf(cells, decimal, marks);
     const bySize = quantity ? unitBySize(quantity, spread) : null;
-    const unit = said !== undefined && quantity !== undefined && suits(said, quantity) ? said : bySize;
+    const unit = said !== undefined && (quantity === undefined || suits(said, quantity)) ? said : bySize;
     const isTemperature = quantity !== undefined && temperatures.includes(quantity);
     const isOdd = isTemperature && unit === null && spread.high > DOUBTFUL_C;
     const base = { index, name, samples, sensor, unit };

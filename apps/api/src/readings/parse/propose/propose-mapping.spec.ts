@@ -46,6 +46,15 @@ describe('what a file seems to be', () => {
     expect(notes[0]).toMatch(/carry their offset/);
   });
 
+  it('says the unit of a column that it could not name', () => {
+    const { mapping, columns } = propose([
+      'Date,Low arm [°F]',
+      ...steps(50, 10, (t) => `${iso(t)}-07:00,20.5`),
+    ]);
+    expect(columns).toEqual([expect.objectContaining({ name: 'Low arm [°F]', sensor: null, unit: '°F' })]);
+    expect([mapping.columns, mapping.units]).toEqual([{}, {}]);
+  });
+
   it('finds the header below a title and a line of units, semicolons and decimal commas', () => {
     const { mapping } = propose([
       'Mast of the lower valley; logger 3',

@@ -1,5 +1,6 @@
 import { Flex, Stack } from '@chakra-ui/react';
 import { useState } from 'react';
+import { paths } from '../../../app/paths';
 import { Failed } from '../../../components/states/failed';
 import { Loading } from '../../../components/states/loading';
 import { Refusal } from '../../../components/states/refusal';
@@ -7,7 +8,9 @@ import { Button } from '../../../components/ui/button';
 import { Card } from '../../../components/ui/card';
 import { PartTitle } from '../../../components/ui/heading';
 import { Message } from '../../../components/ui/message';
+import { TextLink } from '../../../components/ui/text-link';
 import { counted } from '../../../lib/format/number';
+import { dateAndTime } from '../../../lib/format/time';
 import { useAct } from '../../../lib/use-act';
 import { commitUpload, usePreview } from '../api';
 import { answered, setTwice } from '../mapping-draft';
@@ -15,7 +18,7 @@ import type { Proposal, Question, Tower, Upload } from '../types';
 import { useAsked } from '../use-asked';
 import { useMappingDraft } from '../use-mapping-draft';
 import { useSettled } from '../use-settled';
-import { timeInWords } from '../words';
+import { layoutInWords, timeInWords } from '../words';
 import { ColumnsTable } from './columns-table';
 import { LayoutPart } from './layout-part';
 import { PreviewPart } from './preview-part';
@@ -32,8 +35,7 @@ interface CheckFileProps {
 
 /** What was found in a file, to be looked at and corrected, and what importing it would give. */
 export function CheckFile({ upload, proposal, tower, zone, onSheet, onBegun }: CheckFileProps) {
-  const { draft, setDraft, reset } = useMappingDraft(upload.id, proposal);
-  const [answers, setAnswers] = useState<Record<string, string>>({});
+  const { draft, setDraft, answers, setAnswers, reset } = useMappingDraft(upload.id, proposal);
   const [open, setOpen] = useState(false);
   const hasSensor = draft.format === 'long' || Object.keys(draft.columns ?? {}).length > 0;
   const preview = usePreview(upload.id, useSettled(hasSensor ? draft : null));
@@ -55,8 +57,12 @@ export function CheckFile({ upload, proposal, tower, zone, onSheet, onBegun }: C
   return (
     <Stack gap="4">
       {upload.sameAs && (
-        <Message tone="warn" title="This very file was imported before">
-          Importing it again changes nothing: what is known already counts as repeated.
+        <Message tone="warn" title="Nothing new: this very file was imported before">
+          It came in{' '}
+          <TextLink to={paths.importResult(upload.sameAs.importId)}>
+            on {dateAndTime(upload.sameAs.receivedAt, zone)}
+          </TextLink>
+          . Importing it again changes nothing: what is known already counts as repeated.
         </Message>
       )}
       {upload.fault && (
@@ -73,7 +79,7 @@ export function CheckFile({ upload, proposal, tower, zone, onSheet, onBegun }: C
         </Flex>
         <p>
           {proposal.from === 'last file' ? `As the last file of ${tower.name}. ` : ''}
-          The time stands in {timeInWords(draft)}. {proposal.notes.join(' ')}
+          The time stands in {timeInWords(draft)}. {layoutInWords(draft)} {proposal.notes.join(' ')}
         </p>
         {open && (
           <Stack gap="3" mt="4">
@@ -130,6 +136,7 @@ export function CheckFile({ upload, proposal, tower, zone, onSheet, onBegun }: C
         >
           {found && found.whole && ready ? `Import ${counted(found.read, 'reading')}` : 'Import the file'}
         </Button>
+        <TextLink to={paths.importFile(upload.towerId)}>Choose another file</TextLink>
       </Stack>
     </Stack>
   );

@@ -21,6 +21,7 @@ const Drop = chakra('div', {
     px: '5',
     py: '8',
     textAlign: 'center',
+    _focusWithin: { outline: '2px solid', outlineColor: 'air', outlineOffset: '2px' },
   },
   variants: { over: { true: { borderColor: 'air', bg: 'air-soft' } } },
 });

@@ -2,7 +2,7 @@ import { Box } from '@chakra-ui/react';
 import { PlainTable } from '../../../components/ui/plain-table';
 import { Select } from '../../../components/ui/input';
 import { Message } from '../../../components/ui/message';
-import { sensorOf, setSensor, setTwice, setUnit, unitOf } from '../mapping-draft';
+import { chooseSensor, sensorOf, setTwice, setUnit, unitOf } from '../mapping-draft';
 import type { Mapping, Proposal, ProposedColumn, Tower } from '../types';
 import { UNITS } from '../words';
 
@@ -13,17 +13,17 @@ interface ColumnsTableProps {
   onChange: (draft: Mapping) => void;
 }
 
-type ShownColumn = Pick<ProposedColumn, 'name' | 'samples' | 'note'>;
+type ShownColumn = Pick<ProposedColumn, 'name' | 'samples' | 'note' | 'unit'>;
 
 /** Which sensor each column is, and its unit: chosen from the tower's own. Of a long table, each sensor as written. */
 export function ColumnsTable({ proposal, tower, draft, onChange }: ColumnsTableProps) {
   const sensors = tower.sensors.filter(({ retired }) => !retired);
   const rows: readonly ShownColumn[] =
     draft.format === 'long'
-      ? proposal.written.map((name) => ({ name, samples: [], note: null }))
+      ? proposal.written.map((name) => ({ name, samples: [], note: null, unit: null }))
       : proposal.columns.filter(({ name }) => !isTime(draft, name));
   const twice = setTwice(draft);
-  const quantityOf = (name: string | undefined) => sensors.find((sensor) => sensor.name === name);
+  const sensorCalled = (name: string | undefined) => sensors.find((sensor) => sensor.name === name);
   return (
     <>
       <PlainTable
@@ -54,11 +54,13 @@ export function ColumnsTable({ proposal, tower, draft, onChange }: ColumnsTableP
           },
           {
             head: 'Is the sensor',
-            cell: ({ name }) => (
+            cell: ({ name, unit }) => (
               <Select
                 aria-label={`Sensor of column ${name}`}
                 value={sensorOf(draft, name) ?? ''}
-                onChange={({ target }) => onChange(setSensor(draft, name, target.value))}
+                onChange={({ target }) =>
+                  onChange(chooseSensor(draft, name, sensorCalled(target.value), unit))
+                }
               >
                 <option value="">leave out</option>
                 {sensors.map((sensor) => (
@@ -72,7 +74,7 @@ export function ColumnsTable({ proposal, tower, draft, onChange }: ColumnsTableP
           {
             head: 'In',
             cell: ({ name }) => {
-              const sensor = quantityOf(sensorOf(draft, name));
+              const sensor = sensorCalled(sensorOf(draft, name));
               if (!sensor) return '–';
               return (
                 <Select

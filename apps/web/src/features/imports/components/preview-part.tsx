@@ -7,13 +7,18 @@ import { dateAndTime } from '../../../lib/format/time';
 import type { Preview } from '../types';
 
 const DIGITS = 3;
+/** Above this hardly any air was ever, °C; air said to be warmer mostly is in °F. */
+const DOUBTFUL_C = 45;
 const SHOWN_ROWS = 6;
 const SHOWN_REFUSED = 10;
+
+type PreviewRow = Preview['rows'][number];
 
 const shown = (value: number): string => String(Number(value.toFixed(DIGITS))).replace('-', '−');
 
 /** What importing would give: how much, from when to when, the first rows as they are read, and what is refused. */
 export function PreviewPart({ preview, zone }: { preview: Preview; zone: string }) {
+  const doubtful = preview.spans.filter(({ unit, highest }) => unit === '°C' && highest > DOUBTFUL_C);
   const rest = preview.refused - Math.min(preview.refused, SHOWN_REFUSED);
   return (
     <Stack gap="4">
@@ -40,6 +45,12 @@ export function PreviewPart({ preview, zone }: { preview: Preview; zone: string 
           ]}
         />
       )}
+      {doubtful.length > 0 && (
+        <Message tone="warn" title="Is this °F?">
+          {doubtful.map(({ sensor, highest }) => `${sensor} up to ${shown(highest)} °C`).join(', ')}: hardly
+          any air is that warm. If the file is in °F, choose it under “In” above.
+        </Message>
+      )}
       {preview.rows.length > 0 && (
         <Box>
           <SmallTitle mb="1">The first rows as they are read</SmallTitle>
@@ -50,7 +61,9 @@ export function PreviewPart({ preview, zone }: { preview: Preview; zone: string 
             columns={[
               { head: 'Row', cell: ({ rowNo }) => rowNo },
               { head: 'End of the interval', cell: ({ time }) => dateAndTime(time, zone) },
-              { head: 'In UTC', cell: ({ time }) => dateAndTime(time, 'UTC') },
+              ...(zone === 'UTC'
+                ? []
+                : [{ head: 'In UTC', cell: ({ time }: PreviewRow) => dateAndTime(time, 'UTC') }]),
               {
                 head: 'Values',
                 cell: ({ values }) =>
