@@ -63,7 +63,7 @@ export function PlainTable<T>({ caption, columns, rows, keyOf }: PlainTableProps
             {columns.map(({ head, cell, numeric }) => (
               <Cell key={head} numeric={numeric ?? false}>
                 <OnPhone aria-hidden="true">{head}</OnPhone>
-                <span>{cell(row)}</span>
+                <chakra.span minW="0">{cell(row)}</chakra.span>
               </Cell>
             ))}
           </Row>

@@ -1,6 +1,7 @@
 import {
   answered,
   chooseSensor,
+  columnsOfOpenUnit,
   marksOf,
   setSensor,
   setTwice,
@@ -33,6 +34,14 @@ describe('correcting how a file is read', () => {
     const wind = { name: 'wind', quantity: 'wind speed' };
     expect(unitOf(chooseSensor(mapping, 'A', wind, '°F'), 'A')).toBeUndefined();
     expect(sensorOf(chooseSensor(mapping, 'A', undefined, '°F'), 'A')).toBeUndefined();
+  });
+
+  it('asks about the units of those columns alone that may be in °F', () => {
+    const column = { index: 0, name: 'A', samples: [], sensor: 't2', unit: null, note: null };
+    const odd = { ...column, name: 'B', note: 'Values up to 59: look whether this is °F.' };
+    const said = { ...column, name: 'C', unit: '°F', note: 'Called "T [°F]" in the file.' };
+    const renamed = { ...column, name: 'D', note: 'Called "wind" in the file.' };
+    expect(columnsOfOpenUnit([column, odd, said, renamed])).toEqual(['B']);
   });
 
   it('takes answers', () => {

@@ -1,4 +1,4 @@
-import type { Mapping, Question } from './types';
+import type { Mapping, ProposedColumn, Question } from './types';
 import { UNITS } from './words';
 
 const without = <T>(record: Readonly<Record<string, T>> | undefined, key: string): Record<string, T> =>
@@ -61,6 +61,10 @@ export function answered(
       return open.reduce((next, column) => setUnit(next, column, value === '°F' ? value : ''), mapping);
   }
 }
+
+/** The columns of which the values do not tell °C from °F; the question about units is about them. */
+export const columnsOfOpenUnit = (columns: readonly ProposedColumn[]): string[] =>
+  columns.filter(({ unit, note }) => unit === null && note?.includes('°F')).map(({ name }) => name);
 
 /** The sensors that more than one column is set to. */
 export function setTwice(mapping: Mapping): string[] {

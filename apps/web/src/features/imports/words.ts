@@ -76,6 +76,7 @@ export function layoutInWords(mapping: Mapping): string {
     mapping.timeColumns
       ? ''
       : `Times are written ${form?.label.replace(/^./, (letter) => letter.toLowerCase())}.`,
+    mapping.clock === undefined ? '' : `The logger’s clock: ${mapping.clock}.`,
     marks.length === 0 ? '' : `No reading: ${marks.join(', ')}.`,
   ]
     .filter((sentence) => sentence !== '')

@@ -13,7 +13,7 @@ import { counted } from '../../../lib/format/number';
 import { dateAndTime } from '../../../lib/format/time';
 import { useAct } from '../../../lib/use-act';
 import { commitUpload, usePreview } from '../api';
-import { answered, setTwice } from '../mapping-draft';
+import { answered, columnsOfOpenUnit, setTwice, unitOf } from '../mapping-draft';
 import type { Proposal, Question, Tower, Upload } from '../types';
 import { useAsked } from '../use-asked';
 import { useMappingDraft } from '../use-mapping-draft';
@@ -45,15 +45,17 @@ export function CheckFile({ upload, proposal, tower, zone, onSheet, onBegun }: C
     return begun;
   });
   const questions = [...proposal.questions, ...useAsked(preview.data)];
-  const isAnswered = ({ id }: Question) => answers[id] !== undefined;
+  const openUnits = columnsOfOpenUnit(proposal.columns);
+  const isAnswered = ({ id }: Question) =>
+    answers[id] !== undefined || (id === 'unit' && openUnits.every((column) => unitOf(draft, column)));
   const unanswered = questions.filter((question) => !isAnswered(question));
   const answer = (question: Question, value: string) => {
     setAnswers({ ...answers, [question.id]: value });
-    const columns = proposal.columns.filter(({ note }) => note !== null).map(({ name }) => name);
-    setDraft(answered(draft, question, value, columns));
+    setDraft(answered(draft, question, value, openUnits));
   };
   const ready = hasSensor && unanswered.length === 0 && setTwice(draft).length === 0 && !preview.error;
   const found = preview.data;
+  const isCorrected = layoutInWords(draft) !== layoutInWords(proposal.mapping);
   return (
     <Stack gap="4">
       {upload.sameAs && (
@@ -79,7 +81,8 @@ export function CheckFile({ upload, proposal, tower, zone, onSheet, onBegun }: C
         </Flex>
         <p>
           {proposal.from === 'last file' ? `As the last file of ${tower.name}. ` : ''}
-          The time stands in {timeInWords(draft)}. {layoutInWords(draft)} {proposal.notes.join(' ')}
+          The time stands in {timeInWords(draft)}. {layoutInWords(draft)}
+          {isCorrected ? '' : ` ${proposal.notes.join(' ')}`}
         </p>
         {open && (
           <Stack gap="3" mt="4">

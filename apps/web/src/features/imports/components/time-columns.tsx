@@ -24,7 +24,7 @@ export function TimeColumns({ names, draft, onChange }: TimeColumnsProps) {
   const set = (next: Part[]) => onChange({ ...draft, timeColumns: next });
   if (!parts) {
     return (
-      <Stack gap="1" align="flex-start">
+      <Stack gap="1" align="flex-start" maxW="420px">
         <Field label="The time stands in">
           <Select
             value={draft.timeColumn ?? ''}

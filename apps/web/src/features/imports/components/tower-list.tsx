@@ -27,7 +27,11 @@ export function TowerList({ zone }: { zone: string }) {
                 head: 'Last heard',
                 cell: ({ newest }) => (newest ? <AgoText at={newest} zone={zone} /> : 'never'),
               },
-              { head: 'State', cell: ({ late }) => (late ? <strong>late</strong> : 'fresh') },
+              {
+                head: 'State',
+                cell: ({ late, newest }) =>
+                  !newest ? 'nothing yet' : late ? <strong>late</strong> : 'fresh',
+              },
             ]}
           />
         )
