@@ -43,6 +43,7 @@ const FLOORS = [
   ['rework'],
   ['office', 'towers', 'districts'],
   ['readings', 'screening', 'profiles'],
+  ['forecasts'],
   ['rules'],
   ['subscribers', 'notices', 'freshness'],
   ['proposals'],

@@ -11,6 +11,7 @@ import { DemoModule } from './demo/demo.module';
 import { DeskModule } from './desk/desk.module';
 import { DistrictsModule } from './districts/districts.module';
 import { FreshnessModule } from './freshness/freshness.module';
+import { ForecastsModule } from './forecasts/forecasts.module';
 import { HealthModule } from './health/health.module';
 import { LoggingModule } from './http/logging.module';
 import { WebFilesModule } from './http/web-files.module';
@@ -50,6 +51,7 @@ import { UsersModule } from './users/users.module';
     UploadsModule,
     ScreeningModule,
     ProfilesModule,
+    ForecastsModule,
     RulesModule,
     OfficeModule,
     OutboxModule,

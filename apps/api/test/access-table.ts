@@ -56,6 +56,11 @@ export const accessTable: Record<string, Access> = {
   'DELETE /api/keys/:id': administrator,
 
   'POST /api/ingest/readings': 'public',
+  'GET /api/forecasts': all,
+  'GET /api/forecasts/skill': all,
+  'POST /api/forecasts': analyst,
+  'POST /api/forecasts/table': analyst,
+
   'POST /api/uploads': keepers,
   'GET /api/uploads': keepers,
   'GET /api/uploads/:id': keepers,

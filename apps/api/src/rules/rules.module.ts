@@ -1,6 +1,7 @@
 import { Module } from '@nestjs/common';
 import { SequelizeModule } from '@nestjs/sequelize';
 import { DistrictsModule } from '../districts/districts.module';
+import { ForecastsModule } from '../forecasts/forecasts.module';
 import { TowersModule } from '../towers/towers.module';
 import { EvidenceService } from './evaluation/evidence.service';
 import { LiveEvaluation } from './evaluation/live-evaluation';
@@ -17,7 +18,7 @@ import { RulesService } from './rules.service';
 
 /** District findings, the versions of each district's rule, and what the rule in force says of the newest block. */
 @Module({
-  imports: [SequelizeModule.forFeature([Rule]), DistrictsModule, TowersModule],
+  imports: [SequelizeModule.forFeature([Rule]), DistrictsModule, ForecastsModule, TowersModule],
   controllers: [RulesController],
   providers: [
     ...[RulesService, LiveEvaluation, EvidenceService],

@@ -12,7 +12,7 @@ export const SMOKE_MEASURES = {
   ventilationIndexM2PerS: numberMeasure('m²/s', 0, 500_000, {
     label: { en: 'Ventilation index', es: 'Índice de ventilación' },
     decimals: 0,
-    docs: 'Mixing height times transport wind.',
+    docs: 'Mixing height times the forecast wind, which stands for the transport wind: no mast measures that.',
   }),
   surfaceTemperatureC: numberMeasure('°C', -80, 60, {
     label: { en: 'Temperature near the ground', es: 'Temperatura cerca del suelo' },

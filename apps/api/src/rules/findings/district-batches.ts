@@ -2,6 +2,7 @@ import { isFresh, notKnown } from '@lidwatch/atmosphere';
 import { Injectable } from '@nestjs/common';
 import { groupBy } from '../../common/group-by';
 import type { DirtyRow } from '../../database/dirty';
+import { KnownForecasts, type ForecastBook } from '../../forecasts/known-forecasts';
 import { graceS } from '../../profiles/grace';
 import { blockAt, newestValidEnd } from './answering';
 import { districtBlock, REACH_S, type DistrictBlock, type DistrictSources } from './district-block';
@@ -28,6 +29,7 @@ interface Part {
 interface Kept {
   readonly blocks: TowerBlocks;
   readonly hours: MonitorHours;
+  readonly forecasts: ForecastBook;
   readonly strengths: ReadonlyMap<number, Map<number, StrengthAt>>;
 }
 
@@ -61,6 +63,7 @@ export class DistrictBatches {
   constructor(
     private readonly towers: TowerBlockRows,
     private readonly rows: DistrictRows,
+    private readonly forecasts: KnownForecasts,
   ) {}
 
   /**
@@ -108,6 +111,7 @@ export class DistrictBatches {
     return {
       blocks: await this.towers.between(towerIds, first - reachS, until),
       hours: await this.towers.hours(monitors, first - SMOKE_REACH_S, until),
+      forecasts: await this.forecasts.book(districtIds, first, until),
       strengths: await this.rows.strengths(districtIds, first - EPISODE_REACH_S, until),
     };
   }
@@ -117,7 +121,7 @@ export class DistrictBatches {
 function workOut({ plan, marks, ends }: Part, kept: Kept, now: number): DistrictBatch {
   const strengths = kept.strengths.get(plan.districtId) ?? new Map<number, StrengthAt>();
   const sources: DistrictSources = {
-    ...{ plan, blocks: kept.blocks },
+    ...{ plan, blocks: kept.blocks, forecasts: kept.forecasts },
     hours: plan.pm25 && (kept.hours.get(plan.pm25.id) ?? []),
     earlier: (t) => strengths.get(t) ?? NO_BLOCK,
   };

@@ -1,11 +1,12 @@
 import { exactly, isNotKnown, notKnown, type HourlyMean } from '@lidwatch/atmosphere';
 import type { MeasuredValues } from '@lidwatch/rules';
+import type { ForecastBook } from '../../forecasts/known-forecasts';
 import { answerOf, blockAt, type Answer } from './answering';
 import type { DistrictPlan, PlanTower } from './district-plan';
 import { episodeMinutes, EPISODE_REACH_S, type StrengthAt } from './episode-minutes';
 import { floorToBenchC } from './floor-and-bench';
+import { forecastValues } from './forecast-values';
 import { localMoment } from './local-time';
-import { WITHOUT_FORECAST } from './measures-json';
 import { SMOKE_REACH_S, smokeValues } from './smoke';
 import type { TowerBlocks } from './tower-blocks';
 
@@ -31,6 +32,8 @@ export interface DistrictSources {
   readonly blocks: TowerBlocks;
   /** Hourly means of the district's monitor; undefined where it has none. */
   readonly hours: readonly HourlyMean[] | undefined;
+  /** What the forecasts said, as they were known. */
+  readonly forecasts: ForecastBook;
   /** The district's earlier blocks, as kept or as just worked out. */
   readonly earlier: (t: number) => StrengthAt;
 }
@@ -39,6 +42,9 @@ export interface DistrictSources {
 export const REACH_S = Math.max(SMOKE_REACH_S, EPISODE_REACH_S + 3600);
 
 const GAVE_NOTHING = notKnown('the tower gave nothing for this block');
+
+const levelsOf = (speaker: PlanTower | null, blocks: TowerBlocks, t: number, blockS: number) =>
+  (speaker && blockAt(speaker, blocks, t, blockS)?.levels) ?? [];
 
 /** The district's block that ends at t. */
 export function districtBlock(sources: DistrictSources, t: number): DistrictBlock {
@@ -54,7 +60,7 @@ export function districtBlock(sources: DistrictSources, t: number): DistrictBloc
     episodeMinutes: episodeMinutes({ spoke: begin.spoke, strengthC }, earlier, t, plan.blockS),
     floorToBenchC: floorToBenchC(plan, blocks, t),
     ...smokeValues(hours, t, plan.timeZone),
-    ...WITHOUT_FORECAST,
+    ...forecastValues(sources.forecasts, plan, t, levelsOf(begin.speaker, blocks, t, plan.blockS)),
     hourOfDay: exactly(hour),
     month: exactly(month),
   };

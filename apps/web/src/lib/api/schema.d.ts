@@ -752,6 +752,54 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/forecasts': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Forecasts.list'];
+    put?: never;
+    post: operations['Forecasts.enter'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/forecasts/skill': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Forecasts.skill'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/forecasts/table': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Forecasts.table'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/rules/measures': {
     parameters: {
       query?: never;
@@ -2341,6 +2389,82 @@ export interface components {
       questions: components['schemas']['Question'][];
       /** @description Whether the whole file was looked at, not only its beginning */
       whole: boolean;
+    };
+    ForecastOutcome: {
+      lowC: number | null;
+      windMPerS: number | null;
+      highC: number | null;
+      /** @description By the parcel method from the morning and the high */
+      mixingAtLeastM: number | null;
+      /** @description null: open, above the tower */
+      mixingAtMostM: number | null;
+      towerName: string;
+      /** @description Hours of the night that were measured */
+      hours: number;
+    };
+    Forecast: {
+      id: number;
+      districtId: number;
+      day: string;
+      lowC: number | null;
+      cloudPercent: number | null;
+      windMPerS: number | null;
+      highC: number | null;
+      mixingHeightM: number | null;
+      note: string;
+      /** @enum {string} */
+      origin: 'entered' | 'uploaded' | 'demo';
+      enteredAt: string;
+      by: string | null;
+      /** @description How often it was entered; the newest counts, the others are kept */
+      entries: number;
+      outcome: components['schemas']['ForecastOutcome'] | null;
+    };
+    Skill: {
+      /** @description Forecasts with an outcome */
+      n: number;
+      /** @description Mean of forecast minus outcome; null: too few */
+      meanError: number | null;
+      /** @description Mean of its size; null: too few */
+      meanAbsoluteError: number | null;
+    };
+    ForecastSkill: {
+      lowC: components['schemas']['Skill'];
+      highC: components['schemas']['Skill'];
+      windMPerS: components['schemas']['Skill'];
+      /** @description Fewer than this are too few to say */
+      least: number;
+    };
+    ForecastInput: {
+      districtId: number;
+      /** @description The day whose evening it begins with, as 2026-01-31 */
+      day: string;
+      /** @description Lowest temperature of the night, noon to noon, °C */
+      lowC?: number;
+      /** @description Cloud of the night, % of the sky */
+      cloudPercent?: number;
+      /** @description Mean wind of the night, m/s */
+      windMPerS?: number;
+      /** @description Highest temperature of the day after, °C */
+      highC?: number;
+      /** @description Mixing height of the day after, m above ground */
+      mixingHeightM?: number;
+      note?: string;
+    };
+    ForecastTableInput: {
+      /** @description Comma-separated with a header: district (its name or address part), day, and any of low_c, cloud_percent, wind_m_per_s, high_c, mixing_height_m, note */
+      text: string;
+    };
+    RefusedForecast: {
+      row: number;
+      /** @description Names the row, the column and the cure */
+      text: string;
+    };
+    ForecastTableResult: {
+      taken: number;
+      /** @description The same as what counts already; not entered again */
+      repeated: number;
+      refused: components['schemas']['RefusedForecast'][];
     };
     LabelDto: {
       en: string;
@@ -4334,6 +4458,96 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['Upload'];
+        };
+      };
+    };
+  };
+  'Forecasts.list': {
+    parameters: {
+      query: {
+        districtId: number;
+        from: string;
+        to: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Forecast'][];
+        };
+      };
+    };
+  };
+  'Forecasts.enter': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ForecastInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Forecast'];
+        };
+      };
+    };
+  };
+  'Forecasts.skill': {
+    parameters: {
+      query: {
+        districtId: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ForecastSkill'];
+        };
+      };
+    };
+  };
+  'Forecasts.table': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ForecastTableInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ForecastTableResult'];
         };
       };
     };
