@@ -21,6 +21,7 @@ export const paths = {
   towerReadings: (id: number | ':id' = ':id') => `/readings/towers/${id}`,
   notices: '/notices',
   notice: (id: number | ':id' = ':id') => `/notices/${id}`,
+  forecasts: '/forecasts',
   rules: '/rules',
   admin: '/admin',
   adminTowers: '/admin/towers',

@@ -39,6 +39,10 @@ export const staffRoutes: RouteObject[] = [
         lazy: async () => ({ Component: (await import('../pages/history-page')).HistoryPage }),
       },
       {
+        path: paths.forecasts,
+        lazy: async () => ({ Component: (await import('../pages/forecasts-page')).ForecastsPage }),
+      },
+      {
         path: paths.readings,
         lazy: async () => ({ Component: (await import('../pages/readings-page')).ReadingsPage }),
       },

@@ -12,12 +12,13 @@ export interface Place {
 const NOTICES: Place = { to: paths.notices, name: 'Notices', icon: 'notices' };
 const HISTORY: Place = { to: paths.history, name: 'History', icon: 'history' };
 const READINGS: Place = { to: paths.readings, name: 'Readings', icon: 'readings' };
+const FORECASTS: Place = { to: paths.forecasts, name: 'Forecasts', icon: 'forecasts' };
 const RULES: Place = { to: paths.rules, name: 'Rules', icon: 'rules' };
 const DESK: Place = { to: paths.desk, name: 'Desk', icon: 'desk' };
 
 /** Where each role may go, its own work first. */
 export const placesOf: Record<Role, readonly Place[]> = {
-  analyst: [DESK, NOTICES, HISTORY, READINGS, RULES],
+  analyst: [DESK, NOTICES, HISTORY, READINGS, FORECASTS, RULES],
   officer: [{ to: paths.officer, name: 'Decisions', icon: 'decisions' }, NOTICES, HISTORY, READINGS],
   administrator: [
     { to: paths.admin, name: 'Administration', icon: 'admin' },
