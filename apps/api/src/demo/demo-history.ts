@@ -8,6 +8,7 @@ import type { ProposalCard } from '../proposals/dto/proposal.dto';
 import { ReadingsCollector } from '../readings/collector/readings-collector';
 import { DemoDecisions } from './demo-decisions';
 import { DemoDelivery } from './demo-delivery';
+import { DemoForecasts } from './demo-forecasts';
 import type { DemoStaff } from './demo-office';
 import type { DemoScenario } from './demo-scenario';
 import type { Span } from './history-spans';
@@ -61,6 +62,7 @@ export class DemoHistory {
     private readonly expiry: NoticeExpiry,
     private readonly decisions: DemoDecisions,
     private readonly delivery: DemoDelivery,
+    private readonly forecasts: DemoForecasts,
     private readonly notices: NoticeLogService,
     private readonly work: UnitOfWork,
   ) {}
@@ -87,6 +89,7 @@ export class DemoHistory {
   /** Says whether all is quiet at its end: nothing waits for anybody and nothing is in force. */
   private async step(t: number, order: HistoryOrder, last: LastDays): Promise<boolean> {
     await this.decideUntil(t, order);
+    await this.forecasts.enterUntil(t, last.now, order.staff, order.timeZone);
     this.setClock(t);
     await order.loggers.write(t);
     this.setClock(Math.min(t + COLLECTED_AFTER_S, last.now));

@@ -1,6 +1,7 @@
 import { Module } from '@nestjs/common';
 import { AuthModule } from '../auth/auth.module';
 import { DistrictsModule } from '../districts/districts.module';
+import { ForecastsModule } from '../forecasts/forecasts.module';
 import { NoticesModule } from '../notices/notices.module';
 import { OfficeModule } from '../office/office.module';
 import { OutboxModule } from '../outbox/outbox.module';
@@ -12,6 +13,7 @@ import { SubscribersModule } from '../subscribers/subscribers.module';
 import { TowersModule } from '../towers/towers.module';
 import { DemoDecisions } from './demo-decisions';
 import { DemoDelivery } from './demo-delivery';
+import { DemoForecasts } from './demo-forecasts';
 import { DemoHistory } from './demo-history';
 import { DemoOffice } from './demo-office';
 
@@ -20,6 +22,7 @@ import { DemoOffice } from './demo-office';
   imports: [
     AuthModule,
     DistrictsModule,
+    ForecastsModule,
     NoticesModule,
     OfficeModule,
     OutboxModule,
@@ -30,6 +33,6 @@ import { DemoOffice } from './demo-office';
     SubscribersModule,
     TowersModule,
   ],
-  providers: [DemoDecisions, DemoDelivery, DemoHistory, DemoOffice],
+  providers: [DemoDecisions, DemoDelivery, DemoForecasts, DemoHistory, DemoOffice],
 })
 export class DemoModule {}

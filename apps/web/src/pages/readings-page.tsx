@@ -1,9 +1,10 @@
-import { Stack } from '@chakra-ui/react';
+import { Flex, Stack } from '@chakra-ui/react';
 import { paths } from '../app/paths';
 import { PageHead } from '../components/layout/page-head';
 import { ButtonLink } from '../components/ui/button';
 import { Card } from '../components/ui/card';
 import { PartTitle } from '../components/ui/heading';
+import { TextLink } from '../components/ui/text-link';
 import { TroubleList } from '../features/freshness/components/trouble-list';
 import { ImportList } from '../features/imports/components/import-list';
 import { TowerList } from '../features/imports/components/tower-list';
@@ -14,10 +15,15 @@ import { useMe } from '../lib/api/use-me';
 export function ReadingsPage() {
   const { me } = useMe();
   const zone = useDistricts().data?.[0]?.timeZone ?? 'UTC';
-  const act = me && me.role !== 'officer' && (
-    <ButtonLink kind="go" to={paths.importFile()}>
-      Import a file
-    </ButtonLink>
+  const act = me && (
+    <Flex gap="4" align="center" wrap="wrap">
+      <TextLink to={paths.forecasts}>Forecasts</TextLink>
+      {me.role !== 'officer' && (
+        <ButtonLink kind="go" to={paths.importFile()}>
+          Import a file
+        </ButtonLink>
+      )}
+    </Flex>
   );
   return (
     <>
