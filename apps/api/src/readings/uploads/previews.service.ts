@@ -13,6 +13,7 @@ import { ReadingContexts } from '../reading-contexts';
 import type { RefusedRow } from '../refusal';
 import { civilQuestions } from './civil-questions';
 import type { PreviewDto, PreviewRowDto, PreviewSpanDto } from './dto/proposal.dto';
+import { KeptComparison } from './kept-comparison';
 import { MappingChecks } from './mapping-checks';
 import { ProposalsService } from './proposals.service';
 import { UploadRows } from './upload-rows';
@@ -23,6 +24,9 @@ const LOOKED_AT_BYTES = 5_000_000;
 const PIECE_BYTES = 64_000;
 const SHOWN_ROWS = 30;
 const SHOWN_REFUSED = 100;
+/** Of each sensor so many readings are compared with the tower's own, one in so many. */
+const COMPARED = 500;
+const ONE_IN = 7;
 
 interface Span {
   from: number;
@@ -30,6 +34,8 @@ interface Span {
   count: number;
   lowest: number;
   highest: number;
+  /** Some of its readings. */
+  readonly some: ParsedReading[];
 }
 
 interface Tally {
@@ -59,8 +65,11 @@ function count(tally: Tally, readings: readonly ParsedReading[], refused: readon
     else if (tally.rows.size < SHOWN_ROWS) tally.rows.set(key, { ...reading, readings: [reading] });
     const { sensorId, tEnd, value } = reading;
     const span = tally.spans.get(sensorId);
-    if (!span) tally.spans.set(sensorId, { from: tEnd, to: tEnd, count: 1, lowest: value, highest: value });
-    else {
+    if (!span) {
+      const first = { from: tEnd, to: tEnd, count: 1, lowest: value, highest: value, some: [reading] };
+      tally.spans.set(sensorId, first);
+    } else {
+      if (span.count % ONE_IN === 0 && span.some.length < COMPARED) span.some.push(reading);
       span.from = Math.min(span.from, tEnd);
       span.to = Math.max(span.to, tEnd);
       span.count += 1;
@@ -80,6 +89,7 @@ export class PreviewsService {
     private readonly contexts: ReadingContexts,
     private readonly layouts: TowerLayouts,
     private readonly checks: MappingChecks,
+    private readonly comparison: KeptComparison,
   ) {}
 
   /** Reads an upload by a mapping; of a large file its beginning. */
@@ -112,12 +122,21 @@ export class PreviewsService {
       if (whole) take(cutter.end());
       if (!reader.hasHeader)
         throw new HeaderError('The file has no header line; say in which row it stands.');
-      return show(tally, tower.sensors, whole);
+      return { ...show(tally, tower.sensors, whole), warnings: await this.warnings(tally, tower.sensors) };
     });
+  }
+
+  private async warnings({ spans }: Tally, sensors: readonly LayoutSensor[]): Promise<string[]> {
+    const warnings: string[] = [];
+    for (const sensor of sensors) {
+      const some = spans.get(sensor.id)?.some;
+      if (some) warnings.push(...(await this.comparison.warnings(sensor, some)));
+    }
+    return warnings;
   }
 }
 
-function show(tally: Tally, sensors: readonly LayoutSensor[], whole: boolean): PreviewDto {
+function show(tally: Tally, sensors: readonly LayoutSensor[], whole: boolean): Omit<PreviewDto, 'warnings'> {
   const known = new Map(sensors.map((sensor) => [sensor.id, sensor]));
   const named = (id: number): { sensor: string; unit: string } => {
     const { name, quantity } = known.get(id)!;
@@ -127,7 +146,7 @@ function show(tally: Tally, sensors: readonly LayoutSensor[], whole: boolean): P
     ...{ rowNo, time: toIso(tEnd) },
     values: readings.map(({ sensorId, value }) => ({ ...named(sensorId), value })),
   }));
-  const spans = [...tally.spans].map(([id, { from, to, ...span }]): PreviewSpanDto => ({
+  const spans = [...tally.spans].map(([id, { from, to, some: _, ...span }]): PreviewSpanDto => ({
     ...named(id),
     ...span,
     from: toIso(from),

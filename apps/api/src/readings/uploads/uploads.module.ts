@@ -2,6 +2,7 @@ import { Module } from '@nestjs/common';
 import { SchedulerModule } from '../../scheduler/scheduler.module';
 import { TowersModule } from '../../towers/towers.module';
 import { ReadingsModule } from '../readings.module';
+import { KeptComparison } from './kept-comparison';
 import { MappingChecks } from './mapping-checks';
 import { PreviewsService } from './previews.service';
 import { ProposalsService } from './proposals.service';
@@ -23,6 +24,7 @@ import { WorkbookTexts } from './workbook-texts';
     UploadTexts,
     WorkbookTexts,
     MappingChecks,
+    KeptComparison,
     ProposalsService,
     PreviewsService,
     UploadRuns,

@@ -2387,6 +2387,8 @@ export interface components {
       ignoredColumns: string[];
       spans: components['schemas']['PreviewSpan'][];
       questions: components['schemas']['Question'][];
+      /** @description What looks wrong beside the tower's own readings */
+      warnings: string[];
       /** @description Whether the whole file was looked at, not only its beginning */
       whole: boolean;
     };

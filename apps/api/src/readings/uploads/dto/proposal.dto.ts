@@ -101,6 +101,8 @@ export class PreviewDto {
   @ApiProperty({ type: [String] }) ignoredColumns!: string[];
   @ApiProperty({ type: [PreviewSpanDto] }) spans!: PreviewSpanDto[];
   @ApiProperty({ type: [QuestionDto] }) questions!: QuestionDto[];
+  @ApiProperty({ type: [String], description: "What looks wrong beside the tower's own readings" })
+  warnings!: string[];
   @ApiProperty({ description: 'Whether the whole file was looked at, not only its beginning' })
   whole!: boolean;
 }

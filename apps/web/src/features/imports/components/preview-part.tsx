@@ -30,6 +30,13 @@ export function PreviewPart({ preview, zone }: { preview: Preview; zone: string 
         , {preview.refused === 0 ? 'no row refused' : `${counted(preview.refused, 'row')} refused`}.
         {preview.ignoredColumns.length > 0 && ` Left out: ${preview.ignoredColumns.join(', ')}.`}
       </p>
+      {preview.warnings.length > 0 && (
+        <Message tone="warn" title="This looks wrong beside the tower’s own readings">
+          {preview.warnings.map((warning) => (
+            <p key={warning}>{warning}</p>
+          ))}
+        </Message>
+      )}
       {preview.spans.length > 0 && (
         <PlainTable
           caption="What each sensor would get"
