@@ -34,6 +34,8 @@ const project = (folder, { environment = 'node', tsconfig = {}, roots = ['src'],
 /** @type {import('jest').Config} */
 module.exports = {
   rootDir: root,
+  // A backstop against what hangs, not a measure: on a busy machine a service takes its time to start.
+  testTimeout: 60_000,
   projects: [
     project('packages/atmosphere'),
     project('packages/rules'),
