@@ -14,6 +14,8 @@ import { addDays, dayAfter, localDay, localInstant, nightOf, type Stretch } from
 const HOUR_S = 3600;
 /** Days worked out again at each turn, so that readings that came late still count. */
 const AGAIN_DAYS = 4;
+/** Days looked at: those of them that are not kept yet are worked out, too. */
+const LOOKED_AT_DAYS = 40;
 /** A mean or an extreme of a stretch counts with so many of its blocks. */
 const ENOUGH = 0.75;
 /** The profile of this local hour is the one a parcel rises through. */
@@ -51,13 +53,16 @@ export class OutcomesService implements OnModuleInit {
     this.jobs.register('see how forecasts turned out', HOUR_S, () => this.keepAll());
   }
 
-  /** Works the last days out anew, for every district that has a forecast for them; says how many. */
+  /** Works out the days behind that have a forecast, the last of them anew; says how many. */
   async keepAll(): Promise<string> {
     let kept = 0;
     for (const district of await this.districts.list()) {
       const today = localDay(district.timeZone, this.clock.now());
-      const entries = await this.rows.between([district.id], addDays(today, -AGAIN_DAYS), addDays(today, -2));
+      const span = [addDays(today, -LOOKED_AT_DAYS), addDays(today, -2)] as const;
+      const entries = await this.rows.between([district.id], ...span);
+      const known = new Set((await this.rows.outcomes(district.id, ...span)).map(({ forDay }) => forDay));
       for (const day of new Set(entries.map(({ forDay }) => forDay))) {
+        if (known.has(day) && day < addDays(today, -AGAIN_DAYS)) continue;
         const outcome = await this.workOut(district, day);
         if (!outcome) continue;
         await this.work.run(() => this.rows.keepOutcome(outcome), 'bulk');

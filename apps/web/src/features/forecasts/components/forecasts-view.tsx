@@ -46,11 +46,11 @@ export function ForecastsView({ districts, district, canWrite, onDistrict }: For
           <>
             {canWrite && (
               <Card padded>
-                <PartTitle mb="3">Tonight and tomorrow</PartTitle>
+                <PartTitle mb="3">The night at hand and the day after</PartTitle>
                 <ForecastForm
                   key={`${id} ${night}`}
                   {...{ districtId: id, night, onEntered }}
-                  known={all.find(({ day }) => day === night)}
+                  known={(asked) => all.find(({ day }) => day === asked)}
                 />
               </Card>
             )}
