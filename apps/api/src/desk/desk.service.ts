@@ -90,6 +90,8 @@ function airOf(finding: DistrictFinding, profile: ProfileDto | undefined) {
     heatDeficitMJPerM2: shown('heatDeficitMJPerM2'),
     breakUpTemperatureC: (finding.fresh && profile?.breakUpTemperatureC) || showRange(old),
     mixingHeightM: shown('mixingHeightM'),
+    forecastLowC: shown('forecastLowC'),
+    forecastWindMPerS: shown('forecastWindMPerS'),
     windSpeedMPerS: shown('windSpeedMPerS'),
     surfaceTemperatureC: shown('surfaceTemperatureC'),
     levels: profile?.levels ?? [],

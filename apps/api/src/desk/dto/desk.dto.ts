@@ -47,6 +47,8 @@ export class DistrictAir {
   @ApiProperty(range) heatDeficitMJPerM2!: RangeValue;
   @ApiProperty(range) breakUpTemperatureC!: RangeValue;
   @ApiProperty(range) mixingHeightM!: RangeValue;
+  @ApiProperty(range) forecastLowC!: RangeValue;
+  @ApiProperty(range) forecastWindMPerS!: RangeValue;
   @ApiProperty(range) windSpeedMPerS!: RangeValue;
   @ApiProperty(range) surfaceTemperatureC!: RangeValue;
   @ApiProperty({ type: [ProfileLevelDto] }) levels!: ProfileLevelDto[];

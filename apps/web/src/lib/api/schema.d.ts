@@ -3034,6 +3034,8 @@ export interface components {
       heatDeficitMJPerM2: components['schemas']['RangeValue'];
       breakUpTemperatureC: components['schemas']['RangeValue'];
       mixingHeightM: components['schemas']['RangeValue'];
+      forecastLowC: components['schemas']['RangeValue'];
+      forecastWindMPerS: components['schemas']['RangeValue'];
       windSpeedMPerS: components['schemas']['RangeValue'];
       surfaceTemperatureC: components['schemas']['RangeValue'];
       levels: components['schemas']['ProfileLevel'][];

@@ -60,8 +60,16 @@ export function DistrictDetail({ air }: { air: DistrictAir }) {
           <RangeText value={air.breakUpTemperatureC} unit="°C" />
         </Row>
         <Row>
-          <span>Mixing height now</span>
+          <span>Mixing height at the forecast high</span>
           <RangeText value={air.mixingHeightM} decimals={0} unit="m" />
+        </Row>
+        <Row>
+          <span>Forecast low of the night</span>
+          <RangeText value={air.forecastLowC} unit="°C" />
+        </Row>
+        <Row>
+          <span>Forecast wind of the night</span>
+          <RangeText value={air.forecastWindMPerS} unit="m/s" />
         </Row>
         <Row>
           <span>PM2.5 over 24 hours</span>
