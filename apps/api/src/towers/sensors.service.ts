@@ -11,6 +11,7 @@ import { UnitOfWork } from '../database/unit-of-work';
 import { ReworkService } from '../rework/rework.service';
 import { sensorChangeWords } from './change-words';
 import type { SensorInput, SensorPatch } from './dto/sensor-input.dto';
+import { changedFields } from './describe-change';
 import { showSensor, type SensorDto } from './dto/tower.dto';
 import { SensorVersion } from './models/sensor-version.model';
 import { Sensor } from './models/sensor.model';
@@ -58,8 +59,9 @@ export class SensorsService {
         sigma,
       });
       this.layouts.forget(towerId);
-      await this.dirty.markTower(towerId);
-      await this.reworks.begin({ towerId, cause: `${name} added`, byUser: by.id });
+      const t0 = instant(input.from);
+      await this.dirty.markTower(towerId, t0);
+      await this.reworks.begin({ towerId, cause: `${name} added`, byUser: by.id, t0 });
       await this.record('sensor added', towerId, by, input);
       return showSensor(await this.find(id));
     });
@@ -74,20 +76,27 @@ export class SensorsService {
       const retiredAt =
         patch.retired === undefined ? {} : { retiredAt: patch.retired ? this.clock.now() : null };
       await this.sensors.update({ name: patch.name ?? sensor.name, ...retiredAt }, { where: { id } });
-      await this.changeVersion(sensor, patch);
+      const changed = await this.changeVersion(sensor, patch);
       this.layouts.forget(towerId);
-      const t0 = patch.from ? instant(patch.from) : 0;
-      await this.dirty.markTower(towerId, t0);
-      await this.reworks.begin({ towerId, cause: sensorChangeWords(sensor, patch), byUser: by.id, t0 });
-      await this.record('sensor changed', towerId, by, { id, ...patch });
+      if (changed) {
+        const { t0, t1 } = changed;
+        await this.dirty.markTower(towerId, t0, t1);
+        await this.reworks.begin({ towerId, cause: sensorChangeWords(sensor, patch), byUser: by.id, t0, t1 });
+      }
+      const before = { ...changed?.before, name: sensor.name, retired: sensor.retiredAt !== null };
+      const after = { ...patch, ...(changed && { sigma: changed.sigma }) };
+      const changes = changedFields(before, after, ['name', 'retired', ...VERSION_FIELDS]);
+      const { from, note } = patch;
+      await this.record('sensor changed', towerId, by, { sensor: sensor.name, from, note, changes });
       return showSensor(await this.find(id));
     });
   }
 
-  private async changeVersion(sensor: Sensor, patch: SensorPatch): Promise<void> {
+  /** Changes what holds from an instant on; gives the span of readings it concerns, or nothing where nothing changes. */
+  private async changeVersion(sensor: Sensor, patch: SensorPatch): Promise<ChangedVersion | undefined> {
     const sigma = sigmaOf(patch);
     const changes = { ...measured(patch), ...(sigma === undefined ? {} : { sigma }) };
-    if (Object.keys(changes).length === 0) return;
+    if (Object.keys(changes).length === 0) return undefined;
     const sorted = [...sensor.versions].sort((a, b) => a.fromT - b.fromT);
     const fromT = patch.from === undefined ? sorted.at(-1)!.fromT : instant(patch.from);
     const before = sorted.findLast((version) => version.fromT <= fromT) ?? sorted[0]!;
@@ -98,6 +107,10 @@ export class SensorsService {
       sensorId: sensor.id,
       fromT,
     });
+    const { blockS } = await this.layouts.of(sensor.towerId);
+    const next = sorted.find((version) => version.fromT > fromT);
+    const t1 = next ? next.fromT + blockS : Number.MAX_SAFE_INTEGER;
+    return { t0: fromT, t1, before: before.get({ plain: true }) as object, sigma };
   }
 
   private async find(id: number): Promise<Sensor> {
@@ -118,6 +131,15 @@ export class SensorsService {
   }
 }
 
+/** What a change of a version concerns: readings in (t0, t1]. */
+interface ChangedVersion {
+  readonly t0: number;
+  readonly t1: number;
+  readonly before: object;
+  readonly sigma: number | undefined;
+}
+
+const VERSION_FIELDS = ['heightM', 'offset', 'gain', 'sigma', 'pairSigma'];
 const usual = { offset: 0, gain: 1, pairSigma: null, note: '' };
 
 interface Measured {

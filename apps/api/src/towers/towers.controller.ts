@@ -1,11 +1,27 @@
-import { Body, Controller, Get, Param, ParseIntPipe, Patch, Post } from '@nestjs/common';
-import { ApiCreatedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import {
+  Body,
+  Controller,
+  Delete,
+  Get,
+  HttpCode,
+  Param,
+  ParseIntPipe,
+  Patch,
+  Post,
+  Query,
+} from '@nestjs/common';
+import { ApiCreatedResponse, ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { CurrentUser, Roles } from '../auth/decorators';
 import type { SignedIn } from '../auth/signed-in';
+import { PageQuery } from '../common/paging';
+import { TowerChangePage, VersionDateInput } from './dto/tower-change.dto';
 import { SensorInput, SensorPatch } from './dto/sensor-input.dto';
 import { SensorDto, TowerDto } from './dto/tower.dto';
 import { TowerInput, TowerPatch } from './dto/tower-input.dto';
+import { RemovalService } from './removal.service';
+import { SensorVersionsService } from './sensor-versions.service';
 import { SensorsService } from './sensors.service';
+import { TowerChangesService } from './tower-changes.service';
 import { TowersService } from './towers.service';
 
 /** Towers and their sensors, for staff. */
@@ -15,6 +31,9 @@ export class TowersController {
   constructor(
     private readonly towers: TowersService,
     private readonly sensors: SensorsService,
+    private readonly versions: SensorVersionsService,
+    private readonly removal: RemovalService,
+    private readonly record: TowerChangesService,
   ) {}
 
   /** Lists every tower with its sensors. */
@@ -75,5 +94,56 @@ export class TowersController {
     @CurrentUser() by: SignedIn,
   ): Promise<SensorDto> {
     return this.sensors.change(id, patch, by);
+  }
+
+  /** Takes a version of a sensor back: what held before it holds on. `from` is its instant, or "beginning". */
+  @Delete('sensors/:id/versions/:from')
+  @Roles('administrator', 'analyst')
+  @ApiOkResponse({ type: SensorDto })
+  removeVersion(
+    @Param('id', ParseIntPipe) id: number,
+    @Param('from') from: string,
+    @CurrentUser() by: SignedIn,
+  ): Promise<SensorDto> {
+    return this.versions.remove(id, from, by);
+  }
+
+  /** Corrects from when a version of a sensor holds. */
+  @Patch('sensors/:id/versions/:from')
+  @Roles('administrator', 'analyst')
+  @ApiOkResponse({ type: SensorDto })
+  moveVersion(
+    @Param('id', ParseIntPipe) id: number,
+    @Param('from') from: string,
+    @Body() input: VersionDateInput,
+    @CurrentUser() by: SignedIn,
+  ): Promise<SensorDto> {
+    return this.versions.move(id, from, input.from, by);
+  }
+
+  /** Takes a sensor away that has no readings. */
+  @Delete('sensors/:id')
+  @HttpCode(204)
+  @Roles('administrator', 'analyst')
+  @ApiNoContentResponse()
+  removeSensor(@Param('id', ParseIntPipe) id: number, @CurrentUser() by: SignedIn): Promise<void> {
+    return this.removal.sensor(id, by);
+  }
+
+  /** Takes a tower away that has no readings and that no district asks. */
+  @Delete('towers/:id')
+  @HttpCode(204)
+  @Roles('administrator', 'analyst')
+  @ApiNoContentResponse()
+  removeTower(@Param('id', ParseIntPipe) id: number, @CurrentUser() by: SignedIn): Promise<void> {
+    return this.removal.tower(id, by);
+  }
+
+  /** Lists what was ever changed about a tower, the newest first. */
+  @Get('towers/:id/changes')
+  @Roles('administrator', 'analyst', 'officer')
+  @ApiOkResponse({ type: TowerChangePage })
+  changes(@Param('id', ParseIntPipe) id: number, @Query() query: PageQuery): Promise<TowerChangePage> {
+    return this.record.list(id, query);
   }
 }

@@ -7,11 +7,14 @@ import { SensorVersion } from './models/sensor-version.model';
 import { Sensor } from './models/sensor.model';
 import { Source } from './models/source.model';
 import { Tower } from './models/tower.model';
+import { RemovalService } from './removal.service';
+import { SensorVersionsService } from './sensor-versions.service';
 import { SensorsService } from './sensors.service';
 import { SourcePositions } from './source-positions';
 import { SourceTurns } from './source-turns';
 import { SourcesController } from './sources.controller';
 import { SourcesService } from './sources.service';
+import { TowerChangesService } from './tower-changes.service';
 import { TowerLayouts } from './tower-layouts';
 import { TowersController } from './towers.controller';
 import { TowersService } from './towers.service';
@@ -23,6 +26,9 @@ import { TowersService } from './towers.service';
   providers: [
     TowersService,
     SensorsService,
+    SensorVersionsService,
+    RemovalService,
+    TowerChangesService,
     KeysService,
     SourcesService,
     SourcePositions,

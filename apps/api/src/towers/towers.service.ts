@@ -11,6 +11,7 @@ import { Sql } from '../database/sql';
 import { UnitOfWork } from '../database/unit-of-work';
 import { ReworkService } from '../rework/rework.service';
 import { towerChangeWords } from './change-words';
+import { changedFields, TOWER_FIELDS } from './describe-change';
 import { showTower, type TowerDto } from './dto/tower.dto';
 import type { TowerInput, TowerPatch } from './dto/tower-input.dto';
 import { SensorVersion } from './models/sensor-version.model';
@@ -80,7 +81,7 @@ export class TowersService {
         await this.dirty.markTower(id);
         await this.reworks.begin({ towerId: id, cause: towerChangeWords(patch), byUser: by.id });
       }
-      await this.record('tower changed', id, by, patch);
+      await this.record('tower changed', id, by, { changes: changedFields(before, patch, TOWER_FIELDS) });
       return this.get(id);
     });
   }

@@ -86,4 +86,7 @@ export const up: readonly string[] = [
   `DROP INDEX contact_address`,
   `CREATE UNIQUE INDEX contact_address ON contact(channel, address_hash) WHERE stopped_at IS NULL AND user_id IS NULL`,
   `CREATE UNIQUE INDEX contact_user ON contact(user_id, channel) WHERE user_id IS NOT NULL`,
+
+  // --- the record of one thing ------------------------------------------------------------------------------------
+  `CREATE INDEX activity_subject ON activity(subject, seq)`,
 ];

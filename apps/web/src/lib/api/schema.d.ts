@@ -218,7 +218,7 @@ export interface paths {
     get: operations['Towers.get'];
     put?: never;
     post?: never;
-    delete?: never;
+    delete: operations['Towers.removeTower'];
     options?: never;
     head?: never;
     patch: operations['Towers.change'];
@@ -250,10 +250,42 @@ export interface paths {
     get?: never;
     put?: never;
     post?: never;
-    delete?: never;
+    delete: operations['Towers.removeSensor'];
     options?: never;
     head?: never;
     patch: operations['Towers.changeSensor'];
+    trace?: never;
+  };
+  '/api/sensors/{id}/versions/{from}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete: operations['Towers.removeVersion'];
+    options?: never;
+    head?: never;
+    patch: operations['Towers.moveVersion'];
+    trace?: never;
+  };
+  '/api/towers/{id}/changes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Towers.changes'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
     trace?: never;
   };
   '/api/towers/{id}/keys': {
@@ -1610,6 +1642,25 @@ export interface components {
       note?: string;
       /** @description true sets the sensor aside: its readings stay, new ones are not taken */
       retired?: boolean;
+    };
+    VersionDateInput: {
+      from: string;
+    };
+    TowerChange: {
+      id: number;
+      at: string;
+      /** @description Who, or "service" */
+      by: string;
+      /** @description What was done, as a short phrase */
+      act: string;
+      /** @description What exactly, from what to what where that is kept; may be empty */
+      what: string;
+    };
+    TowerChangePage: {
+      total: number;
+      page: number;
+      pageSize: number;
+      items: components['schemas']['TowerChange'][];
     };
     IngestKey: {
       id: number;
@@ -3511,6 +3562,25 @@ export interface operations {
       };
     };
   };
+  'Towers.removeTower': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+    };
+  };
   'Towers.change': {
     parameters: {
       query?: never;
@@ -3561,6 +3631,25 @@ export interface operations {
       };
     };
   };
+  'Towers.removeSensor': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+    };
+  };
   'Towers.changeSensor': {
     parameters: {
       query?: never;
@@ -3582,6 +3671,78 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['Sensor'];
+        };
+      };
+    };
+  };
+  'Towers.removeVersion': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+        from: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Sensor'];
+        };
+      };
+    };
+  };
+  'Towers.moveVersion': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+        from: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['VersionDateInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['Sensor'];
+        };
+      };
+    };
+  };
+  'Towers.changes': {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+      };
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TowerChangePage'];
         };
       };
     };
