@@ -2,7 +2,7 @@ import type { RouteObject } from 'react-router-dom';
 import { paths } from './paths';
 import { RoleGate } from './role-gate';
 
-/** The administrator's pages and the rules, inside the staff frame. */
+/** The administrator's pages, and the towers and rules that analysts keep, too; inside the staff frame. */
 export const adminRoutes: RouteObject[] = [
   {
     element: <RoleGate roles={['administrator']} />,
@@ -10,14 +10,6 @@ export const adminRoutes: RouteObject[] = [
       {
         path: paths.admin,
         lazy: async () => ({ Component: (await import('../pages/admin-people-page')).AdminPeoplePage }),
-      },
-      {
-        path: paths.adminTowers,
-        lazy: async () => ({ Component: (await import('../pages/admin-towers-page')).AdminTowersPage }),
-      },
-      {
-        path: paths.adminTower(),
-        lazy: async () => ({ Component: (await import('../pages/admin-tower-page')).AdminTowerPage }),
       },
       {
         path: paths.adminDistricts,
@@ -28,6 +20,14 @@ export const adminRoutes: RouteObject[] = [
   {
     element: <RoleGate roles={['analyst', 'administrator']} />,
     children: [
+      {
+        path: paths.adminTowers,
+        lazy: async () => ({ Component: (await import('../pages/admin-towers-page')).AdminTowersPage }),
+      },
+      {
+        path: paths.adminTower(),
+        lazy: async () => ({ Component: (await import('../pages/admin-tower-page')).AdminTowerPage }),
+      },
       {
         path: paths.rules,
         lazy: async () => ({ Component: (await import('../pages/rules-page')).RulesPage }),

@@ -30,7 +30,10 @@ export function ReadingsPage() {
       <PageHead title="Readings" aside={act} />
       <Stack gap="4">
         <Card padded>
-          <PartTitle mb="2">Towers</PartTitle>
+          <Flex justify="space-between" align="baseline" gap="3" mb="2">
+            <PartTitle>Towers</PartTitle>
+            {me && me.role !== 'officer' && <TextLink to={paths.adminTowers}>Towers and sensors</TextLink>}
+          </Flex>
           <TowerList zone={zone} />
         </Card>
         <Card padded>

@@ -18,7 +18,7 @@ export function TowerReadingsPage() {
   const { me } = useMe();
   const tower = towers.data?.find((each) => each.id === id);
   const settings =
-    me?.role === 'administrator' ? (
+    me && me.role !== 'officer' ? (
       <TextLink to={paths.adminTower(id)}>Tower and sensors</TextLink>
     ) : undefined;
   const wait = <Loading label="the readings" rows={3} rowHeight="240px" />;

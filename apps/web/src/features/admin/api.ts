@@ -1,7 +1,19 @@
 import { api, withQuery } from '../../lib/api/client';
 import type { Page, Role } from '../../lib/api/types';
 import { useApi } from '../../lib/api/use-api';
-import type { District, IngestKey, Measure, Office, Rule, Source, Tower, Upload, User } from './types';
+import type {
+  District,
+  IngestKey,
+  Measure,
+  Office,
+  Rule,
+  Sensor,
+  Source,
+  Tower,
+  TowerChange,
+  Upload,
+  User,
+} from './types';
 
 export const useUsers = () => useApi<Page<User>>(withQuery('/api/users', { pageSize: 200 }));
 export const useTowers = () => useApi<Tower[]>('/api/towers');
@@ -39,7 +51,17 @@ export const addTower = (tower: object) => api.post<Tower>('/api/towers', tower)
 export const changeTower = (id: number, change: object) => api.patch<Tower>(`/api/towers/${id}`, change);
 export const addSensor = (towerId: number, sensor: object) =>
   api.post<object>(`/api/towers/${towerId}/sensors`, sensor);
-export const retireSensor = (id: number) => api.patch<object>(`/api/sensors/${id}`, { retired: true });
+export const changeSensor = (id: number, change: object) => api.patch<Sensor>(`/api/sensors/${id}`, change);
+export const retireSensor = (id: number, retired: boolean) => changeSensor(id, { retired });
+export const removeSensor = (id: number) => api.remove<object>(`/api/sensors/${id}`);
+export const removeVersion = (id: number, from: string | null) =>
+  api.remove<Sensor>(`/api/sensors/${id}/versions/${encodeURIComponent(from ?? 'beginning')}`);
+export const removeTower = (id: number) => api.remove<object>(`/api/towers/${id}`);
+export const useTowerChanges = (towerId: number, page: number) =>
+  useApi<Page<TowerChange>>(withQuery(`/api/towers/${towerId}/changes`, { page, pageSize: 10 }), {
+    live: true,
+    keepPrevious: true,
+  });
 export const addSource = (towerId: number, source: object) =>
   api.post<Source>(`/api/towers/${towerId}/sources`, source);
 export const changeSource = (id: number, change: object) => api.patch<Source>(`/api/sources/${id}`, change);

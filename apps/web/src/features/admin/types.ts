@@ -6,6 +6,8 @@ type Shapes = components['schemas'];
 export type User = Shapes['UserView'];
 export type Sensor = Shapes['Sensor'];
 export type Tower = Shapes['Tower'];
+/** Something that was changed about a tower. */
+export type TowerChange = Shapes['TowerChange'];
 export type Source = Shapes['Source'];
 /** A file that staff sent, with the layout it was read by. */
 export type Upload = Shapes['Upload'];

@@ -2,6 +2,7 @@ import { Flex } from '@chakra-ui/react';
 import styled from '@emotion/styled';
 import { NavLink } from 'react-router-dom';
 import { paths } from '../../../app/paths';
+import { useMe } from '../../../lib/api/use-me';
 
 const Tab = styled(NavLink)({
   padding: '8px 12px',
@@ -18,8 +19,10 @@ const TABS = [
   { to: paths.adminDistricts, name: 'Districts and office' },
 ];
 
-/** The parts of the administration. */
+/** The parts of the administration; analysts keep the towers alone, so they see no tabs. */
 export function AdminTabs() {
+  const { me } = useMe();
+  if (me?.role !== 'administrator') return null;
   return (
     <Flex
       as="nav"

@@ -1,33 +1,32 @@
 import { Box } from '@chakra-ui/react';
+import { useState } from 'react';
 import { Empty } from '../../../components/states/empty';
-import { Refusal } from '../../../components/states/refusal';
 import { Button } from '../../../components/ui/button';
 import { Card } from '../../../components/ui/card';
 import { PartTitle } from '../../../components/ui/heading';
 import { PlainTable } from '../../../components/ui/plain-table';
-import { useAct } from '../../../lib/use-act';
-import { retireSensor } from '../api';
+import { dateAndTime } from '../../../lib/format/time';
 import type { Sensor, Tower } from '../types';
+import { SensorDialog } from './sensor-dialog';
 import { SensorForm } from './sensor-form';
 
-/** A tower's sensors with height and uncertainty, and a form for one more. */
-export function SensorsPart({ tower, onChanged }: { tower: Tower; onChanged: () => void }) {
-  const { run, problem } = useAct(async (id: number) => {
-    await retireSensor(id);
-    onChanged();
-  });
-  const setAside = ({ id, name, retired }: Sensor) =>
-    retired ? (
-      'set aside'
-    ) : (
-      <Button size="sm" onClick={() => void run(id)} aria-label={`Set aside ${name}`}>
-        Set aside
-      </Button>
-    );
+interface SensorsPartProps {
+  tower: Tower;
+  zone: string;
+  onChanged: () => void;
+}
+
+/** A tower's sensors with height and uncertainty, a way to change each from an instant on, and a form for one more. */
+export function SensorsPart({ tower, zone, onChanged }: SensorsPartProps) {
+  const [asked, setAsked] = useState<number>();
+  const chosen = tower.sensors.find(({ id }) => id === asked);
+  const since = ({ versions }: Sensor): string => {
+    const from = versions.at(-1)?.from;
+    return from ? dateAndTime(from, zone) : 'the beginning';
+  };
   return (
     <Card padded>
       <PartTitle mb="3">Sensors</PartTitle>
-      <Refusal problem={problem} />
       {tower.sensors.length === 0 ? (
         <Empty title="No sensor yet">
           A surface inversion needs air temperature at two heights at least.
@@ -43,13 +42,25 @@ export function SensorsPart({ tower, onChanged }: { tower: Tower; onChanged: () 
             { head: 'Height, m', cell: ({ heightM }) => heightM, numeric: true },
             { head: 'σ', cell: ({ sigma }) => Number(sigma.toPrecision(3)), numeric: true },
             { head: 'Gain, offset', cell: ({ gain, offset }) => `${gain}, ${offset}`, numeric: true },
-            { head: 'State', cell: setAside },
+            { head: 'Holds from', cell: since },
+            { head: 'State', cell: ({ retired }) => (retired ? 'set aside' : 'in use') },
+            {
+              head: 'Change',
+              cell: ({ id, name }) => (
+                <Button size="sm" onClick={() => setAsked(id)} aria-label={`Change ${name}`}>
+                  Change…
+                </Button>
+              ),
+            },
           ]}
         />
       )}
       <Box mt="4">
         <SensorForm towerId={tower.id} onAdded={onChanged} />
       </Box>
+      {chosen && (
+        <SensorDialog sensor={chosen} zone={zone} onClose={() => setAsked(undefined)} onChanged={onChanged} />
+      )}
     </Card>
   );
 }

@@ -56,12 +56,17 @@ export function TowerForm({ tower, onSaved }: TowerFormProps) {
         <NumberEntry
           name="staleLimitMinutes"
           label="Silent after, min"
-          help="Empty: three intervals or blocks"
+          help="Empty: 45, or 2.5 intervals"
         />
         <TextEntry name="clock" label="The logger’s clock" help="UTC, −07:00 or America/Denver" required />
         <ChoiceEntry name="stamp" label="A stamp means" choices={STAMPS} />
         <ChoiceEntry name="screening" label="Screening" choices={SCREENINGS} />
         <ChoiceEntry name="inversionForm" label="Inversions are found" choices={FORMS} />
+        <NumberEntry
+          name="embedDepthM"
+          label="Pass over thinner layers, m"
+          help="Within an inversion; 0 for towers"
+        />
       </EntryGrid>
     </EntryForm>
   );
@@ -69,9 +74,9 @@ export function TowerForm({ tower, onSaved }: TowerFormProps) {
 
 function settingsOf(tower: Tower) {
   const { name, elevationM, latitude, longitude, intervalMinutes, blockMinutes, staleLimitMinutes } = tower;
-  const { clock, stamp, screening, inversionForm } = tower;
+  const { clock, stamp, screening, inversionForm, embedDepthM } = tower;
   return {
     ...{ name, elevationM, latitude, longitude, intervalMinutes, blockMinutes, staleLimitMinutes },
-    ...{ clock, stamp, screening, inversionForm },
+    ...{ clock, stamp, screening, inversionForm, embedDepthM },
   };
 }
