@@ -53,11 +53,7 @@ export function TowerForm({ tower, onSaved }: TowerFormProps) {
           label="Averaged over, min"
           help="Empty: 15 where the interval fits"
         />
-        <NumberEntry
-          name="staleLimitMinutes"
-          label="Silent after, min"
-          help="Empty: 45, or 2.5 intervals"
-        />
+        <NumberEntry name="staleLimitMinutes" label="Silent after, min" help="Empty: 45, or 2.5 intervals" />
         <TextEntry name="clock" label="The logger’s clock" help="UTC, −07:00 or America/Denver" required />
         <ChoiceEntry name="stamp" label="A stamp means" choices={STAMPS} />
         <ChoiceEntry name="screening" label="Screening" choices={SCREENINGS} />
