@@ -80,12 +80,8 @@ export function SensorDialog({ sensor, zone, onClose, onChanged }: SensorDialogP
         </Stack>
         <Stack gap="2" align="flex-start">
           <SmallTitle>{retired ? 'It is set aside' : 'No longer in use?'}</SmallTitle>
-          <Button
-            busy={act.busy}
-            onClick={() => void act.run('retire')}
-            aria-label={`${retired ? 'Use' : 'Set aside'} ${name}`}
-          >
-            {retired ? 'Use it again' : 'Set it aside'}
+          <Button busy={act.busy} onClick={() => void act.run('retire')}>
+            {retired ? `Use ${name} again` : `Set ${name} aside`}
           </Button>
           <span>Its readings stay; new ones are {retired ? 'taken again' : 'not taken'}.</span>
           <Button

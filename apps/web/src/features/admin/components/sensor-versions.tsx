@@ -40,7 +40,7 @@ export function SensorVersions({
               (note ? ` (${note})` : ''),
           },
           {
-            head: '',
+            head: 'Undo',
             cell: ({ from }) =>
               sensor.versions.length > 1 && (
                 <Button
