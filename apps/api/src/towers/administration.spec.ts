@@ -117,7 +117,11 @@ describe('the administration of towers and sensors', () => {
     const { items } = await changes();
     expect(items.map(({ act, what, by }) => [act, what, by])).toEqual([
       ['tower changed', 'elevation 1280 m → 1300 m', analyst.name],
-      ['sensor changed', `temperature_30m from ${iso(TUESDAY)}: height 30 m → 31 m (moved up)`, analyst.name],
+      [
+        'sensor changed',
+        `temperature_30m from ${iso(TUESDAY).slice(0, 16).replace('T', ' ')} UTC: height 30 m → 31 m (moved up)`,
+        analyst.name,
+      ],
     ]);
   });
 });

@@ -8,7 +8,7 @@ describe('a change in words', () => {
     ]);
     expect(changes).toEqual({ heightM: [30, 31] });
     expect(describeChange({ sensor: 'T 30 m', from: '2026-11-24T17:00:00Z', changes, note: 'moved' })).toBe(
-      'T 30 m from 2026-11-24T17:00:00Z: height 30 m → 31 m (moved)',
+      'T 30 m from 2026-11-24 17:00 UTC: height 30 m → 31 m (moved)',
     );
     expect(
       describeChange({

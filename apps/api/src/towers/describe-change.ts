@@ -47,15 +47,18 @@ const shown = (value: unknown, unit = ''): string => {
   return unit === '°' ? `${text}°` : unit ? `${text} ${unit}` : text;
 };
 
+/** An instant of the record, to the minute. */
+const instant = (iso: string): string => `${new Date(iso).toISOString().slice(0, 16).replace('T', ' ')} UTC`;
+
 const field = ([key, [from, to]]: readonly [string, readonly [unknown, unknown]]): string => {
   const [name, unit] = NAMES[key] ?? [key];
   return `${name} ${shown(from, unit)} → ${shown(to, unit)}`;
 };
 
-/** A change in words: "T 30 m from 2026-11-24T17:00:00Z: height 30 m → 31 m (moved)". */
+/** A change in words: "T 30 m from 2026-11-24 17:00 UTC: height 30 m → 31 m (moved)". */
 export function describeChange(body: ChangeBody): string {
   if (body.changes) {
-    const of = [body['sensor'], body['from'] === undefined ? '' : `from ${String(body['from'])}`]
+    const of = [body['sensor'], body['from'] === undefined ? '' : `from ${instant(String(body['from']))}`]
       .filter(Boolean)
       .join(' ');
     const note = body['note'] ? ` (${String(body['note'])})` : '';

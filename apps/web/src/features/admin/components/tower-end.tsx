@@ -38,8 +38,8 @@ export function TowerEnd({ tower, onChanged }: { tower: Tower; onChanged: () => 
         {asking.length > 0 && (
           <Message tone={retired ? 'warn' : 'info'}>
             {retired
-              ? `${who} still names it: without another tower nothing is known there.`
-              : `${who} asks this tower. Once it is retired, nothing new is known from it.`}
+              ? `Still named by ${who}: without another tower nothing is known there.`
+              : `Asked for ${who}. Once it is retired, nothing new is known from it.`}
           </Message>
         )}
         <Button busy={act.busy} onClick={() => void act.run('retire')}>
