@@ -9,7 +9,7 @@ import type { ProposalDetail } from '../../../lib/api/types';
 import { useAct } from '../../../lib/use-act';
 import { confirmProposal, declineProposal } from '../api';
 import { Refusal } from '../../../components/states/refusal';
-import { ReasonDialog } from './reason-dialog';
+import { ReasonDialog } from '../../../components/reason/reason-dialog';
 
 interface AnalystDecisionProps {
   proposal: ProposalDetail;

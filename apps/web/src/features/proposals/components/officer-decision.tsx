@@ -16,7 +16,7 @@ import { useAct } from '../../../lib/use-act';
 import { kindInSentence } from '../../../lib/words';
 import { issueProposal, returnProposal, usePreview, type IssueInput } from '../api';
 import { IssueDialog } from './issue-dialog';
-import { ReasonDialog } from './reason-dialog';
+import { ReasonDialog } from '../../../components/reason/reason-dialog';
 import { UntilField } from './until-field';
 
 interface OfficerDecisionProps {
