@@ -1,6 +1,7 @@
 import { qualityCodes } from '@lidwatch/contracts';
 import { versionAt, type LayoutSensor, type LayoutVersion, type TowerLayout } from '../towers/tower-layout';
 import type { SensorQuantity } from '../towers/quantities';
+import { derivedHumidity, pressureOr } from './derived-humidity';
 
 /** A block mean as it is kept. */
 export interface KeptMean {
@@ -17,7 +18,7 @@ export type StoredLevel = readonly [number, number | null, number, number, numbe
 export interface OtherQuantities {
   /** Height m, RH over water %, σ %; for whether a layer is saturated. */
   readonly humidity?: readonly (readonly [number, number, number])[];
-  /** Of the sensor nearest 2 m. */
+  /** Nearest 2 m; from a dew point or wet bulb where no humidity was measured. */
   readonly relativeHumidityPct?: number;
   /** Of the sensor nearest 10 m. */
   readonly windSpeedMPerS?: number;
@@ -79,23 +80,52 @@ const isTemperature = ({ sensor }: Present): boolean => sensor.quantity === 'air
 const defined = <T extends object>(values: T): T =>
   Object.fromEntries(Object.entries(values).filter(([, value]) => value !== undefined)) as T;
 
-const otherOf = (present: readonly Measured[], pm25Hour: number | undefined): OtherQuantities => {
+/** How far above or below a dew point or wet bulb the air temperature beside it may be, m. */
+const BESIDE_M = 1;
+
+type HumidityHere = readonly [number, number, number];
+
+/** Relative humidity as it was measured, and from dew points and wet bulbs where it was not. */
+const humidityOf = (present: readonly Measured[], pressureHPa: number): HumidityHere[] => {
+  const direct = present
+    .filter(({ sensor }) => sensor.quantity === 'relative humidity')
+    .map(({ version, kept }): HumidityHere => [version.heightM, kept.mean, version.sigma]);
+  const derived = present.flatMap(({ sensor, version, kept }): HumidityHere[] => {
+    const { quantity: kind } = sensor;
+    const { heightM } = version;
+    if (kind !== 'dew point' && kind !== 'wet bulb') return [];
+    const air = nearest(present, 'air temperature', heightM);
+    if (!air || Math.abs(air.version.heightM - heightM) > BESIDE_M) return [];
+    if (direct.some(([other]) => Math.abs(other - heightM) <= BESIDE_M)) return [];
+    const by = { kind, heightM, valueC: kept.mean, valueSigmaC: version.sigma } as const;
+    const found = derivedHumidity({ ...by, airC: air.kept.mean, airSigmaC: air.version.sigma }, pressureHPa);
+    return found ? [found] : [];
+  });
+  return [...direct, ...derived];
+};
+
+const nearestTo = (humidity: readonly HumidityHere[], heightM: number): number | undefined =>
+  [...humidity].sort((a, b) => Math.abs(a[0] - heightM) - Math.abs(b[0] - heightM))[0]?.[1];
+
+const otherOf = (
+  present: readonly Measured[],
+  pm25Hour: number | undefined,
+  pressureHPa: number,
+): OtherQuantities => {
   if (pm25Hour === undefined && present.every(isTemperature)) return NOTHING_ELSE;
+  const humidity = humidityOf(present, pressureHPa);
   const shown = {
     'relative humidity': nearest(present, 'relative humidity', 2),
     'wind speed': nearest(present, 'wind speed', 10),
     'wind direction': nearest(present, 'wind direction', 10),
     'pm2.5': nearest(present, 'pm2.5', 2),
   };
-  const humidity = present
-    .filter(({ sensor }) => sensor.quantity === 'relative humidity')
-    .map(({ version, kept }) => [version.heightM, kept.mean, version.sigma] as const);
   const suspect = Object.values(shown).flatMap((each) =>
     each?.kept.quality === qualityCodes.suspect ? [each.sensor.quantity] : [],
   );
   return defined({
     humidity: humidity.length > 0 ? humidity : undefined,
-    relativeHumidityPct: shown['relative humidity']?.kept.mean,
+    relativeHumidityPct: nearestTo(humidity, 2),
     windSpeedMPerS: shown['wind speed']?.kept.mean,
     windDirectionDeg: shown['wind direction']?.kept.mean,
     pm25: shown['pm2.5']?.kept.mean,
@@ -126,5 +156,6 @@ export function blockFacts(
     .sort((a, b) => a[0] - b[0]);
   const measured = present.filter(isMeasured);
   const pressure = nearest(measured, 'station pressure', 0)?.kept.mean ?? null;
-  return { towerId: tower.id, tEnd, levels, pressureHpa: pressure, other: otherOf(measured, pm25Hour) };
+  const other = otherOf(measured, pm25Hour, pressureOr(pressure, tower.elevationM));
+  return { towerId: tower.id, tEnd, levels, pressureHpa: pressure, other };
 }
