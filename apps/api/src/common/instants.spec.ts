@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { fromIso, toIso } from './instants';
 
 describe('instants', () => {
@@ -17,4 +18,15 @@ describe('instants', () => {
     expect(toIso(1_768_525_200)).toBe('2026-01-16T01:00:00Z');
     expect(fromIso(toIso(1_768_525_201))).toBe(1_768_525_201);
   });
+
+  it('go out as the language itself writes them, whatever went out before', () => {
+    const plain = (t: number): string => new Date(t * 1000).toISOString().replace('.000Z', 'Z');
+    fc.assert(
+      fc.property(fc.integer({ min: -62_000_000_000, max: 250_000_000_000 }), (t) => toIso(t) === plain(t)),
+      { numRuns: 2_000 },
+    );
+    for (const t of [0, -1, 86_399, 86_400, 1_709_164_800]) expect(toIso(t)).toBe(plain(t));
+  });
+
+  it.each([NaN, 9e12])('%d does not go out', (t) => expect(() => toIso(t)).toThrow(RangeError));
 });

@@ -34,15 +34,19 @@ interface Row {
 
 interface StepRow extends Row {
   step: number;
+  lowestC: number | null;
 }
 
 const WHERE = 'FROM district_block WHERE district_id = $1 AND t_end > $2 AND t_end <= $3';
 const COLUMNS = 't_end tEnd, strength_lo lo, strength_hi hi, sure, speaker_id speakerId, reason';
 const BLOCK_S = `SELECT block_s blockS ${WHERE} ORDER BY t_end DESC LIMIT 1`;
 const BLOCKS = `SELECT ${COLUMNS}, within_c withinC ${WHERE} ORDER BY t_end LIMIT ${MOST_POINTS}`;
-/* With one max() alone SQLite takes the other columns from the row that has it. */
-const STRONGEST = `SELECT (t_end - 1) / $4 step, max(within_c) withinC, ${COLUMNS} ${WHERE} GROUP BY 1 ORDER BY 1`;
-const LOWEST = `SELECT (t_end - 1) / $4 step, min(within_c) lowestC ${WHERE} GROUP BY 1`;
+const OF_STEP = 'district_id = $1 AND t_end > s.value->>0 AND t_end <= s.value->>1';
+/* Along the index alone, step by step: grouping the blocks of a year would sort them first. */
+const STEPS = `SELECT s.key step, within_c withinC, ${COLUMNS},
+    (SELECT min(within_c) FROM district_block WHERE ${OF_STEP}) lowestC
+  FROM json_each($2) s CROSS JOIN district_block ON district_id = $1 AND t_end =
+    (SELECT t_end FROM district_block WHERE ${OF_STEP} ORDER BY within_c DESC, t_end LIMIT 1)`;
 
 const truthOf = (sure: number | null): Truth => (sure === null ? 'not known' : sure === 1 ? 'true' : 'false');
 
@@ -67,16 +71,24 @@ export class DistrictHistoryService {
       [blockS, ...STEPS_S].find((each) => each >= blockS && (to - from) / each <= MOST_POINTS) ??
       STEPS_S.at(-1)!;
     if (stepS === blockS) return { stepS, points: (await this.sql.all<Row>(BLOCKS, span)).map(pointOf) };
-    const [strongest, lowest] = await Promise.all([
-      this.sql.all<StepRow>(STRONGEST, [...span, stepS]),
-      this.sql.all<{ step: number; lowestC: number | null }>(LOWEST, [...span, stepS]),
-    ]);
-    const lowestOf = new Map(lowest.map(({ step, lowestC }) => [step, lowestC]));
-    const points = strongest.map(({ step, ...row }) => ({
+    const steps = stepsOf(from, to, stepS);
+    const rows = await this.sql.all<StepRow>(STEPS, [districtId, JSON.stringify(steps)]);
+    const points = rows.map(({ step, lowestC, ...row }) => ({
       ...pointOf(row),
-      tEnd: (step + 1) * stepS,
-      step: { lowestC: lowestOf.get(step) ?? null, strongestAt: row.tEnd },
+      tEnd: (Math.floor(steps[step]![0] / stepS) + 1) * stepS,
+      step: { lowestC, strongestAt: row.tEnd },
     }));
     return { stepS, points };
   }
+}
+
+/** The parts (from, to] of a span that lie between the multiples of a step. */
+function stepsOf(from: number, to: number, stepS: number): [number, number][] {
+  const steps: [number, number][] = [];
+  for (let start = from; start < to;) {
+    const end = Math.min((Math.floor(start / stepS) + 1) * stepS, to);
+    steps.push([start, end]);
+    start = end;
+  }
+  return steps;
 }
