@@ -28,13 +28,16 @@ export class HistoryService {
   async of(districtId: number, query: HistoryQuery): Promise<DistrictHistory> {
     const { timeZone, latitude, longitude } = await this.districts.get(districtId);
     const { from, to } = spanOf(query);
-    const { stepS, points } = await this.findings.of(districtId, from, to);
+    const [{ stepS, points }, limits, notices] = await Promise.all([
+      this.findings.of(districtId, from, to),
+      this.limits(districtId),
+      this.notices.between(districtId, from, to),
+    ]);
     const nights = nightsBetween(from, to, latitude, longitude);
     return {
       ...{ districtId, timeZone, from: toIso(from), to: toIso(to), stepMinutes: stepS / 60 },
       points: points.map(showPoint),
-      limits: await this.limits(districtId),
-      notices: await this.notices.between(districtId, from, to),
+      ...{ limits, notices },
       nights: nights.map((night) => ({ from: toIso(night.from), to: toIso(night.to) })),
     };
   }
