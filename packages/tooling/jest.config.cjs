@@ -36,6 +36,8 @@ module.exports = {
   rootDir: root,
   // A backstop against what hangs, not a measure: on a busy machine a service takes its time to start.
   testTimeout: 60_000,
+  // Jest leaves a core free for its own work, which of two cores is half the machine.
+  maxWorkers: '100%',
   projects: [
     project('packages/atmosphere'),
     project('packages/rules'),
