@@ -50,6 +50,8 @@ export const accessTable: Record<string, Access> = {
   'PATCH /api/sensors/:id/versions/:from': keepers,
   'DELETE /api/sensors/:id/versions/:from': keepers,
   'DELETE /api/towers/:id': keepers,
+  'GET /api/towers/:id/neighbours': all,
+  'PUT /api/towers/:id/neighbours': keepers,
   'GET /api/towers/:id/changes': all,
   'GET /api/towers/:id/sources': keepers,
   'POST /api/towers/:id/sources': keepers,

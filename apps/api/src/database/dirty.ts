@@ -33,6 +33,20 @@ const GATHER_MS = 25;
 
 const MARK = `INSERT INTO dirty (stage, subject, t) SELECT $1, value->>0, value->>1 FROM jsonb_each($2) WHERE true
   ON CONFLICT DO UPDATE SET gen = gen + 1`;
+const NEAR_END = '(own.t + near.block_s - 1) / near.block_s * near.block_s';
+/** Blocks, of at most an hour, that have an instant in common with those of `own`, at the towers whose neighbour it is. */
+const OF_NEIGHBOURS = `SELECT 1, near.id, ${NEAR_END} - k.value * near.block_s
+  FROM own JOIN tower ON tower.id = own.subject JOIN tower_neighbour n ON n.neighbour_id = tower.id
+  JOIN tower near ON near.id = n.tower_id JOIN json_each('${JSON.stringify([...Array(60).keys()])}') k
+    ON ${NEAR_END} - k.value * near.block_s > own.t - tower.block_s`;
+const AS_CHANGED = 'ON CONFLICT DO UPDATE SET gen = gen + 1';
+const OWN_LISTED = `WITH own(subject, t) AS (SELECT value->>0, value->>1 FROM jsonb_each($1))`;
+const MARK_READ = `${OWN_LISTED} INSERT INTO dirty (stage, subject, t)
+  SELECT 1, subject, t FROM own UNION ALL ${OF_NEIGHBOURS} WHERE true ${AS_CHANGED}`;
+const MARK_NEIGHBOURS = `${OWN_LISTED} INSERT INTO dirty (stage, subject, t) ${OF_NEIGHBOURS} WHERE true ${AS_CHANGED}`;
+const MARK_NEIGHBOURS_OF = `WITH own AS (SELECT subject, t FROM dirty
+    WHERE stage = 1 AND subject = $1 AND t > $2 AND t <= $3)
+  INSERT INTO dirty (stage, subject, t) ${OF_NEIGHBOURS} WHERE true ${AS_CHANGED}`;
 const SETTLE = `DELETE FROM dirty WHERE (stage, subject, t) IN (
   SELECT d.stage, d.subject, d.t FROM jsonb_each($2) j CROSS JOIN dirty d
   ON d.stage = $1 AND d.subject = j.value->>0 AND d.t = j.value->>1 AND d.gen = j.value->>2)`;
@@ -89,6 +103,23 @@ export class DirtyStages implements OnModuleDestroy {
     this.work.afterCommit(() => this.soon(stage));
   }
 
+  /**
+   * Marks, in the running transaction, blocks ([tower id, t]) whose readings changed, and what they fall together with
+   * at the towers whose neighbour theirs is.
+   */
+  async markRead(blocks: readonly (readonly [number, number])[]): Promise<void> {
+    if (blocks.length === 0) return;
+    await this.sql.run(MARK_READ, [JSON.stringify(blocks)]);
+    this.work.afterCommit(() => this.soon(1));
+  }
+
+  /** As `markRead`, for the towers whose neighbour theirs is alone: the blocks themselves are worked out otherwise. */
+  async markNeighbours(blocks: readonly (readonly [number, number])[]): Promise<void> {
+    if (blocks.length === 0) return;
+    const marked = await this.sql.run(MARK_NEIGHBOURS, [JSON.stringify(blocks)]);
+    if (marked > 0) this.work.afterCommit(() => this.soon(1));
+  }
+
   /** Marks blocks of stage 1 in the running transaction that are held; they are worked out once they are let go. */
   async markHeld(blocks: readonly (readonly [number, number])[]): Promise<void> {
     if (blocks.length > 0) await this.sql.run(MARK, [1, JSON.stringify(blocks)]);
@@ -105,9 +136,13 @@ export class DirtyStages implements OnModuleDestroy {
     else if (this.held.delete(holder)) this.soon(1);
   }
 
-  /** Marks every block of a tower that ends in (afterT, untilT]: its settings, sensors or set spans changed. */
+  /**
+   * Marks every block of a tower that ends in (afterT, untilT], and of those whose neighbour it is: its settings,
+   * sensors or set spans changed.
+   */
   async markTower(towerId: number, afterT = 0, untilT = Number.MAX_SAFE_INTEGER): Promise<void> {
     await this.sql.run(MARK_TOWER, [towerId, afterT, untilT]);
+    await this.sql.run(MARK_NEIGHBOURS_OF, [towerId, afterT, untilT]);
     this.work.afterCommit(() => this.soon(1));
   }
 

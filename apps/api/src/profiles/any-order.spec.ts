@@ -1,3 +1,4 @@
+import { checkBits } from '@lidwatch/contracts';
 import { SetClock } from '../common/clock';
 import { DirtyStages } from '../database/dirty';
 import { makeDistrict, makeTower } from '../testing/places';
@@ -10,7 +11,7 @@ const BEGIN = Date.UTC(2025, 11, 1) / 1000;
 const END = BEGIN + 1.75 * 86_400;
 /** Corrections come to the first hours only: later ones must be right without being touched again. */
 const CORRECTED_S = 12 * 3600;
-const ORDERS = 20;
+const ORDERS = 12;
 
 const BLOCK_S = 900;
 
@@ -54,6 +55,19 @@ function record(sensorIds: readonly number[]): ParsedReading[] {
       const value = chance > 0.997 ? 999 : chance > 0.992 ? usual + 12 : usual;
       rows.push({ sensorId, tEnd: t, value, rowNo: 1 });
     });
+  }
+  return rows;
+}
+
+/** A bench tower of another interval, which warms with the mast at times and at times is far from it. */
+function neighbourRecord(sensorId: number): ParsedReading[] {
+  const next = numbersFrom(11);
+  const rows: ParsedReading[] = [];
+  for (let t = BEGIN + 2 * INTERVAL_S; t <= END; t += 2 * INTERVAL_S) {
+    const chance = next();
+    if (chance < 0.05) continue;
+    const value = -6 + Math.round((next() - 0.5) * 160) / 10;
+    rows.push({ sensorId, tEnd: t, value, rowNo: 1 });
   }
   return rows;
 }
@@ -102,11 +116,23 @@ describe('the same readings in any order, in batches of any size, late and corre
     return mast;
   }
 
+  /** A bench tower that the mast's readings are held against. */
+  async function makeNeighbour(mast: { towerId: number; sensorIds: number[] }) {
+    const bench = await makeTower(test, { interval_s: 600, block_s: 600, heightsM: [2] });
+    await test.sql.run('INSERT INTO tower_neighbour VALUES ($1, $2)', [mast.towerId, bench.towerId]);
+    await test.sql.run(`UPDATE sensor SET screening_limits = '{"neighbourDifference":7.5}' WHERE id = $1`, [
+      mast.sensorIds[0],
+    ]);
+    return { towerId: bench.towerId, sensorId: bench.sensorIds[0]! };
+  }
+
   /** First wrong values, later the right ones; with late readings, in batches of any size. */
   async function load(order: number): Promise<Record<string, object[]>> {
-    const { towerId, sensorIds } = await makeMast();
+    const mast = await makeMast();
+    const { towerId, sensorIds } = mast;
+    const bench = await makeNeighbour(mast);
     const [readings, dirty] = [test.app.get(ReadingsService, { strict: false }), test.app.get(DirtyStages)];
-    const right = record(sensorIds);
+    const right = [...record(sensorIds), ...neighbourRecord(bench.sensorId)];
     const next = numbersFrom(order + 100);
     const isWrong = right.map(({ tEnd }) => next() < 0.1 && tEnd < BEGIN + CORRECTED_S);
     const wrong = right.filter((_, i) => isWrong[i]).map((row) => ({ ...row, value: row.value + 3 }));
@@ -116,7 +142,16 @@ describe('the same readings in any order, in batches of any size, late and corre
     const largest = rows.length * (order === 1 || order === 2 ? 0.05 : 0.4);
     for (let at = 0; at < rows.length;) {
       const batch = rows.slice(at, at + 1 + Math.floor(next() * largest));
-      await readings.ingest(towerId, batch, { origin: 'folder', name: 'mast.csv' });
+      const isBench = ({ sensorId }: ParsedReading): boolean => sensorId === bench.sensorId;
+      const parts = [
+        { towerId, rows: batch.filter((row) => !isBench(row)) },
+        { towerId: bench.towerId, rows: batch.filter(isBench) },
+      ];
+      for (const part of next() < 0.5 ? parts : parts.toReversed()) {
+        if (part.rows.length === 0) continue;
+        await readings.ingest(part.towerId, part.rows, { origin: 'folder', name: 'mast.csv' });
+        if (next() < 0.3) await dirty.drainAll();
+      }
       if (next() < 0.6) await dirty.drainAll();
       at += batch.length;
     }
@@ -130,6 +165,7 @@ describe('the same readings in any order, in batches of any size, late and corre
     const expected = await load(0);
     const readings = expected.reading as { quality: number; checks: number }[];
     expect(readings.filter(({ quality }) => quality === 2).length).toBeGreaterThan(10);
+    expect(readings.filter(({ checks }) => checks & checkBits.neighbours).length).toBeGreaterThan(10);
     expect(expected.profile!.length).toBe((END - BEGIN) / BLOCK_S);
     expect(expected.district_block!.length).toBe((END - BEGIN) / BLOCK_S);
     for (let order = 1; order < ORDERS; order += 1) {

@@ -152,7 +152,7 @@ export class WithdrawalsService implements OnApplicationBootstrap {
     const blocks = [...new Set(instants.map((t) => blockEndOf(t, blockS)))];
     await this.sql.run(EMPTY, [sensorId, JSON.stringify(blocks), blockS, qualityCodes.missing]);
     const marks = blocks.map((t) => [towerId, t] as const);
-    await this.dirty.mark(1, marks);
+    await this.dirty.markRead(marks);
     await this.dirty.mark(2, marks);
     return { last: instants.at(-1)!, blocks };
   }

@@ -1,13 +1,14 @@
 import type { ScreeningContext } from '@lidwatch/atmosphere';
 import { computeTask } from '../compute/compute-task';
-import { blockEndOf, type TowerLayout } from '../towers/tower-layout';
+import { blockEndOf, type LayoutSensor, type TowerLayout } from '../towers/tower-layout';
 import { blockMean, type BlockMean } from './block-means';
-import { screenStretch } from './screen-tower';
+import { kinOf, screenStretch } from './screen-tower';
 import { firstAfter, type ChangedFlag, type Flags, type Series, type SetSpan, type Stretch } from './series';
 
 /** Blocks of one tower that are screened together. */
 export interface Part {
   readonly tower: TowerLayout;
+  readonly neighbours: readonly TowerLayout[];
   readonly stretch: Stretch;
   /** Ends of the blocks that changed. */
   readonly blocks: readonly number[];
@@ -20,7 +21,7 @@ export interface Found {
   readonly means: BlockMean[];
 }
 
-/** Parts with the series of each, one per sensor, and what people have set about them. */
+/** Parts with the series of each in the order of `sensorsOf`, and what people have set about them. */
 export interface PartsToScreen {
   readonly parts: readonly Part[];
   readonly series: readonly Series[];
@@ -33,18 +34,30 @@ export const reachOf = ({ tower, stretch, context }: Part): Stretch => ({
   t1: blockEndOf(stretch.t1 + context.beforeS, tower.blockS),
 });
 
+/** Whose readings a part's screening looks at: the tower's, then its neighbours'. */
+export const sensorsOf = ({ tower, neighbours }: Part): LayoutSensor[] => [
+  ...tower.sensors,
+  ...neighbours.flatMap((neighbour) => kinOf(tower, neighbour)),
+];
+
 /** Screens parts: the flags that changed, and the means of the blocks that changed or hold such a flag. */
 export function screenParts({ parts, series, spans }: PartsToScreen): Found[] {
   let at = 0;
-  return parts.map((part) => screenPart(part, series.slice(at, (at += part.tower.sensors.length)), spans));
+  return parts.map((part) => screenPart(part, series.slice(at, (at += sensorsOf(part).length)), spans));
 }
 
 /** Screening parts, for the compute thread. */
 export const screenPartsTask = computeTask(__filename, screenParts);
 
-function screenPart(part: Part, series: readonly Series[], spans: readonly SetSpan[]): Found {
-  const { tower, blocks } = part;
-  const flags = screenStretch(tower, series, reachOf(part), spans);
+function screenPart(part: Part, all: readonly Series[], spans: readonly SetSpan[]): Found {
+  const { tower, neighbours, blocks } = part;
+  const series = all.slice(0, tower.sensors.length);
+  let at = series.length;
+  const nearby = neighbours.map((neighbour) => ({
+    tower: neighbour,
+    series: all.slice(at, (at += kinOf(tower, neighbour).length)),
+  }));
+  const flags = screenStretch(tower, series, reachOf(part), spans, nearby);
   const changed = series.flatMap((each, i) => changedFlags(each, flags[i]!));
   const ends = new Set([...blocks, ...changed.map(({ tEnd }) => blockEndOf(tEnd, tower.blockS))]);
   const means = tower.sensors.flatMap((sensor, i) =>

@@ -5,7 +5,7 @@ import { DirtyStages, type DirtyRow } from '../database/dirty';
 import { UnitOfWork } from '../database/unit-of-work';
 import { TowerLayouts } from '../towers/tower-layouts';
 import { ReadingWindows, type Wanted } from './reading-windows';
-import { reachOf, screenParts, screenPartsTask, type Found, type Part } from './screen-parts.task';
+import { reachOf, screenParts, screenPartsTask, sensorsOf, type Found, type Part } from './screen-parts.task';
 import { contextOf } from './screen-tower';
 import { ScreeningStore } from './screening-store';
 import { stretchesOf } from './stretches';
@@ -51,10 +51,11 @@ export class ScreeningStage implements OnModuleInit {
     for (const [towerId, own] of groupBy(rows, (row) => row.subject)) {
       const tower = await this.layouts.of(towerId);
       const ends = own.map((row) => row.t);
-      const context = contextOf(tower);
+      const neighbours = await Promise.all(tower.neighbourIds.map((id) => this.layouts.of(id)));
+      const context = contextOf(tower, neighbours);
       for (const stretch of stretchesOf(ends, tower.blockS, context.beforeS + context.afterS)) {
         const blocks = ends.filter((t) => t > stretch.t0 && t <= stretch.t1);
-        parts.push({ tower, stretch, blocks, context });
+        parts.push({ tower, neighbours, stretch, blocks, context });
       }
     }
     return parts;
@@ -88,5 +89,5 @@ export class ScreeningStage implements OnModuleInit {
 const wantedOf = (part: Part): Wanted[] => {
   const { t0, t1 } = reachOf(part);
   const { beforeS, afterS } = part.context;
-  return part.tower.sensors.map(({ id }) => ({ sensorId: id, t0: t0 - beforeS, t1: t1 + afterS }));
+  return sensorsOf(part).map(({ id }) => ({ sensorId: id, t0: t0 - beforeS, t1: t1 + afterS }));
 };

@@ -18,6 +18,8 @@ export function sensorChangeWords(sensor: { name: string; unit: string }, patch:
 
 const SETTINGS: readonly (readonly [keyof TowerPatch, string])[] = [
   ['elevationM', 'elevation'],
+  ['latitude', 'latitude'],
+  ['longitude', 'longitude'],
   ['screening', 'screening'],
   ['inversionForm', 'form of inversions'],
   ['embedDepthM', 'embed depth'],

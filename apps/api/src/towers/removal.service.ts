@@ -19,6 +19,7 @@ const OF_TOWER = [
   'DELETE FROM tower_trouble WHERE tower_id = $1',
   'DELETE FROM rework WHERE tower_id = $1',
   'DELETE FROM dirty WHERE stage IN (1, 2) AND subject = $1',
+  'DELETE FROM tower_neighbour WHERE $1 IN (tower_id, neighbour_id)',
   'DELETE FROM sensor_version WHERE sensor_id IN (SELECT id FROM sensor WHERE tower_id = $1)',
   'DELETE FROM sensor WHERE tower_id = $1',
   'DELETE FROM tower WHERE id = $1',
@@ -59,8 +60,12 @@ export class RemovalService {
           `Files came in for ${name}; they stay on the record. Retire the tower instead.`,
         );
       }
+      const near = await this.sql.all<{ id: number }>(
+        'SELECT tower_id id FROM tower_neighbour WHERE neighbour_id = $1',
+        [id],
+      );
       for (const statement of OF_TOWER) await this.sql.run(statement, [id]);
-      this.layouts.forget(id);
+      for (const tower of [id, ...near.map((each) => each.id)]) this.layouts.forget(tower);
       await this.activity.record({ actor: by, act: 'tower deleted', subject: `tower ${id}`, body: { name } });
     });
   }

@@ -27,6 +27,10 @@ export interface TowerLayout {
   readonly id: number;
   readonly name: string;
   readonly elevationM: number;
+  readonly latitude: number;
+  readonly longitude: number;
+  /** Towers whose readings are looked at when this one's are screened. */
+  readonly neighbourIds: readonly number[];
   readonly intervalS: number;
   readonly blockS: number;
   readonly clock: string;

@@ -5,14 +5,19 @@ import { openUnit } from '../database/unit-context';
 import { UnitOfWork } from '../database/unit-of-work';
 import type { LayoutSensor, LayoutVersion, TowerLayout } from './tower-layout';
 
-type TowerRow = Omit<TowerLayout, 'sensors' | 'reportOnly'> & { readonly screening: string };
+type TowerRow = Omit<TowerLayout, 'sensors' | 'reportOnly' | 'neighbourIds'> & {
+  readonly screening: string;
+  readonly neighbours: string;
+};
 type SensorRow = Omit<LayoutSensor, 'limits' | 'versions'> & {
   readonly limits: string | null;
   readonly versions: string;
 };
 
-const TOWER = `SELECT id, name, elevation_m elevationM, interval_s intervalS, block_s blockS, clock, stamp, screening,
-  inversion_form inversionForm, embed_depth_m embedDepthM, retired_at retiredAt FROM tower WHERE id = $1`;
+const TOWER = `SELECT id, name, elevation_m elevationM, latitude, longitude, interval_s intervalS, block_s blockS, clock, stamp, screening,
+  inversion_form inversionForm, embed_depth_m embedDepthM, retired_at retiredAt,
+  (SELECT json_group_array(neighbour_id) FROM tower_neighbour WHERE tower_id = tower.id) neighbours
+  FROM tower WHERE id = $1`;
 const SENSORS = `SELECT id, name, quantity, retired_at retiredAt, screening_limits limits,
   (SELECT json_group_array(json_object('fromT', from_t, 'heightM', height_m, 'offset', "offset", 'gain', gain,
     'sigma', sigma, 'pairSigma', pair_sigma)) FROM sensor_version v WHERE v.sensor_id = s.id) versions
@@ -40,9 +45,12 @@ export class TowerLayouts {
     if (kept) return kept;
     const row = await this.sql.get<TowerRow>(TOWER, [towerId]);
     if (!row) throw new Problem('not-found', `There is no tower ${towerId}.`);
-    const { screening, ...tower } = row;
+    const { screening, neighbours, ...tower } = row;
     const sensors = await this.sql.all<SensorRow>(SENSORS, [towerId]);
-    const layout = { ...tower, reportOnly: screening === 'report-only', sensors: sensors.map(sensorOf) };
+    const layout = {
+      ...{ ...tower, reportOnly: screening === 'report-only', sensors: sensors.map(sensorOf) },
+      neighbourIds: JSON.parse(neighbours) as number[],
+    };
     // What a transaction has not committed yet may never be true.
     if (!openUnit()) this.kept.set(towerId, layout);
     return layout;

@@ -8,6 +8,7 @@ import {
   ParseIntPipe,
   Patch,
   Post,
+  Put,
   Query,
 } from '@nestjs/common';
 import { ApiCreatedResponse, ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
@@ -17,7 +18,9 @@ import { PageQuery } from '../common/paging';
 import { TowerChangePage, VersionDateInput } from './dto/tower-change.dto';
 import { SensorInput, SensorPatch } from './dto/sensor-input.dto';
 import { SensorDto, TowerDto } from './dto/tower.dto';
+import { NeighboursDto } from './dto/neighbours.dto';
 import { TowerInput, TowerPatch } from './dto/tower-input.dto';
+import { NeighboursService } from './neighbours.service';
 import { RemovalService } from './removal.service';
 import { SensorVersionsService } from './sensor-versions.service';
 import { SensorsService } from './sensors.service';
@@ -33,6 +36,7 @@ export class TowersController {
     private readonly sensors: SensorsService,
     private readonly versions: SensorVersionsService,
     private readonly removal: RemovalService,
+    private readonly near: NeighboursService,
     private readonly record: TowerChangesService,
   ) {}
 
@@ -137,6 +141,26 @@ export class TowersController {
   @ApiNoContentResponse()
   removeTower(@Param('id', ParseIntPipe) id: number, @CurrentUser() by: SignedIn): Promise<void> {
     return this.removal.tower(id, by);
+  }
+
+  /** Says whose readings are looked at when a tower's are screened. */
+  @Get('towers/:id/neighbours')
+  @Roles('administrator', 'analyst', 'officer')
+  @ApiOkResponse({ type: NeighboursDto })
+  neighbours(@Param('id', ParseIntPipe) id: number): Promise<NeighboursDto> {
+    return this.near.of(id);
+  }
+
+  /** Sets whose readings are looked at when a tower's are screened; its record is screened anew. */
+  @Put('towers/:id/neighbours')
+  @Roles('administrator', 'analyst')
+  @ApiOkResponse({ type: NeighboursDto })
+  setNeighbours(
+    @Param('id', ParseIntPipe) id: number,
+    @Body() input: NeighboursDto,
+    @CurrentUser() by: SignedIn,
+  ): Promise<NeighboursDto> {
+    return this.near.set(id, input, by);
   }
 
   /** Lists what was ever changed about a tower, the newest first. */

@@ -7,6 +7,7 @@ import { SensorVersion } from './models/sensor-version.model';
 import { Sensor } from './models/sensor.model';
 import { Source } from './models/source.model';
 import { Tower } from './models/tower.model';
+import { NeighboursService } from './neighbours.service';
 import { RemovalService } from './removal.service';
 import { SensorVersionsService } from './sensor-versions.service';
 import { SensorsService } from './sensors.service';
@@ -28,6 +29,7 @@ import { TowersService } from './towers.service';
     SensorsService,
     SensorVersionsService,
     RemovalService,
+    NeighboursService,
     TowerChangesService,
     KeysService,
     SourcesService,

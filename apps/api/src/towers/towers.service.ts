@@ -150,4 +150,11 @@ const changesBlocks = (before: TowerDto, patch: TowerPatch): boolean =>
   differs(before, patch, ['intervalMinutes', 'blockMinutes']);
 
 const changesFindings = (before: TowerDto, patch: TowerPatch): boolean =>
-  differs(before, patch, ['elevationM', 'screening', 'inversionForm', 'embedDepthM']);
+  differs(before, patch, [
+    'elevationM',
+    'latitude',
+    'longitude',
+    'screening',
+    'inversionForm',
+    'embedDepthM',
+  ]);

@@ -38,7 +38,7 @@ export function pairsOf(tower: readonly Series[]): readonly Pair[] {
 const unusual = (
   differenceC: number,
   thicknessM: number,
-  sunDeg: number | null,
+  sunDeg: () => number | null,
   limits: VerticalLimits,
 ): { reason: string; rises: boolean } | undefined => {
   const perMetre = differenceC / thicknessM;
@@ -48,10 +48,11 @@ const unusual = (
   });
   if (differenceC > limits.riseC) return because(`exceeds +${limits.riseC} °C`, true);
   if (differenceC < -limits.fallC) return because(`exceeds −${limits.fallC} °C`, false);
-  if (sunDeg !== null && sunDeg > 0 && perMetre > limits.risePerMetreByDayC) {
+  // The sun is asked only where it decides: its elevation takes longer to find than all the rest.
+  if (perMetre > limits.risePerMetreByDayC && (sunDeg() ?? -90) > 0) {
     return because(`exceeds +${limits.risePerMetreByDayC} °C/m by day`, true);
   }
-  if (sunDeg !== null && sunDeg <= 0 && perMetre < -limits.fallPerMetreAtNightC) {
+  if (perMetre < -limits.fallPerMetreAtNightC && (sunDeg() ?? 90) <= 0) {
     return because(`exceeds −${limits.fallPerMetreAtNightC} °C/m at night`, false);
   }
   if (-1000 * perMetre > AUTOCONVECTIVE_LAPSE_RATE_K_PER_KM) {
@@ -85,7 +86,8 @@ export function checkVertical(
     for (let i = 0; i < series.t.length; i += 1) {
       if (series.evidence[i] === 0) continue;
       const t = series.t[i]!;
-      const found = unusual(differenceAt(pair, t), thicknessOf(pair), sun?.(t) ?? null, limits);
+      const sunDeg = () => sun?.(t) ?? null;
+      const found = unusual(differenceAt(pair, t), thicknessOf(pair), sunDeg, limits);
       if (found === undefined) continue;
       const same = otherPairs.find((other) => goesTheSameWay(other, t, found.rises));
       const withdrawn = same === undefined ? {} : { withdrawn: `${same.upper.sensorId} goes the same way` };

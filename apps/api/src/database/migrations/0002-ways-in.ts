@@ -81,6 +81,12 @@ export const up: readonly string[] = [
   `CREATE INDEX rework_tower ON rework(tower_id, id)`,
   `CREATE INDEX rework_open ON rework(tower_id) WHERE ended_at IS NULL`,
 
+  // --- towers whose readings speak for and against one another's ---------------------------------------------------
+  `CREATE TABLE tower_neighbour (
+     tower_id INTEGER NOT NULL REFERENCES tower(id), neighbour_id INTEGER NOT NULL REFERENCES tower(id),
+     PRIMARY KEY (tower_id, neighbour_id), CHECK (tower_id <> neighbour_id)) STRICT, WITHOUT ROWID`,
+  `CREATE INDEX tower_neighbour_of ON tower_neighbour(neighbour_id)`,
+
   // --- staff can be written to ----------------------------------------------------------------------------------
   `ALTER TABLE contact ADD COLUMN user_id INTEGER REFERENCES user(id)`,
   `DROP INDEX contact_address`,

@@ -49,6 +49,9 @@ interface Running {
   how: HowToRead;
 }
 
+/** Only such a tower's readings can be judged by themselves, as they come. */
+const standsAlone = ({ neighbourIds }: TowerLayout): boolean => neighbourIds.length === 0;
+
 /** Imports whole files of any size with little memory: one import for the file, many short transactions. */
 @Injectable()
 export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
@@ -99,7 +102,7 @@ export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
       layout,
       importId: undefined,
       counts: NOTHING_COUNTED,
-      how: { direct: true, passedUntil: 0 },
+      how: { direct: standsAlone(layout), passedUntil: 0 },
     };
     try {
       return await this.readAll(running);
@@ -159,7 +162,7 @@ export class ImportRunner implements OnApplicationBootstrap, OnModuleDestroy {
     const before = running.counts.new;
     await this.takeRows(running, { rows, refused });
     running.how = {
-      direct: running.counts.new - before === rows.length,
+      direct: standsAlone(running.layout) && running.counts.new - before === rows.length,
       passedUntil: Math.max(passedUntil, fresh?.epoch ?? 0),
     };
   }

@@ -48,10 +48,7 @@ export class ReadingTaker {
     await this.store.write(write, importId);
     await this.store.keepPast(past, importId, this.clock.now());
     const blocks = new Set(write.map((row) => blockEndOf(row.tEnd, layout.blockS)));
-    await this.dirty.mark(
-      1,
-      [...blocks].map((t) => [layout.id, t] as const),
-    );
+    await this.dirty.markRead([...blocks].map((t) => [layout.id, t] as const));
     return taken;
   }
 

@@ -272,6 +272,22 @@ export interface paths {
     patch: operations['Towers.moveVersion'];
     trace?: never;
   };
+  '/api/towers/{id}/neighbours': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Towers.neighbours'];
+    put: operations['Towers.setNeighbours'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/towers/{id}/changes': {
     parameters: {
       query?: never;
@@ -1645,6 +1661,10 @@ export interface components {
     };
     VersionDateInput: {
       from: string;
+    };
+    NeighboursDto: {
+      /** @description Ids of other towers, at most 8 */
+      towerIds: number[];
     };
     TowerChange: {
       id: number;
@@ -3719,6 +3739,52 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['Sensor'];
+        };
+      };
+    };
+  };
+  'Towers.neighbours': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NeighboursDto'];
+        };
+      };
+    };
+  };
+  'Towers.setNeighbours': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['NeighboursDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NeighboursDto'];
         };
       };
     };

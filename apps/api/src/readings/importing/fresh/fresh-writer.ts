@@ -55,6 +55,8 @@ export class FreshWriter {
     await this.sql.run(WRITE, [fresh.readings, importId]);
     if (fresh.earlierFlags) await this.screening.writeFlagRows(fresh.earlierFlags);
     await this.dirty.markHeld(fresh.waitingEnds.map((end) => [towerId, end]));
+    const ends = [...fresh.waitingEnds, ...fresh.profileEnds, ...fresh.failedEnds];
+    await this.dirty.markNeighbours(ends.map((end) => [towerId, end]));
     if (fresh.profileEnds.length + fresh.failedEnds.length === 0) return;
     await this.screening.addMeanRows(fresh.means);
     await this.profiles.addRows(fresh.profiles);
