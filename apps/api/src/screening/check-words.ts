@@ -1,4 +1,4 @@
-import { DEFAULT_VERTICAL_LIMITS, type SensorLimits } from '@lidwatch/atmosphere';
+import type { SensorLimits } from '@lidwatch/atmosphere';
 import type { Check, Quality } from '@lidwatch/contracts';
 import { unitsByQuantity } from '../towers/quantities';
 import type { LayoutSensor } from '../towers/tower-layout';
@@ -19,16 +19,16 @@ export function checkWords(check: Check, sensor: LayoutSensor, quality: Quality)
   const unit = unitsByQuantity[sensor.quantity];
   const [step] = limits.steps;
   const [steady] = limits.steadiness;
-  const { riseC, fallC } = DEFAULT_VERTICAL_LIMITS;
   const words: Readonly<Record<Check, string>> = {
     clock: 'Stamped by a clock that is proved wrong',
     range: rangeWords(limits, unit, quality),
     spike: `A single reading more than ${amount(limits.spike ?? 0, unit)} from those before and after it`,
-    step: `Changed faster than usual${step ? ` (such as ${amount(step.limit, unit)} in ${step.hours} h)` : ''} while no other level moved the same way`,
+    step: `Changed faster than usual${step ? ` (such as ${amount(step.limit, unit)} in ${step.hours} h)` : ''} while no other level or neighbouring tower moved the same way`,
     stuck: `The very same value for ${limits.stuckHours ?? 0} h or more while another level moved`,
-    persistence: `Hardly varied${steady ? ` (${amount(steady.limit, unit)} in ${steady.hours} h)` : ''} while no other level was as steady`,
+    persistence: `Hardly varied${steady ? ` (${amount(steady.limit, unit)} in ${steady.hours} h)` : ''} while no other level or neighbouring tower was as steady`,
     'internal consistency': `Above the air temperature at its height by more than the two sensors can tell`,
-    'vertical consistency': `An unusual difference to the next level (+${riseC} or −${fallC} °C, or beyond the autoconvective rate) while no other pair of levels went the same way`,
+    'vertical consistency':
+      'An unusual difference to the next level, as the limits of the upper one have it, while no other pair of levels went the same way',
     neighbours: `Differs from the neighbouring towers by more than ${amount(limits.neighbourDifference ?? 0, unit)}`,
     override: 'A person’s word holds',
   };

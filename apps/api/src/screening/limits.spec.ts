@@ -31,7 +31,11 @@ describe('limits of checks', () => {
     );
     return rows.map(({ quality }) => quality);
   };
-  const usual = { plausible: null, spike: 5, stuckHours: 3, fastChanges: true, steadiness: true };
+  const levelDifference = { riseC: 5, fallC: 3, risePerMetreByDayC: 0.1, fallPerMetreAtNightC: 0.1 };
+  const usual = {
+    ...{ plausible: null, spike: 5, stuckHours: 3, fastChanges: true, steadiness: true },
+    ...{ neighbourDifference: null, levelDifference },
+  };
   const set = (changes: object, status = 200) =>
     analyst.http
       .put(`/api/sensors/${sensorId}/limits`)
@@ -59,7 +63,21 @@ describe('limits of checks', () => {
     });
   });
 
+  it('of the difference to the level below and to neighbouring towers are kept and shown', async () => {
+    const wanted = { neighbourDifference: 4, levelDifference: { ...levelDifference, riseC: 9 } };
+    await set(wanted);
+    const { body } = await analyst.http.get(`/api/towers/${towerId}/limits`).expect(200);
+    expect((body as SensorLimitsDto[])[0]!.limits).toMatchObject(wanted);
+    await set({ levelDifference: null });
+    const kept = await test.sql.get('SELECT screening_limits kept FROM sensor WHERE id = $1', [sensorId]);
+    expect(kept).toEqual({ kept: '{"levelDifference":null}' });
+    await set({});
+  });
+
   it.each([
+    [{ levelDifference: { ...levelDifference, fallC: 0 } }, 'fallC'],
+    [{ levelDifference: { riseC: 4 } }, 'fallC'],
+    [{ neighbourDifference: 0 }, 'null switches the check off'],
     [{ plausible: { lowest: 5, highest: -5 } }, 'exchange the two'],
     [{ plausible: { lowest: -100, highest: 5 } }, 'within what is possible'],
     [{ stuckHours: 24 }, '1 to 12'],

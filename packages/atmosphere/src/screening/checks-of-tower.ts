@@ -6,7 +6,6 @@ import { WORD, type Words } from './overrides';
 import { checkPersistence, checkStuck } from './persistence';
 import { checkRange } from './range';
 import type { Series } from './series';
-import { DEFAULT_VERTICAL_LIMITS, type VerticalLimits } from './settings';
 import { checkSpike } from './spike';
 import { checkStep } from './step';
 import { checkVertical, pairsOf, type SunElevationDeg } from './vertical';
@@ -15,7 +14,6 @@ import { checkVertical, pairsOf, type SunElevationDeg } from './vertical';
 export interface ChecksInput {
   readonly wrongClocks?: readonly WrongClock[];
   readonly sunElevationDeg?: SunElevationDeg;
-  readonly verticalLimits?: Partial<VerticalLimits>;
 }
 
 /** From here on these readings are no evidence, except where a person says that they are valid. */
@@ -62,10 +60,9 @@ export function checksOfTower(
   }
   const pairs = pairsOf(tower);
   const pairsNearby = nearby.flatMap(pairsOf);
-  const limits = { ...DEFAULT_VERTICAL_LIMITS, ...input.verticalLimits };
   for (const pair of pairs) {
     const others = [...pairs.filter((p) => p !== pair), ...pairsNearby];
-    checkVertical(pair, others, limits, input.sunElevationDeg, flagsOf);
+    checkVertical(pair, others, input.sunElevationDeg, flagsOf);
   }
   return tower.map(flagsOf);
 }

@@ -7,6 +7,7 @@ import {
   type RawReading,
   type ScreeningInput,
   type SensorSeries,
+  type VerticalLimits,
 } from '.';
 
 const H = 3600;
@@ -103,21 +104,20 @@ describe('step', () => {
     expect(flags[0]!.reason).toMatch(/rose by .* in 1 h \(limit 5 °C, EPA-454/);
   });
   it('is withdrawn when a neighbouring level, or tower, moves the same way: a break-up', () => {
-    const other = sensor('b', 202, [...noisy(7), ...noisy(7, 5)]);
+    const other = sensor('b', 202, [...noisy(7), ...noisy(7, 5)], { limits: { levelDifference: null } });
     const alone = sensor('a', 2, warming);
-    const vertical = { verticalLimits: { riseC: 99, fallC: 99 } };
-    expect(qualities({ sensors: [alone, other], ...vertical })).not.toContain('suspect');
+    expect(qualities({ sensors: [alone, other] })).not.toContain('suspect');
     expect(qualities({ sensors: [alone], neighbours: [[other]] })).not.toContain('suspect');
     expect(flagsAt({ sensors: [alone], neighbours: [[other]] }, 8)[0]!.withdrawn).toBe(
       'b moves the same way',
     );
   });
   it('is not withdrawn by a level that stays, or goes the other way', () => {
-    const vertical = { verticalLimits: { riseC: 99, fallC: 99 } };
+    const limits = { levelDifference: null };
     for (const other of [noisy(14), [...noisy(7), ...noisy(7, -7)]]) {
-      expect(
-        qualities({ sensors: [sensor('a', 2, warming), sensor('b', 10, other)], ...vertical }),
-      ).toContain('suspect');
+      expect(qualities({ sensors: [sensor('a', 2, warming), sensor('b', 10, other, { limits })] })).toContain(
+        'suspect',
+      );
     }
   });
 });
@@ -213,13 +213,22 @@ describe('vertical consistency', () => {
       [sensor('a', 2, [0]), sensor('b', 12, [1.5])],
       [sensor('a', 2, [0]), sensor('b', 22, [-2.5])],
     ];
-    const limits = { verticalLimits: { fallC: 99 } };
     expect(flagsAt({ sensors: rise!, sunElevationDeg: () => 20 }, 0)[0]!.reason).toContain('by day');
     expect(flagsAt({ sensors: rise!, sunElevationDeg: () => -5 }, 0)).toEqual([]);
-    expect(flagsAt({ sensors: fall!, sunElevationDeg: () => -5, ...limits }, 0)[0]!.reason).toContain(
-      'at night',
-    );
+    expect(flagsAt({ sensors: fall!, sunElevationDeg: () => -5 }, 0)[0]!.reason).toContain('at night');
     expect(flagsAt({ sensors: rise! }, 0)).toEqual([]);
+  });
+  it('takes the limits of the upper sensor, and none where they are switched off', () => {
+    const of = (levelDifference: VerticalLimits | null) => [
+      sensor('a', 2, [0]),
+      sensor('b', 102, [4], { limits: { levelDifference } }),
+    ];
+    const riseC = 3.5;
+    const limits = { riseC, fallC: 3, risePerMetreByDayC: 0.1, fallPerMetreAtNightC: 0.1 };
+    expect(flagsAt({ sensors: of(limits) }, 0)[0]!.reason).toContain('exceeds +3.5 °C');
+    expect(qualities({ sensors: of({ ...limits, riseC: 4 }) })).toEqual(['valid']);
+    const fall = [sensor('a', 2, [0]), sensor('b', 12, [-9], { limits: { levelDifference: null } })];
+    expect(qualities({ sensors: fall })).toEqual(['valid']);
   });
   it('never fails a reading', () => {
     fc.assert(

@@ -13,6 +13,24 @@ export interface ChangeLimit {
   readonly source: string;
 }
 
+/** Limits between levels of one tower, temperature rising upward being positive. Source: [EPA454] table 8-4. */
+export interface VerticalLimits {
+  /** °C/m, by day and by night. */
+  readonly risePerMetreByDayC: number;
+  readonly fallPerMetreAtNightC: number;
+  /** °C between two levels. */
+  readonly riseC: number;
+  readonly fallC: number;
+}
+
+/** Table 8-4 of EPA-454/R-99-005. Real winters break it: it gives *suspect* at most. */
+export const DEFAULT_VERTICAL_LIMITS: VerticalLimits = {
+  risePerMetreByDayC: 0.1,
+  fallPerMetreAtNightC: 0.1,
+  riseC: 5,
+  fallC: 3,
+};
+
 /** Limits of one sensor; each may be set, null switches a check off. */
 export interface SensorLimits {
   /** Outside: failed. */
@@ -31,6 +49,8 @@ export interface SensorLimits {
   readonly spike: number | null;
   /** Differs by more than this from the median of the declared neighbours: suspect. Off unless set. */
   readonly neighbourDifference: number | null;
+  /** An unusual difference to the temperature level below: suspect, unless another pair of levels goes the same way. */
+  readonly levelDifference: VerticalLimits | null;
 }
 
 const EPA = 'EPA-454/R-99-005, table 8-4';
@@ -44,6 +64,7 @@ const off = {
   movesBy: 0.5,
   spike: null,
   neighbourDifference: null,
+  levelDifference: null,
 } as const;
 
 const changes = (source: string, ...pairs: readonly (readonly [number, number])[]): readonly ChangeLimit[] =>
@@ -61,6 +82,7 @@ export const DEFAULT_LIMITS: Readonly<Record<MeasuredQuantity, SensorLimits>> = 
     steadiness: changes(EPA, [12, 0.5]),
     stuckHours: 3,
     spike: 5,
+    levelDifference: DEFAULT_VERTICAL_LIMITS,
   },
   'dew point': {
     ...off,
@@ -101,24 +123,6 @@ export const DEFAULT_LIMITS: Readonly<Record<MeasuredQuantity, SensorLimits>> = 
     spike: 5,
   },
   pm25: { ...off, physical: { lowest: -10, highest: 10000 }, plausible: { lowest: -10, highest: 1000 } },
-};
-
-/** Limits between levels of one tower, temperature rising upward being positive. Source: [EPA454] table 8-4. */
-export interface VerticalLimits {
-  /** °C/m, by day and by night. */
-  readonly risePerMetreByDayC: number;
-  readonly fallPerMetreAtNightC: number;
-  /** °C between two levels. */
-  readonly riseC: number;
-  readonly fallC: number;
-}
-
-/** Table 8-4 of EPA-454/R-99-005. Real winters break it: it gives *suspect* at most. */
-export const DEFAULT_VERTICAL_LIMITS: VerticalLimits = {
-  risePerMetreByDayC: 0.1,
-  fallPerMetreAtNightC: 0.1,
-  riseC: 5,
-  fallC: 3,
 };
 
 /** A neighbour moves the same way when it makes at least this share of the change. Common practice. */

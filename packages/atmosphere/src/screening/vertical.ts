@@ -70,7 +70,8 @@ const goesTheSameWay = (pair: Pair, t: number, rises: boolean): boolean => {
 /**
  * Vertical consistency: an unusual difference between two neighbouring levels makes both readings *suspect*, never
  * failed: strong inversions and sunlit ground are real. It is withdrawn when another pair of the tower, or of a
- * neighbouring tower, goes the same way. Day and night limits apply only where the sun's elevation is given.
+ * neighbouring tower, goes the same way. The limits are those of the upper sensor; those for day and night apply only
+ * where the sun's elevation is given.
  *
  * Units: °C, m, degrees. Valid: readings of both levels within half an interval of one another.
  * Source: [EPA454] tables 8-3 and 8-4; [AMSGlossary] autoconvective lapse rate.
@@ -78,10 +79,11 @@ const goesTheSameWay = (pair: Pair, t: number, rises: boolean): boolean => {
 export function checkVertical(
   pair: Pair,
   otherPairs: readonly Pair[],
-  limits: VerticalLimits,
   sun: SunElevationDeg | undefined,
   flagsOf: (series: Series) => FlagList,
 ): void {
+  const limits = pair.upper.limits.levelDifference;
+  if (limits === null) return;
   const check = (series: Series) => {
     for (let i = 0; i < series.t.length; i += 1) {
       if (series.evidence[i] === 0) continue;

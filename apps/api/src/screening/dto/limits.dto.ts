@@ -12,6 +12,30 @@ export class LimitRangeDto {
   @ApiProperty() @IsNumber({}, number('the highest value')) highest!: number;
 }
 
+const fourth = {
+  message: 'Give all four differences to the level below, each above 0, or none of them.',
+};
+
+/** What differs more from the level below is suspect. */
+@ApiSchema({ name: 'LevelDifference' })
+export class LevelDifferenceDto {
+  @ApiProperty({ description: 'Warmer than the level below by more, °C' })
+  @Min(0.01, fourth)
+  riseC!: number;
+
+  @ApiProperty({ description: 'Colder than the level below by more, °C' })
+  @Min(0.01, fourth)
+  fallC!: number;
+
+  @ApiProperty({ description: 'Warmer by day by more, °C/m' })
+  @Min(0.001, fourth)
+  risePerMetreByDayC!: number;
+
+  @ApiProperty({ description: 'Colder at night by more, °C/m' })
+  @Min(0.001, fourth)
+  fallPerMetreAtNightC!: number;
+}
+
 /** The limits of a sensor's checks, in its unit; null switches a check off. */
 @ApiSchema({ name: 'CheckLimits' })
 export class CheckLimitsDto {
@@ -41,6 +65,26 @@ export class CheckLimitsDto {
   @Min(1, { message: 'stuckHours must be 1 to 12; null switches the check off' })
   @Max(12, { message: 'stuckHours must be 1 to 12; null switches the check off' })
   stuckHours!: number | null;
+
+  @ApiProperty({
+    type: Number,
+    nullable: true,
+    description: 'Further than this from the median of the neighbouring towers: suspect',
+  })
+  @orNull
+  @IsNumber({}, number('a difference above 0'))
+  @Min(0.01, { message: 'neighbourDifference must be above 0; null switches the check off' })
+  neighbourDifference!: number | null;
+
+  @ApiProperty({
+    type: LevelDifferenceDto,
+    nullable: true,
+    description: 'Air temperature alone: what is unusual from the level below to this one; suspect',
+  })
+  @orNull
+  @ValidateNested()
+  @Type(() => LevelDifferenceDto)
+  levelDifference!: LevelDifferenceDto | null;
 
   @ApiProperty({ description: 'Whether changes faster than usual are suspect' })
   @IsBoolean({ message: 'fastChanges must be true or false' })

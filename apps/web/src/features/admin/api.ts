@@ -5,6 +5,7 @@ import type {
   District,
   IngestKey,
   Measure,
+  Neighbours,
   Office,
   Rule,
   Sensor,
@@ -62,6 +63,9 @@ export const useTowerChanges = (towerId: number, page: number) =>
     live: true,
     keepPrevious: true,
   });
+export const useNeighbours = (towerId: number) => useApi<Neighbours>(`/api/towers/${towerId}/neighbours`);
+export const setNeighbours = (towerId: number, neighbours: Neighbours) =>
+  api.put<Neighbours>(`/api/towers/${towerId}/neighbours`, neighbours);
 export const addSource = (towerId: number, source: object) =>
   api.post<Source>(`/api/towers/${towerId}/sources`, source);
 export const changeSource = (id: number, change: object) => api.patch<Source>(`/api/sources/${id}`, change);

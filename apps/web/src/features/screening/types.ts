@@ -21,6 +21,7 @@ export type RawReading = Shapes['RawReading'];
 export type SetSpan = Shapes['Override'];
 export type SensorLimits = Shapes['SensorLimits'];
 export type CheckLimits = Shapes['CheckLimits'];
+export type LevelDifference = Shapes['LevelDifference'];
 export type Rework = Shapes['Rework'];
 export type ChangedFindings = Shapes['ChangedFindings'];
 /** What a person may say of readings: *failed* sets them aside, *valid* sets them right. */

@@ -2321,6 +2321,16 @@ export interface components {
       lowest: number;
       highest: number;
     };
+    LevelDifference: {
+      /** @description Warmer than the level below by more, °C */
+      riseC: number;
+      /** @description Colder than the level below by more, °C */
+      fallC: number;
+      /** @description Warmer by day by more, °C/m */
+      risePerMetreByDayC: number;
+      /** @description Colder at night by more, °C/m */
+      fallPerMetreAtNightC: number;
+    };
     CheckLimits: {
       /** @description What is expected here; beyond it: suspect */
       plausible: components['schemas']['LimitRange'] | null;
@@ -2328,6 +2338,10 @@ export interface components {
       spike: number | null;
       /** @description The very same value for so many hours: failed */
       stuckHours: number | null;
+      /** @description Further than this from the median of the neighbouring towers: suspect */
+      neighbourDifference: number | null;
+      /** @description Air temperature alone: what is unusual from the level below to this one; suspect */
+      levelDifference: components['schemas']['LevelDifference'] | null;
       /** @description Whether changes faster than usual are suspect */
       fastChanges: boolean;
       /** @description Whether hours without any change to speak of are suspect */
@@ -2349,6 +2363,10 @@ export interface components {
       spike: number | null;
       /** @description The very same value for so many hours: failed */
       stuckHours: number | null;
+      /** @description Further than this from the median of the neighbouring towers: suspect */
+      neighbourDifference: number | null;
+      /** @description Air temperature alone: what is unusual from the level below to this one; suspect */
+      levelDifference: components['schemas']['LevelDifference'] | null;
       /** @description Whether changes faster than usual are suspect */
       fastChanges: boolean;
       /** @description Whether hours without any change to speak of are suspect */

@@ -3,6 +3,7 @@ import { Card } from '../../../components/ui/card';
 import { PartTitle } from '../../../components/ui/heading';
 import type { Tower } from '../types';
 import { KeysPart } from './keys-part';
+import { NeighboursPart } from './neighbours-part';
 import { SensorsPart } from './sensors-part';
 import { SourcesPart } from './sources-part';
 import { TowerChanges } from './tower-changes';
@@ -29,6 +30,7 @@ export function TowerView({ tower, mayMakeKeys, zone, onChanged }: TowerViewProp
         <PartTitle mb="3">Settings</PartTitle>
         <TowerForm key={tower.version} tower={tower} onSaved={onChanged} />
       </Card>
+      <NeighboursPart tower={tower} />
       <TowerChanges towerId={tower.id} zone={zone} />
       <TowerEnd tower={tower} onChanged={onChanged} />
     </Stack>

@@ -72,7 +72,7 @@ export function CalendarGrid({ calendar: { days, sensors, timeZone }, chosen, on
           <tr>
             <SensorHead as="td" />
             {monthsOf(days).map(({ name, days: n }, i) => (
-              <Month key={i} colSpan={n}>
+              <Month key={i} as={name ? 'th' : 'td'} colSpan={n}>
                 {name}
               </Month>
             ))}

@@ -47,7 +47,7 @@ export function LimitsCard({ towerId, mayChange, onChanged }: LimitsCardProps) {
               keyOf={({ sensorId }) => sensorId}
               columns={[
                 { head: 'Sensor', cell: ({ sensorName }) => <strong>{sensorName}</strong> },
-                { head: 'Limits', cell: (row) => limitPhrases(row.limits, row.unit).join(', ') },
+                { head: 'Limits', cell: (row) => limitPhrases(row.limits, row.usual, row.unit).join(', ') },
                 {
                   head: 'Other than usual',
                   cell: (row) => changedPhrases(row.limits, row.usual, row.unit).join(', ') || 'nothing',
