@@ -1,7 +1,8 @@
-import { ApiProperty } from '@nestjs/swagger';
+import { ApiProperty, ApiSchema } from '@nestjs/swagger';
 import { ArrayMaxSize, ArrayUnique, IsArray, IsInt } from 'class-validator';
 
 /** Towers whose readings are looked at when a tower's are screened. */
+@ApiSchema({ name: 'Neighbours' })
 export class NeighboursDto {
   @ApiProperty({ type: [Number], description: 'Ids of other towers, at most 8' })
   @IsArray({ message: 'towerIds must be a list of towers' })

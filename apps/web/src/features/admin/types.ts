@@ -9,7 +9,7 @@ export type Tower = Shapes['Tower'];
 /** Something that was changed about a tower. */
 export type TowerChange = Shapes['TowerChange'];
 /** The towers whose readings are looked at when a tower's are screened. */
-export type Neighbours = Shapes['NeighboursDto'];
+export type Neighbours = Shapes['Neighbours'];
 export type Source = Shapes['Source'];
 /** A file that staff sent, with the layout it was read by. */
 export type Upload = Shapes['Upload'];

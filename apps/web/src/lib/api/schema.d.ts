@@ -1662,7 +1662,7 @@ export interface components {
     VersionDateInput: {
       from: string;
     };
-    NeighboursDto: {
+    Neighbours: {
       /** @description Ids of other towers, at most 8 */
       towerIds: number[];
     };
@@ -3777,7 +3777,7 @@ export interface operations {
           [name: string]: unknown;
         };
         content: {
-          'application/json': components['schemas']['NeighboursDto'];
+          'application/json': components['schemas']['Neighbours'];
         };
       };
     };
@@ -3793,7 +3793,7 @@ export interface operations {
     };
     requestBody: {
       content: {
-        'application/json': components['schemas']['NeighboursDto'];
+        'application/json': components['schemas']['Neighbours'];
       };
     };
     responses: {
@@ -3802,7 +3802,7 @@ export interface operations {
           [name: string]: unknown;
         };
         content: {
-          'application/json': components['schemas']['NeighboursDto'];
+          'application/json': components['schemas']['Neighbours'];
         };
       };
     };
