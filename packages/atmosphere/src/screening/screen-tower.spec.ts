@@ -215,6 +215,8 @@ describe('vertical consistency', () => {
     ];
     expect(flagsAt({ sensors: rise!, sunElevationDeg: () => 20 }, 0)[0]!.reason).toContain('by day');
     expect(flagsAt({ sensors: rise!, sunElevationDeg: () => -5 }, 0)).toEqual([]);
+    // A night's inversion that the low sun has not reached yet.
+    expect(flagsAt({ sensors: rise!, sunElevationDeg: () => 14 }, 0)).toEqual([]);
     expect(flagsAt({ sensors: fall!, sunElevationDeg: () => -5 }, 0)[0]!.reason).toContain('at night');
     expect(flagsAt({ sensors: rise! }, 0)).toEqual([]);
   });

@@ -31,6 +31,13 @@ export const DEFAULT_VERTICAL_LIMITS: VerticalLimits = {
   fallC: 3,
 };
 
+/**
+ * From this elevation of the sun on, degrees, air that warms upward is unusual. Table 8-4 says "by day"; but a night's
+ * inversion outlasts sunrise until the net radiation of the ground turns, near 9° over grass and 20° over snow under a
+ * clear sky (Holtslag and van Ulden 1983, from memory).
+ */
+export const DAY_FROM_SUN_DEG = 15;
+
 /** Limits of one sensor; each may be set, null switches a check off. */
 export interface SensorLimits {
   /** Outside: failed. */

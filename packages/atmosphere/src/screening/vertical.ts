@@ -2,7 +2,7 @@ import { AUTOCONVECTIVE_LAPSE_RATE_K_PER_KM, DRY_ADIABATIC_LAPSE_RATE_K_PER_KM }
 import { addFlag, type FlagList } from './flag-list';
 import type { Flag } from './reading';
 import { evidenceNear, type Series } from './series';
-import type { VerticalLimits } from './settings';
+import { DAY_FROM_SUN_DEG, type VerticalLimits } from './settings';
 import { said } from './units';
 
 /** Elevation of the sun in degrees at an instant (UTC epoch seconds); null where it is not known. */
@@ -49,7 +49,7 @@ const unusual = (
   if (differenceC > limits.riseC) return because(`exceeds +${limits.riseC} °C`, true);
   if (differenceC < -limits.fallC) return because(`exceeds −${limits.fallC} °C`, false);
   // The sun is asked only where it decides: its elevation takes longer to find than all the rest.
-  if (perMetre > limits.risePerMetreByDayC && (sunDeg() ?? -90) > 0) {
+  if (perMetre > limits.risePerMetreByDayC && (sunDeg() ?? -90) >= DAY_FROM_SUN_DEG) {
     return because(`exceeds +${limits.risePerMetreByDayC} °C/m by day`, true);
   }
   if (perMetre < -limits.fallPerMetreAtNightC && (sunDeg() ?? 90) <= 0) {
