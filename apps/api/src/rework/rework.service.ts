@@ -27,6 +27,9 @@ interface Marked {
 const EVER_S = Number.MAX_SAFE_INTEGER;
 const MARKED = `SELECT count(*) blocks, min(t) first, max(t) last FROM dirty
   WHERE stage = 1 AND subject = $1 AND t > $2 AND t <= $3`;
+/** Towers whose neighbour a tower is, each with that tower's name. */
+const HEARING = `SELECT n.tower_id id, t.name FROM tower_neighbour n JOIN tower t ON t.id = n.neighbour_id
+  WHERE n.neighbour_id = $1 ORDER BY n.tower_id`;
 const KEEP = `WITH one AS (SELECT 1)
   INSERT INTO rework (tower_id, cause, by_user, t0, t1, begun_at, blocks, past_seq, truths_before)
   SELECT $1, $2, $3, $4, $5, $6, $7, (SELECT coalesce(max(seq), 0) FROM profile_past), $8 FROM one RETURNING id`;
@@ -42,9 +45,17 @@ export class ReworkService {
 
   /**
    * Begins the record of a change, in the caller's transaction and after its blocks were marked (`DirtyStages`). Gives
-   * its id, or null where no block is marked and so nothing depends on the change yet.
+   * its id, or null where no block is marked and so nothing depends on the change yet. The towers whose neighbour it is
+   * get a record of their own.
    */
   async begin(rework: Rework): Promise<number | null> {
+    for (const { id, name } of await this.sql.all<{ id: number; name: string }>(HEARING, [rework.towerId])) {
+      await this.beginOne({ ...rework, towerId: id, cause: `Neighbouring ${name}: ${rework.cause}` });
+    }
+    return this.beginOne(rework);
+  }
+
+  private async beginOne(rework: Rework): Promise<number | null> {
     const { towerId, t0 = 0, t1 = EVER_S } = rework;
     const span = [towerId, t0, Math.min(t1, this.clock.now())];
     const marked = await this.sql.get<Marked>(MARKED, span);

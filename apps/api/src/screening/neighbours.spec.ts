@@ -156,6 +156,10 @@ describe('neighbouring towers', () => {
       .expect(200);
     await drain();
     expect(await seen(here)).toEqual(SUSPECT);
+    const { body } = await analyst.http.get(`/api/reworks?towerId=${here.towerId}`).expect(200);
+    expect((body as { cause: string }[])[0]!.cause).toMatch(
+      /^Neighbouring Tower \d+: temperature_2m: gain 0\.1 \(wrong amplifier\)$/,
+    );
   });
 
   it('are declared and taken back by staff, and the record says who', async () => {
