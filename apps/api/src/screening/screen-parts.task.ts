@@ -21,7 +21,7 @@ export interface Found {
   readonly means: BlockMean[];
 }
 
-/** Parts with the series of each in the order of `sensorsOf`, and what people have set about them. */
+/** Parts with the series of each in the order of `sensorsHeard`, and what people have set about them. */
 export interface PartsToScreen {
   readonly parts: readonly Part[];
   readonly series: readonly Series[];
@@ -35,7 +35,7 @@ export const reachOf = ({ tower, stretch, context }: Part): Stretch => ({
 });
 
 /** Whose readings a part's screening looks at: the tower's, then its neighbours'. */
-export const sensorsOf = ({ tower, neighbours }: Part): LayoutSensor[] => [
+export const sensorsHeard = ({ tower, neighbours }: Part): LayoutSensor[] => [
   ...tower.sensors,
   ...neighbours.flatMap((neighbour) => kinOf(tower, neighbour)),
 ];
@@ -43,7 +43,7 @@ export const sensorsOf = ({ tower, neighbours }: Part): LayoutSensor[] => [
 /** Screens parts: the flags that changed, and the means of the blocks that changed or hold such a flag. */
 export function screenParts({ parts, series, spans }: PartsToScreen): Found[] {
   let at = 0;
-  return parts.map((part) => screenPart(part, series.slice(at, (at += sensorsOf(part).length)), spans));
+  return parts.map((part) => screenPart(part, series.slice(at, (at += sensorsHeard(part).length)), spans));
 }
 
 /** Screening parts, for the compute thread. */

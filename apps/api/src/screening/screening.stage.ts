@@ -5,7 +5,14 @@ import { DirtyStages, type DirtyRow } from '../database/dirty';
 import { UnitOfWork } from '../database/unit-of-work';
 import { TowerLayouts } from '../towers/tower-layouts';
 import { ReadingWindows, type Wanted } from './reading-windows';
-import { reachOf, screenParts, screenPartsTask, sensorsOf, type Found, type Part } from './screen-parts.task';
+import {
+  reachOf,
+  screenParts,
+  screenPartsTask,
+  sensorsHeard,
+  type Found,
+  type Part,
+} from './screen-parts.task';
 import { contextOf } from './screen-tower';
 import { ScreeningStore } from './screening-store';
 import { stretchesOf } from './stretches';
@@ -89,5 +96,5 @@ export class ScreeningStage implements OnModuleInit {
 const wantedOf = (part: Part): Wanted[] => {
   const { t0, t1 } = reachOf(part);
   const { beforeS, afterS } = part.context;
-  return sensorsOf(part).map(({ id }) => ({ sensorId: id, t0: t0 - beforeS, t1: t1 + afterS }));
+  return sensorsHeard(part).map(({ id }) => ({ sensorId: id, t0: t0 - beforeS, t1: t1 + afterS }));
 };
