@@ -7,7 +7,7 @@ import type { ComputeTask, ThreadCall } from './compute-task';
 /** Memory of the thread, MB: work that needs more fails alone, not the service. */
 const MOST_MEMORY_MB = 512;
 /** Of it for what lives shortly, as most of a computation does. */
-const YOUNG_MEMORY_MB = 48;
+const YOUNG_MEMORY_MB = 96;
 const THREAD = path.join(__dirname, 'thread.js');
 /** A crash of the thread, as opposed to an error that the work threw. */
 const isCrash = (error: unknown): boolean =>
