@@ -11,7 +11,7 @@ const BEGIN = Date.UTC(2025, 11, 1) / 1000;
 const END = BEGIN + 1.75 * 86_400;
 /** Corrections come to the first hours only: later ones must be right without being touched again. */
 const CORRECTED_S = 12 * 3600;
-const ORDERS = 12;
+const ORDERS = 20;
 
 const BLOCK_S = 900;
 
