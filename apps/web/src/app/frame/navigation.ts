@@ -20,12 +20,5 @@ const DESK: Place = { to: paths.desk, name: 'Desk', icon: 'desk' };
 export const placesOf: Record<Role, readonly Place[]> = {
   analyst: [DESK, NOTICES, HISTORY, READINGS, FORECASTS, RULES],
   officer: [{ to: paths.officer, name: 'Decisions', icon: 'decisions' }, NOTICES, HISTORY, READINGS],
-  administrator: [
-    { to: paths.admin, name: 'Administration', icon: 'admin' },
-    DESK,
-    NOTICES,
-    HISTORY,
-    READINGS,
-    RULES,
-  ],
+  administrator: [{ to: paths.admin, name: 'Admin', icon: 'admin' }, DESK, NOTICES, HISTORY, READINGS, RULES],
 };
